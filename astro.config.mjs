@@ -1,0 +1,21 @@
+import { defineConfig } from 'astro/config';
+import node from '@astrojs/node';
+import react from '@astrojs/react';
+import tailwindcss from '@tailwindcss/vite';
+import auth from 'auth-astro';
+
+export default defineConfig({
+  output: 'server',
+  adapter: node({ mode: 'standalone' }),
+  integrations: [react(), auth({ configFile: './src/server/auth.config.ts' })],
+  // Host and protocol are pinned by src/server/entry.mjs before a request reaches Astro.
+  security: { checkOrigin: true, allowedDomains: [{}] },
+  session: { driver: 'memory' },
+  devToolbar: { enabled: false },
+  vite: {
+    plugins: [tailwindcss()],
+    // Astro bundles a zod 3 of its own; ours is 4 and must be built in.
+    ssr: { noExternal: ['zod'] },
+    server: { watch: { ignored: ['**/.ellwise/**'] } },
+  },
+});
