@@ -1,0 +1,42 @@
+import { normalQuantile, normalTail } from '../stats/normal';
+
+/** How far a skein may differ from its put-up: a lawful 4.5 % short taken as three sigma (76/211/EEC). */
+export const SKEIN_SPREAD = 0.015;
+
+/** What is needed of one colour, in metres. */
+export interface Need {
+  readonly meanM: number;
+  readonly varianceM2: number;
+}
+
+const sdWith = (need: Need, skeins: number, putUpM: number): number =>
+  Math.sqrt(need.varianceM2 + skeins * (SKEIN_SPREAD * putUpM) ** 2);
+
+/**
+ * The least whole number of skeins n with mean + z × sd(need and n skeins) at most n put-ups.
+ * 0 when nothing is needed. Never falls as `confidence` (0.5 to under 1) rises.
+ *
+ * Example: mean 380 m, variance 100 m², skeins of 200 m: 2 at 95 %; 384 m would need 3 at 99 %.
+ */
+export function skeinsFor(need: Need, putUpM: number, confidence: number): number {
+  if (need.meanM <= 0) return 0;
+  const z = normalQuantile(confidence);
+  const enough = (n: number): boolean => need.meanM + z * sdWith(need, n, putUpM) <= n * putUpM;
+  let most = Math.max(1, Math.ceil(need.meanM / putUpM));
+  while (!enough(most)) most *= 2;
+  let least = 0;
+  while (most - least > 1) {
+    const middle = Math.floor((least + most) / 2);
+    if (enough(middle)) most = middle;
+    else least = middle;
+  }
+  return most;
+}
+
+/** Chance that `skeins` put-ups are too short: `probabilityShort(need, 2, 200)`, 0 to 1. */
+export const probabilityShort = (need: Need, skeins: number, putUpM: number): number =>
+  need.meanM <= 0 ? 0 : normalTail((skeins * putUpM - need.meanM) / sdWith(need, skeins, putUpM));
+
+/** What to own so that it suffices with this confidence, in metres, before whole skeins. */
+export const quantileM = ({ meanM, varianceM2 }: Need, confidence: number): number =>
+  Math.max(0, meanM + normalQuantile(confidence) * Math.sqrt(varianceM2));
