@@ -19,7 +19,7 @@ export function connect(options: ConnectOptions = {}): Sequelize {
   const timeoutMs =
     options.statementTimeoutMs ??
     numberFromEnv('DATABASE_STATEMENT_TIMEOUT_MS', DEFAULT_STATEMENT_TIMEOUT_MS);
-  return new Sequelize(url ?? 'postgres://', {
+  return new Sequelize(url ?? 'postgres://unset/unset', {
     dialect: 'postgres',
     logging: process.env.DATABASE_LOG === '1' ? (sql) => console.log(sql) : false,
     pool: {

@@ -1,0 +1,20 @@
+/** A failure whose message is all a person needs: it is printed without a stack. */
+export class RunError extends Error {}
+
+/** One line about what is being done. @param {string} line */
+export const say = (line) => process.stdout.write(`${line}\n`);
+
+/**
+ * Runs a command's main function and turns a failure into a message and an exit code.
+ * @param {() => Promise<number | void>} main
+ */
+export async function runMain(main) {
+  try {
+    process.exitCode = (await main()) ?? process.exitCode ?? 0;
+  } catch (error) {
+    process.stderr.write(
+      error instanceof RunError ? `\n${error.message}\n` : `${error?.stack ?? error}\n`,
+    );
+    process.exitCode = 1;
+  }
+}
