@@ -1,5 +1,11 @@
 import { dot } from '../stats/linear';
-import { posterior, varianceAfter, varianceOf, type Belief, type Observation } from '../stats/posterior';
+import {
+  posterior,
+  varianceAfter,
+  varianceOf,
+  type Belief,
+  type Observation,
+} from '../stats/posterior';
 import type { StitchCode } from '../stitches/stitch';
 import type { YarnUse } from './yarnUse';
 
@@ -27,6 +33,8 @@ export interface Evidence {
  * sewing factor, so that the prior is diagonal.
  */
 export interface Hand {
+  /** Width of the single crochet stitch that the prior was set from. */
+  readonly stitchWidthMm: number;
   readonly belief: Belief;
   readonly stitches: readonly StitchCode[];
   /** Stitches that some evidence contained. */
@@ -57,7 +65,7 @@ export function learnHand(
     for (const [code, loops] of use.loops) if (loops > 0) measured.add(code);
     return { row: rowOf(stitches, use), value: lengthM - use.cutM, variance: varianceM2 };
   });
-  return { belief: posterior(prior, observations), stitches, measured };
+  return { stitchWidthMm, belief: posterior(prior, observations), stitches, measured };
 }
 
 /** Expected yarn per loop of one stitch, in mm. */
@@ -87,6 +95,13 @@ export const handVarianceAfterM2 = (
     row: rowOf(hand.stitches, next.use),
     variance: next.varianceM2,
   });
+
+/** Knowing a factor exactly is an observation of it without noise; this is small enough to be none. */
+const NO_NOISE = 1e-12;
+
+/** The part of `handVarianceM2` that would remain if the factor common to all stitches were known. */
+export const ownStitchVarianceM2 = (hand: Hand, use: YarnUse): number =>
+  varianceAfter(hand.belief, rowOf(hand.stitches, use), { row: [1], variance: NO_NOISE });
 
 /** How strongly the yarn of two pieces varies together, in m². */
 export const handCovarianceM2 = (hand: Hand, left: YarnUse, right: YarnUse): number => {

@@ -12,7 +12,14 @@ const SEAM = {
   outerSide: EVERY_STITCH,
   tool: 'hook',
 } as const;
-const SEWN = { ...SEAM, sewn: true, perSeam: {}, perLink: {}, width: NO_WIDTH, tool: 'needle' } as const;
+const SEWN = {
+  ...SEAM,
+  sewn: true,
+  perSeam: {},
+  perLink: {},
+  width: NO_WIDTH,
+  tool: 'needle',
+} as const;
 const LACE_CAUTIONS = [
   'Open loops can trap small fingers and toes: choose a closed join for a baby.',
   'Loops catch on buttons, claws and the drum of a washing machine: wash in a bag.',
@@ -74,7 +81,8 @@ export const READY_JOINS: readonly Join[] = [
     ...SEAM,
     key: 'flat-slip-stitch',
     name: 'Flat slip stitch',
-    description: 'A slip stitch drawn alternately through the front loop of either edge, laid side by side.',
+    description:
+      'A slip stitch drawn alternately through the front loop of either edge, laid side by side.',
     fit: ANY,
     perSeam: { 'sl st': { perStitch: 2 } },
     perLink: { ch: 1 },
@@ -88,7 +96,8 @@ export const READY_JOINS: readonly Join[] = [
     ...SEAM,
     key: 'zigzag-chain',
     name: 'Zigzag chain',
-    description: 'Two chains and a single crochet, to one edge and back to the other, every second stitch.',
+    description:
+      'Two chains and a single crochet, to one edge and back to the other, every second stitch.',
     fit: { multipleOf: 2, plus: 1 },
     perSeam: { sc: { fixed: 2, perRepeat: 2 }, ch: { fixed: 2, perRepeat: 4 } },
     perLink: { ch: 2 },
@@ -144,7 +153,11 @@ export const READY_JOINS: readonly Join[] = [
     roundsAdded: 2,
     // A side holds q + 1 pairs and q + 2 loops, of which the q between the pairs link.
     perSeam: { 'sl st': { perRepeat: 1 } },
-    perMotifSide: { dc: { fixed: 2, perRepeat: 2 }, ch: { fixed: 7, perRepeat: 5 }, sc: { fixed: 1, perRepeat: 1 } },
+    perMotifSide: {
+      dc: { fixed: 2, perRepeat: 2 },
+      ch: { fixed: 7, perRepeat: 5 },
+      sc: { fixed: 1, perRepeat: 1 },
+    },
     perMotifCorner: { ch: 6, sc: 1 },
     perLink: { 'sl st': 1 },
     width: { stitches: { dc: 2 }, loops: [{ chains: 3, gapStitches: 2, times: 2 }] },

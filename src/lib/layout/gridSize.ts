@@ -23,7 +23,12 @@ export interface GridSize {
  *
  * Example: 8 × 10 squares of 142 mm, 5 mm seams, 15 mm border: 1201 × 1495 mm.
  */
-export function gridSize(layout: Layout, rows: number, columns: number, measures: GridMeasures): GridSize {
+export function gridSize(
+  layout: Layout,
+  rows: number,
+  columns: number,
+  measures: GridMeasures,
+): GridSize {
   const { acrossMm, seamMm, borderMm } = measures;
   const straight = (count: number): number =>
     count * acrossMm + (count - 1) * seamMm + 2 * borderMm;
@@ -44,7 +49,11 @@ export function gridFor(
 ): { rows: number; columns: number } {
   if (size.by === 'grid') return { rows: size.rows, columns: size.columns };
   const rows = countFor(size.heightMm, size.rule, (n) => gridSize(layout, n, 1, measures).heightMm);
-  const columns = countFor(size.widthMm, size.rule, (n) => gridSize(layout, rows, n, measures).widthMm);
+  const columns = countFor(
+    size.widthMm,
+    size.rule,
+    (n) => gridSize(layout, rows, n, measures).widthMm,
+  );
   return { rows, columns };
 }
 

@@ -36,7 +36,11 @@ export interface MotifGeometry {
  *
  * Example: one round of sc 6.9 mm tall round a magic ring of 1.875 mm is 17.55 mm across.
  */
-export function motifGeometry(motif: Motif, gauge: Gauge, measuredAcrossMm: number | null): MotifGeometry {
+export function motifGeometry(
+  motif: Motif,
+  gauge: Gauge,
+  measuredAcrossMm: number | null,
+): MotifGeometry {
   const ringMm = ringRadiusMm(motif, gauge);
   const perApothem = motif.sides === 0 ? Math.PI / 2 : 2 * Math.tan(Math.PI / motif.sides);
   let apothemMm = ringMm;

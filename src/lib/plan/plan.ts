@@ -44,7 +44,12 @@ export type YarnReading =
 export type PlanEvidence = { readonly reading: YarnReading } & (
   | { readonly piece: 'swatch' }
   | { readonly piece: 'motifs'; readonly count: number; readonly motifIndex: number }
-  | { readonly piece: 'counted'; readonly label: string; readonly made: StitchCounts; readonly tails: number }
+  | {
+      readonly piece: 'counted';
+      readonly label: string;
+      readonly made: StitchCounts;
+      readonly tails: number;
+    }
 );
 
 export interface Colourway {

@@ -14,14 +14,14 @@ const sdWith = (need: Need, skeins: number, putUpM: number): number =>
 
 /**
  * The least whole number of skeins n with mean + z × sd(need and n skeins) at most n put-ups.
- * 0 when nothing is needed. Never falls as `confidence` (0.5 to under 1) rises.
+ * 0 when nothing is needed; a mean below zero stands for yarn already owned. Never falls as `confidence` (0.5 to under 1) rises.
  *
  * Example: mean 380 m, variance 100 m², skeins of 200 m: 2 at 95 %; 384 m would need 3 at 99 %.
  */
 export function skeinsFor(need: Need, putUpM: number, confidence: number): number {
-  if (need.meanM <= 0) return 0;
   const z = normalQuantile(confidence);
   const enough = (n: number): boolean => need.meanM + z * sdWith(need, n, putUpM) <= n * putUpM;
+  if (enough(0)) return 0;
   let most = Math.max(1, Math.ceil(need.meanM / putUpM));
   while (!enough(most)) most *= 2;
   let least = 0;
@@ -35,7 +35,7 @@ export function skeinsFor(need: Need, putUpM: number, confidence: number): numbe
 
 /** Chance that `skeins` put-ups are too short: `probabilityShort(need, 2, 200)`, 0 to 1. */
 export const probabilityShort = (need: Need, skeins: number, putUpM: number): number =>
-  need.meanM <= 0 ? 0 : normalTail((skeins * putUpM - need.meanM) / sdWith(need, skeins, putUpM));
+  normalTail((skeins * putUpM - need.meanM) / sdWith(need, skeins, putUpM));
 
 /** What to own so that it suffices with this confidence, in metres, before whole skeins. */
 export const quantileM = ({ meanM, varianceM2 }: Need, confidence: number): number =>

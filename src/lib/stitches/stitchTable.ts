@@ -2,9 +2,15 @@ import { DomainError } from '../errors';
 import type { Moves, Stitch, StitchCode } from './stitch';
 
 type Row = readonly [
-  code: StitchCode, us: string, ukCode: string, uk: string,
-  wraps: number, draws: number, throughs: number,
-  turningChains: number, heightOverWidth: number,
+  code: StitchCode,
+  us: string,
+  ukCode: string,
+  uk: string,
+  wraps: number,
+  draws: number,
+  throughs: number,
+  turningChains: number,
+  heightOverWidth: number,
 ];
 
 /**
@@ -46,29 +52,39 @@ interface Family {
 
 const FAMILIES: readonly Family[] = [
   {
-    pattern: /^sc(\d{1,2})tog$/, of: 'sc',
+    pattern: /^sc(\d{1,2})tog$/,
+    of: 'sc',
     moves: (n) => ({ wraps: 0, draws: n, throughs: 1 }),
-    us: (n) => `${n} single crochet together`, ukCode: (n) => `dc${n}tog`,
+    us: (n) => `${n} single crochet together`,
+    ukCode: (n) => `dc${n}tog`,
   },
   {
-    pattern: /^dc(\d{1,2})(?:tog|cl)$/, of: 'dc',
+    pattern: /^dc(\d{1,2})(?:tog|cl)$/,
+    of: 'dc',
     moves: (n) => ({ wraps: n, draws: n, throughs: n + 1 }),
-    us: (n) => `${n} double crochet together`, ukCode: (n) => `tr${n}tog`,
+    us: (n) => `${n} double crochet together`,
+    ukCode: (n) => `tr${n}tog`,
   },
   {
-    pattern: /^(\d{1,2})-dc pc$/, of: 'dc',
+    pattern: /^(\d{1,2})-dc pc$/,
+    of: 'dc',
     moves: (n) => ({ wraps: n, draws: n + 1, throughs: 2 * n }),
-    us: (n) => `popcorn of ${n} double crochet`, ukCode: (n) => `${n}-tr pc`,
+    us: (n) => `popcorn of ${n} double crochet`,
+    ukCode: (n) => `${n}-tr pc`,
   },
   {
-    pattern: /^(\d{1,2})-hdc puff$/, of: 'hdc',
+    pattern: /^(\d{1,2})-hdc puff$/,
+    of: 'hdc',
     moves: (n) => ({ wraps: n, draws: n, throughs: 1 }),
-    us: (n) => `puff of ${n} half double crochet`, ukCode: (n) => `${n}-htr puff`,
+    us: (n) => `puff of ${n} half double crochet`,
+    ukCode: (n) => `${n}-htr puff`,
   },
   {
-    pattern: /^picot-(\d{1,2})$/, of: 'sl st',
+    pattern: /^picot-(\d{1,2})$/,
+    of: 'sl st',
     moves: (n) => ({ wraps: 0, draws: 1, throughs: n }),
-    us: (n) => `picot of ${n} chains`, ukCode: (n) => `picot-${n}`,
+    us: (n) => `picot of ${n} chains`,
+    ukCode: (n) => `picot-${n}`,
   },
 ];
 
@@ -86,7 +102,11 @@ export function stitch(code: StitchCode): Stitch | null {
 /** Like `stitch`, for codes already checked. Throws DomainError for one that is not in the table. */
 export function knownStitch(code: StitchCode): Stitch {
   const found = stitch(code);
-  if (!found) throw new DomainError('unknown-stitch', `knownStitch requires a stitch of the table, got "${code}"`);
+  if (!found)
+    throw new DomainError(
+      'unknown-stitch',
+      `knownStitch requires a stitch of the table, got "${code}"`,
+    );
   return found;
 }
 
@@ -100,7 +120,15 @@ function compoundStitch(code: StitchCode): Stitch | null {
     const base = BASIC.get(family.of);
     if (!base) continue;
     const ukCode = family.ukCode(n);
-    return { ...base, code, us: family.us(n), ukCode, uk: ukCode, turningChains: 0, ...family.moves(n) };
+    return {
+      ...base,
+      code,
+      us: family.us(n),
+      ukCode,
+      uk: ukCode,
+      turningChains: 0,
+      ...family.moves(n),
+    };
   }
   return null;
 }

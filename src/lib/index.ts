@@ -1,0 +1,38 @@
+/** The library's table of contents. Pure: no clock, randomness, network or React. */
+
+// Units
+export * from './units/quantities';
+export * from './units/conversion';
+// Stitches and motifs
+export type { Moves, Stitch, StitchCode, StitchCounts } from './stitches/stitch';
+export { BASIC_STITCHES, stitch } from './stitches/stitchTable';
+export { loopsOf } from './stitches/loops';
+export { swatchCounts } from './stitches/swatchCounts';
+export type { LoopHeight, Motif, MotifRound, MotifSides, Ring } from './motifs/motif';
+export { MOTIF_SIDES } from './motifs/motif';
+export { READY_MOTIFS, readyMotif } from './motifs/readyMotifs';
+export { motifGeometry } from './motifs/geometry';
+// Yarn, gauge and the maker's hand
+export { YARN_CATEGORIES, expectedStitchWidthMm, stitchWidthRangeMm } from './yarnCategories';
+export { gaugeOf } from './gauge/gauge';
+// Layouts and joins
+export { layoutFor, type Layout } from './layout/layouts';
+export type { FitResult } from './joins/fit';
+export { fitInWords, fitOf } from './joins/fit';
+export type { Join } from './joins/join';
+export { READY_JOINS, readyJoin } from './joins/readyJoins';
+export { compareJoins, type JoinComparison } from './joins/compareJoins';
+// Plan, estimate and shopping
+export * from './plan/plan';
+export { EXAMPLE_PLAN } from './plan/examplePlan';
+export { estimate } from './ledger/estimate';
+export type * from './ledger/ledger';
+export { CAUSES, PARTS } from './ledger/ledger';
+export {
+  shoppingList,
+  type ShoppingLine,
+  type ShoppingList,
+  type StashLot,
+} from './shopping/shoppingList';
+// Failure
+export { DomainError } from './errors';

@@ -1,0 +1,119 @@
+import { expectedM, learnHand, handVarianceM2 } from '../hand/hand';
+import { fitInWords, fitOf } from '../joins/fit';
+import type { Plan } from '../plan/plan';
+import { stitchWidthRangeMm, YARN_CATEGORIES } from '../yarnCategories';
+import type { Blanket } from './blanketOf';
+import { evidenceOf } from './evidenceOf';
+import type { Notice } from './ledger';
+
+/** A gauge this far outside its category's published range is questioned (ours). */
+const GAUGE_TOLERANCE = 0.2;
+/** A weight this many standard deviations from what the hand could take is questioned (ours). */
+const READING_TOLERANCE = 3;
+/** Motifs of one blanket that differ by more than this are questioned (ours). */
+const SIDE_TOLERANCE = 0.03;
+/** Up to this size a blanket may be meant for a baby (published crib sizes reach 45 × 60 in). */
+const BABY_LONGEST_MM = 1150;
+
+/** What a person should know before trusting an estimate: questions, notes and cautions. */
+export function noticesOf(blanket: Blanket): Notice[] {
+  return [
+    ...gaugeNotices(blanket.plan),
+    ...readingNotices(blanket),
+    ...fitNotices(blanket),
+    ...flatnessNotices(blanket),
+    ...cautions(blanket),
+  ];
+}
+
+function gaugeNotices({ swatch, yarn }: Plan): Notice[] {
+  if (!swatch) return [];
+  const widthMm = swatch.widthMm / swatch.stitches;
+  const [narrowest, widest] = stitchWidthRangeMm(yarn.weightCategory);
+  if (widthMm >= narrowest * (1 - GAUGE_TOLERANCE) && widthMm <= widest * (1 + GAUGE_TOLERANCE))
+    return [];
+  const name = YARN_CATEGORIES[yarn.weightCategory]?.name ?? '';
+  return [
+    {
+      code: 'gauge-outside-category',
+      severity: 'question',
+      message: `A stitch of ${widthMm.toFixed(1)} mm is unusual for weight ${yarn.weightCategory} ${name} (${narrowest.toFixed(1)} to ${widest.toFixed(1)} mm). Check the stitches counted, the width, and the yarn's weight.`,
+    },
+  ];
+}
+
+/** Each reading against what the hand could take before it was weighed. */
+function readingNotices({ plan, gauge }: Blanket): Notice[] {
+  return evidenceOf(plan).flatMap((evidence, i): Notice[] => {
+    const hand = learnHand(gauge.stitchWidthMm, [...evidence.use.loops.keys()], []);
+    const usualM = expectedM(hand, evidence.use);
+    const sdM = Math.sqrt(handVarianceM2(hand, evidence.use) + evidence.varianceM2);
+    if (Math.abs(evidence.lengthM - usualM) <= READING_TOLERANCE * sdM) return [];
+    return [
+      {
+        code: 'reading-contradicts-gauge',
+        severity: 'question',
+        message: `Measured piece ${i + 1} took ${evidence.lengthM.toFixed(1)} m; at this gauge such a piece usually takes about ${usualM.toFixed(1)} m. Check its weight, its counts and the skein's metres.`,
+      },
+    ];
+  });
+}
+
+function fitNotices({ plan, join, sideStitches }: Blanket): Notice[] {
+  if (fitOf(sideStitches, join.fit).fits) return [];
+  return [
+    {
+      code: 'join-does-not-fit',
+      severity: 'question',
+      message: `${join.name} on ${plan.motifs[0]?.name ?? 'this motif'}: ${fitInWords(sideStitches, join.fit)}`,
+    },
+  ];
+}
+
+function flatnessNotices({ plan, geometries }: Blanket): Notice[] {
+  const sides = geometries.map(({ acrossMm }) => acrossMm);
+  const differ = Math.max(...sides) > (1 + SIDE_TOLERANCE) * Math.min(...sides);
+  return [
+    ...geometries.flatMap(({ trouble }, i): Notice[] =>
+      trouble
+        ? [
+            {
+              code: `motif-${trouble.kind}`,
+              severity: 'note',
+              message: `${plan.motifs[i]?.name ?? 'The motif'} ${trouble.kind} from ${trouble.label} at this gauge: its stitches and its height disagree. Measure a finished one.`,
+            },
+          ]
+        : [],
+    ),
+    ...(differ
+      ? [
+          {
+            code: 'motifs-differ-in-size',
+            severity: 'question' as const,
+            message: `The motifs differ in size (${Math.min(...sides).toFixed(0)} to ${Math.max(...sides).toFixed(0)} mm). The grid is planned for the largest.`,
+          },
+        ]
+      : []),
+  ];
+}
+
+function cautions({ join, size }: Blanket): Notice[] {
+  const baby = Math.max(size.widthMm, size.heightMm) <= BABY_LONGEST_MM;
+  return [
+    ...join.cautions.map((message, i): Notice => ({
+      code: `join-caution-${i + 1}`,
+      severity: 'caution',
+      message,
+    })),
+    ...(baby
+      ? [
+          {
+            code: 'infant-sleep',
+            severity: 'caution' as const,
+            message:
+              'For a baby: no loose blanket in the sleep space under 12 months (American Academy of Pediatrics, 2022). Some UK bodies allow a light blanket, firmly tucked; follow local advice.',
+          },
+        ]
+      : []),
+  ];
+}

@@ -1,0 +1,165 @@
+import { borderRounds } from '../border/borderRounds';
+import type { Join } from '../joins/join';
+import { countsOnSide, outerSideStitches } from '../joins/joinCounts';
+import type { GridCounts } from '../layout/gridCounts';
+import type { Motif } from '../motifs/motif';
+import type { Colourway, Plan } from '../plan/plan';
+import { addCounts, scaleCounts, subtractCounts } from '../stitches/counts';
+import type { StitchCounts } from '../stitches/stitch';
+import type { Part } from './ledger';
+
+/** One thing worked in a piece. */
+export interface PieceLine {
+  readonly part: Part;
+  readonly label: string;
+  readonly made: StitchCounts;
+  /** Sewn seam, in mm. */
+  readonly seamMm: number;
+  readonly tails: number;
+}
+
+/** Like pieces in one colour: each differs a little from the next, independently. */
+export interface PieceGroup {
+  readonly colour: string;
+  readonly count: number;
+  readonly lines: readonly PieceLine[];
+}
+
+/** What the pieces of a blanket depend on besides its plan. */
+export interface PieceContext {
+  readonly plan: Plan;
+  readonly join: Join;
+  readonly counts: GridCounts;
+  readonly colourwayMotifs: readonly number[];
+  /** Stitches of a side in the motif's own count, and where two circles touch. */
+  readonly sideStitches: number;
+  /** Length of one seam. */
+  readonly seamMm: number;
+  readonly cornerLinks: number;
+  /** Long lines of seams: where a join's yarn is attached and cut. */
+  readonly seamLines: number;
+}
+
+/** Sides and corners that a join finds on one motif; a circle has four places to touch and no corner. */
+export const joinSidesOf = (motif: Motif): number => (motif.sides === 0 ? 4 : motif.sides);
+
+/** Every piece of the blanket, by colour; its cost grows with the colourways, not with the area. */
+export function piecesOf(context: PieceContext): PieceGroup[] {
+  return [
+    ...context.plan.colourways.flatMap((colourway, i) =>
+      motifPieces(context, colourway, context.colourwayMotifs[i] ?? 0),
+    ),
+    ...joinPieces(context),
+    ...borderPieces(context),
+  ];
+}
+
+const worked = (
+  part: Part,
+  label: string,
+  made: StitchCounts,
+  tails = 0,
+  seamMm = 0,
+): PieceLine => ({
+  part,
+  label,
+  made,
+  tails,
+  seamMm,
+});
+
+/** A motif's rounds in one colourway, one group for each of its colours. */
+export function motifPieces(
+  { plan }: Pick<PieceContext, 'plan'>,
+  { motifIndex, roundColours }: Colourway,
+  count: number,
+): PieceGroup[] {
+  const motif = plan.motifs[motifIndex] as Motif;
+  const lines = new Map<string, PieceLine[]>();
+  motif.rounds.forEach((round, i) => {
+    const colour = roundColours[i] as string;
+    const attached = i === 0 || roundColours[i - 1] !== colour;
+    const ring = i === 0 ? motif.ring.made : {};
+    const made = addCounts(ring, attached ? subtractCounts(round.made, round.travel) : round.made);
+    const ofColour = lines.get(colour) ?? [];
+    ofColour.push(worked('rounds', round.label, made, attached ? 2 : 0));
+    lines.set(colour, ofColour);
+  });
+  return [...lines].map(([colour, ofColour]) => ({ colour, count, lines: ofColour }));
+}
+
+function joinPieces(context: PieceContext): PieceGroup[] {
+  const { plan, join, counts, sideStitches, seamMm, seamLines } = context;
+  const { colour } = plan.join;
+  const seam = countsOnSide(join, join.perSeam, sideStitches);
+  const links = scaleCounts(join.perLink, context.cornerLinks);
+  if (join.attached === 'not')
+    return lastRoundLinks(context, addCounts(scaleCounts(seam, counts.joinedSides), links));
+
+  const groups: PieceGroup[] = [
+    {
+      colour,
+      count: counts.joinedSides,
+      lines: [worked('join', join.name, seam, 0, join.sewn ? seamMm : 0)],
+    },
+    { colour, count: 1, lines: [worked('join', `${join.name}: corners`, links)] },
+  ];
+  if (join.attached === 'line') {
+    groups.push({ colour, count: seamLines, lines: [worked('join', join.name, {}, 2)] });
+  } else {
+    groups.push(...addedRounds(context));
+  }
+  return groups.filter(({ count }) => count > 0);
+}
+
+/** Rounds that a join adds to every motif, and the tails of attaching its yarn there. */
+function addedRounds({ plan, join, colourwayMotifs, sideStitches }: PieceContext): PieceGroup[] {
+  return plan.colourways.map(({ motifIndex, roundColours }, i) => {
+    const motif = plan.motifs[motifIndex] as Motif;
+    // The added rounds of a circle run all the way round it, not only where it touches.
+    const n = motif.sides === 0 ? (motif.rounds.at(-1)?.perSide ?? 0) / 4 : sideStitches;
+    const made = addCounts(
+      scaleCounts(countsOnSide(join, join.perMotifSide, n), joinSidesOf(motif)),
+      scaleCounts(join.perMotifCorner, motif.sides),
+    );
+    const carriesOn = roundColours.at(-1) === plan.join.colour;
+    return {
+      colour: plan.join.colour,
+      count: colourwayMotifs[i] ?? 0,
+      lines: [worked('join', `${join.name}: added rounds`, made, carriesOn ? 0 : 2)],
+    };
+  });
+}
+
+/** Links worked in the yarn of each motif's last round: shared out over the motifs. */
+function lastRoundLinks(
+  { plan, join, counts, colourwayMotifs }: PieceContext,
+  links: StitchCounts,
+): PieceGroup[] {
+  return plan.colourways.map(({ roundColours }, i) => ({
+    colour: roundColours.at(-1) as string,
+    count: colourwayMotifs[i] ?? 0,
+    lines: [worked('join', join.name, scaleCounts(links, 1 / counts.motifs))],
+  }));
+}
+
+function borderPieces({ plan, join, counts, sideStitches }: PieceContext): PieceGroup[] {
+  const codes = plan.border.map(({ stitch }) => stitch);
+  const sides = counts.outerSides;
+  return borderRounds(codes, counts, outerSideStitches(join, sideStitches)).map((made, i) => {
+    const colour = plan.border[i]?.colour as string;
+    const attached = i === 0 || plan.border[i - 1]?.colour !== colour;
+    return {
+      colour,
+      count: sides,
+      lines: [
+        worked(
+          'border',
+          `Border round ${i + 1}`,
+          scaleCounts(made, 1 / sides),
+          attached ? 2 / sides : 0,
+        ),
+      ],
+    };
+  });
+}
