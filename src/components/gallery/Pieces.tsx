@@ -39,7 +39,12 @@ export function Pieces({ units: initial }: { units: RuleUnits }) {
             <SampleBlanket />
           </RuledFrame>
           <div className="space-y-8">
-            <RuledFrame widthMm={142} heightMm={142} units={units} label="One motif, 14.2 cm across">
+            <RuledFrame
+              widthMm={142}
+              heightMm={142}
+              units={units}
+              label="One motif, 14.2 cm across"
+            >
               <SampleMotif />
             </RuledFrame>
             <RuledFrame widthMm={62} heightMm={40} units={units} label="A part skein, 6.2 by 4 cm">
@@ -56,13 +61,19 @@ export function Pieces({ units: initial }: { units: RuleUnits }) {
             <WoundCard key={name} colour={hex} weight={4} name={name} lot={lot} amount={amount} />
           ))}
         </div>
-        <h3 className="text-ink-2 mt-6 mb-2 font-normal">Weight categories 0 to 7</h3>
+        <h3 className="mt-6 mb-2 font-normal text-ink-2">Weight categories 0 to 7</h3>
         <div className="flex flex-wrap gap-5">
           {weights.map((weight) => (
-            <WoundCard key={weight} colour="#a4413a" weight={weight} size="lg" name={String(weight)} />
+            <WoundCard
+              key={weight}
+              colour="#a4413a"
+              weight={weight}
+              size="lg"
+              name={String(weight)}
+            />
           ))}
         </div>
-        <h3 className="text-ink-2 mt-6 mb-2 font-normal">Small, and beside its words</h3>
+        <h3 className="mt-6 mb-2 font-normal text-ink-2">Small, and beside its words</h3>
         <div className="flex flex-wrap gap-x-8 gap-y-3">
           {yarns.map(({ name, hex, lot }) => (
             <WoundCard key={name} colour={hex} weight={4} size="sm" name={name} lot={lot} beside />
@@ -93,15 +104,34 @@ export function Pieces({ units: initial }: { units: RuleUnits }) {
       <section>
         <h2 className="mb-3">The chance tape</h2>
         <div className="grid gap-8 sm:grid-cols-2 lg:grid-cols-3">
-          <ChanceTape {...{ chances }} meanM={1184} sdM={53} skeinM={200} skeins={7} colour="#2d5872" weight={4} />
-          <ChanceTape {...{ chances }} meanM={1184} sdM={53} skeinM={200} skeins={6} colour="#2d5872" weight={4} />
+          <ChanceTape
+            {...{ chances }}
+            meanM={1184}
+            sdM={53}
+            skeinM={200}
+            skeins={7}
+            colour="#2d5872"
+            weight={4}
+          />
+          <ChanceTape
+            {...{ chances }}
+            meanM={1184}
+            sdM={53}
+            skeinM={200}
+            skeins={6}
+            colour="#2d5872"
+            weight={4}
+          />
           <ChanceTape
             meanM={207}
             sdM={9}
             skeinM={200}
             skeins={2}
             verb="buy"
-            chances={[{ skeins: 1, probabilityShort: 0.78 }, { skeins: 2, probabilityShort: 0 }]}
+            chances={[
+              { skeins: 1, probabilityShort: 0.78 },
+              { skeins: 2, probabilityShort: 0 },
+            ]}
             colour="#a9b468"
             weight={2}
           />
@@ -111,11 +141,25 @@ export function Pieces({ units: initial }: { units: RuleUnits }) {
             skeinM={170}
             skeins={36}
             verb="buy"
-            chances={[{ skeins: 36, probabilityShort: 0.48 }, { skeins: 37, probabilityShort: 0.33 }]}
+            chances={[
+              { skeins: 36, probabilityShort: 0.48 },
+              { skeins: 37, probabilityShort: 0.33 },
+            ]}
             colour="#f2ead9"
             weight={6}
           />
-          <ChanceTape meanM={150} sdM={0} skeinM={200} skeins={0} chances={[{ skeins: 0, probabilityShort: 1 }, { skeins: 1, probabilityShort: 0 }]} colour="#1c1a22" weight={1} />
+          <ChanceTape
+            meanM={150}
+            sdM={0}
+            skeinM={200}
+            skeins={0}
+            chances={[
+              { skeins: 0, probabilityShort: 1 },
+              { skeins: 1, probabilityShort: 0 },
+            ]}
+            colour="#1c1a22"
+            weight={1}
+          />
         </div>
       </section>
     </div>

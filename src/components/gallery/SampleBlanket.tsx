@@ -1,59 +1,72 @@
-/** A motif of groups of three, round by round, drawn in mm in a square of 142. */
+/** Stand-ins for the real drawings, in mm: a motif of groups of three in a square of 142, and a blanket of them. */
+const joining = '#2d5872';
 const colourways = [
-  ['#eadfc8', '#b8432f', '#a9b468', '#eadfc8'],
-  ['#eadfc8', '#a9b468', '#562a46', '#eadfc8'],
-  ['#eadfc8', '#562a46', '#b8432f', '#eadfc8'],
-  ['#eadfc8', '#b8432f', '#562a46', '#eadfc8'],
+  ['#b8432f', '#eadfc8', '#b8432f', '#a9b468', '#eadfc8'],
+  ['#eadfc8', '#a9b468', '#eadfc8', '#562a46', '#eadfc8'],
+  ['#a9b468', '#562a46', '#eadfc8', '#b8432f', '#eadfc8'],
+  ['#eadfc8', '#b8432f', '#562a46', '#eadfc8', '#a9b468'],
 ];
 
-function Groups({ round, colour }: { round: number; colour: string }) {
-  const depth = 15.5;
-  const reach = 6 + depth * round;
-  const size = (2 * reach) / (round + 1);
-  const along = Array.from({ length: round + 1 }, (_, index) => -reach + index * size);
-  return (
-    <g fill={colour}>
-      {[0, 90, 180, 270].map((turn) => (
-        <g key={turn} transform={`rotate(${turn})`}>
-          {along.slice(0, -1).map((at) =>
-            [0, 1, 2].map((post) => (
-              <rect
-                key={`${at}${post}`}
-                x={at + 1.2 + (post * (size - 2.4)) / 3}
-                y={-reach + 0.8}
-                width={(size - 2.4) / 3 - 0.7}
-                height={depth - 1.6}
-                rx="2.2"
-              />
-            )),
-          )}
-        </g>
-      ))}
-    </g>
-  );
+const depth = 13;
+const turns = [0, 90, 180, 270];
+
+/** One side of a round: groups of three upright stitches, with a space between groups. */
+function Side({ round }: { round: number }) {
+  const outer = 5 + depth * round;
+  const groups = round;
+  const room = (2 * outer - 5) / groups;
+  const post = (room - 4.5) / 3;
+  return Array.from({ length: groups * 3 }, (_, index) => {
+    const group = Math.floor(index / 3);
+    const x = -outer + 2.5 + 2.25 + group * room + (index % 3) * post;
+    return (
+      <rect
+        key={index}
+        x={x + 0.25}
+        y={-outer + 0.9}
+        width={post - 0.5}
+        height={depth - 1.6}
+        rx={Math.min(2.4, post / 3)}
+      />
+    );
+  });
 }
 
 export function SampleMotif({ colourway = 0 }: { colourway?: number }) {
   const colours = colourways[colourway] ?? [];
   return (
     <g transform="translate(71 71)">
-      <rect x="-70" y="-70" width="140" height="140" rx="3" fill="#2d5872" />
-      <circle r="6" fill="none" stroke={colours[0]} strokeWidth="3" />
+      <rect x="-70.5" y="-70.5" width="141" height="141" fill={joining} />
       {colours.map((colour, index) => (
-        <Groups key={index} round={index + 1} colour={colour} />
+        <g key={index} fill={colour}>
+          {turns.map((turn) => (
+            <g key={turn} transform={`rotate(${turn})`}>
+              <g style={{ clipPath: 'path("M0 0L-72 -71L72 -71Z")' }}>
+                <Side round={index + 1} />
+              </g>
+            </g>
+          ))}
+        </g>
       ))}
+      <circle r="3.5" fill={joining} />
     </g>
   );
 }
 
 export function SampleBlanket() {
-  const cells = Array.from({ length: 80 }, (_, index) => ({ row: Math.floor(index / 8), column: index % 8 }));
+  const cells = Array.from({ length: 80 }, (_, index) => ({
+    row: Math.floor(index / 8),
+    column: index % 8,
+  }));
   return (
     <>
-      <rect width="1180" height="1470" rx="8" fill="#2d5872" />
+      <rect width="1180" height="1470" rx="8" fill={joining} />
       <rect x="14" y="14" width="1152" height="1442" fill="none" stroke="#eadfc8" strokeWidth="5" />
       {cells.map(({ row, column }) => (
-        <g key={`${row}-${column}`} transform={`translate(${28 + column * 141} ${28 + row * 141.6}) scale(0.955)`}>
+        <g
+          key={`${row}-${column}`}
+          transform={`translate(${27 + column * 141} ${30 + row * 141.2}) scale(0.97)`}
+        >
           <SampleMotif colourway={(row * 5 + column * 3 + ((row * column) % 3)) % 4} />
         </g>
       ))}

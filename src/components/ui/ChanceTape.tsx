@@ -25,6 +25,8 @@ const TOP = 18;
 const BELL = 74;
 const TAPE_Y = TOP + BELL;
 const TAPE = 16;
+/** Keeps the first and the last number on the drawing. */
+const MARGIN = 8;
 const HEIGHT = TAPE_Y + TAPE + 24;
 
 /** How sure: what may be needed, over a tape of the yarn itself, ticked in whole skeins. */
@@ -37,13 +39,15 @@ export function ChanceTape(props: ChanceTapeProps) {
   // A certain need is still drawn, as a spike two pixels wide.
   const sd = Math.max(sdM / skeinM, 1e-3);
   const span = tapeSpan(mean, sd, skeins);
-  const pxPerSkein = widthPx / (span.toSkeins - span.fromSkeins);
-  const x = (at: number) => Number(((at - span.fromSkeins) * pxPerSkein).toFixed(1));
+  const pxPerSkein = (widthPx - 2 * MARGIN) / (span.toSkeins - span.fromSkeins);
+  const x = (at: number) => Number((MARGIN + (at - span.fromSkeins) * pxPerSkein).toFixed(1));
   const markX = x(skeins);
+  // The tape comes in from the left unless its own end is in sight.
+  const tapeX = span.fromSkeins === 0 ? x(0) : 0;
   const curve = bellPoints(mean, sd, span)
     .map(({ skeins: at, height }) => `${x(at)} ${(TAPE_Y - BELL * height).toFixed(1)}`)
     .join('L');
-  const area = `M0 ${TAPE_Y}L${curve}L${widthPx} ${TAPE_Y}Z`;
+  const area = `M${MARGIN} ${TAPE_Y}L${curve}L${widthPx - MARGIN} ${TAPE_Y}Z`;
   const sentence = chanceSentence(skeins, chances);
   const flagFlips = markX > widthPx - 56;
 
@@ -75,8 +79,11 @@ export function ChanceTape(props: ChanceTapeProps) {
           height={TAPE}
           fill={`url(#${id}hatch)`}
         />
-        <rect y={TAPE_Y} width={markX} height={TAPE} fill={`url(#${id}yarn)`} />
-        <path d={`M0 ${TAPE_Y}H${widthPx}M0 ${TAPE_Y + TAPE}H${widthPx}`} className="stroke-edge" />
+        <rect y={TAPE_Y} x={tapeX} width={markX - tapeX} height={TAPE} fill={`url(#${id}yarn)`} />
+        <path
+          d={`M${tapeX} ${TAPE_Y}H${widthPx}M${tapeX} ${TAPE_Y + TAPE}H${widthPx}`}
+          className="stroke-edge"
+        />
 
         <g className="fill-ink-2 stroke-ink-2 font-mono text-xs">
           {tapeNumbers(span, pxPerSkein).map((count) => (
@@ -106,7 +113,7 @@ export function ChanceTape(props: ChanceTapeProps) {
           {verb} {skeins}
         </text>
       </svg>
-      <figcaption className="text-ink-2 mt-1">{sentence}</figcaption>
+      <figcaption className="mt-1 text-ink-2">{sentence}</figcaption>
     </figure>
   );
 }

@@ -35,10 +35,10 @@ function Panel(props: DialogProps & { place: string }) {
   return (
     <Radix.Root open={open} onOpenChange={onOpenChange}>
       <Radix.Portal>
-        <Radix.Overlay className="bg-veil fixed inset-0 z-40" />
+        <Radix.Overlay className="fixed inset-0 z-40 bg-veil" />
         <Radix.Content
           className={classNames(
-            'bg-surface border-edge shadow-float fixed z-50 flex flex-col outline-none',
+            'fixed z-50 flex flex-col border-edge bg-surface shadow-float outline-none',
             place,
           )}
           {...(description ? {} : { 'aria-describedby': undefined })}
@@ -47,7 +47,7 @@ function Panel(props: DialogProps & { place: string }) {
             <div>
               <Radix.Title className="text-xl font-bold">{title}</Radix.Title>
               {description && (
-                <Radix.Description className="text-ink-2 mt-1">{description}</Radix.Description>
+                <Radix.Description className="mt-1 text-ink-2">{description}</Radix.Description>
               )}
             </div>
             <Radix.Close asChild>

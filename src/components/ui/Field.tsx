@@ -40,12 +40,12 @@ export function FieldShell({
       </label>
       {children}
       {hint && (
-        <p id={`${id}-hint`} className="text-ink-2 mt-1 text-sm">
+        <p id={`${id}-hint`} className="mt-1 text-sm text-ink-2">
           {hint}
         </p>
       )}
       {error && (
-        <p id={`${id}-error`} className="text-madder mt-1 flex gap-1.5 text-sm">
+        <p id={`${id}-error`} className="mt-1 flex gap-1.5 text-sm text-madder">
           <CircleAlert size={15} aria-hidden className="mt-px shrink-0" />
           {error}
         </p>
@@ -110,5 +110,5 @@ export function TextArea({
 }
 
 export function UnitSuffix({ children }: { children: ReactNode }) {
-  return <span className="text-ink-2 shrink-0 pe-2.5 text-sm">{children}</span>;
+  return <span className="shrink-0 pe-2.5 text-sm text-ink-2">{children}</span>;
 }

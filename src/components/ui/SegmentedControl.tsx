@@ -7,12 +7,14 @@ interface SegmentedControlProps<Value extends string> {
   value: Value;
   onChange: (value: Value) => void;
   disabled?: boolean;
+  /** The choices are figures or units: set in the mono face. */
+  figures?: boolean;
   className?: string;
 }
 
 /** One of a few choices, all in sight: a radio group, so arrows move and the choice follows. */
 export function SegmentedControl<Value extends string>(props: SegmentedControlProps<Value>) {
-  const { label, options, value, onChange, disabled, className } = props;
+  const { label, options, value, onChange, disabled, figures, className } = props;
   return (
     <RadioGroup.Root
       aria-label={label}
@@ -20,7 +22,7 @@ export function SegmentedControl<Value extends string>(props: SegmentedControlPr
       value={value}
       onValueChange={(next) => onChange(next as Value)}
       disabled={disabled}
-      className={classNames('segments', className)}
+      className={classNames('segments', figures && 'figures', className)}
     >
       {options.map((option) => (
         <RadioGroup.Item key={option.value} value={option.value} className="segment">

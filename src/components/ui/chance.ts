@@ -14,7 +14,10 @@ export function chanceSentence(skeins: number, chances: readonly SkeinChance[]):
     chances.find((chance) => chance.skeins === count)?.probabilityShort;
   const short = chanceOf(skeins);
   if (short === undefined) return '';
-  const main = `${capitalised(countInWords(skeins))} ${skeins === 1 ? 'skein leaves' : 'skeins leave'} ${percentInWords(short)} chance of running short.`;
+  const main =
+    skeins === 0
+      ? 'With no skein in hand, running short is certain.'
+      : `${capitalised(countInWords(skeins))} ${skeins === 1 ? 'skein leaves' : 'skeins leave'} ${percentInWords(short)} chance of running short.`;
   const other = short > RISKY ? skeins + 1 : skeins - 1;
   const otherShort = other > 0 ? chanceOf(other) : undefined;
   if (otherShort === undefined) return main;
@@ -44,11 +47,19 @@ export function tapeNumbers(span: TapeSpan, pxPerSkein: number, minPx = 22): num
   return Array.from({ length: count }, (_, index) => first + index * step);
 }
 
-/** The normal density scaled to 1 at its top, as points across the span. */
-export function bellPoints(meanSkeins: number, sdSkeins: number, span: TapeSpan, count = 96) {
-  return Array.from({ length: count + 1 }, (_, index) => {
-    const skeins = span.fromSkeins + ((span.toSkeins - span.fromSkeins) * index) / count;
-    const z = (skeins - meanSkeins) / sdSkeins;
-    return { skeins, height: Math.exp(-(z * z) / 2) };
+const BELL_POINTS = 80;
+
+/** The normal density scaled to 1 at its top: points across four deviations, closed at both ends of the span. */
+export function bellPoints(meanSkeins: number, sdSkeins: number, span: TapeSpan) {
+  const points = Array.from({ length: BELL_POINTS + 1 }, (_, index) => {
+    const z = -4 + (8 * index) / BELL_POINTS;
+    return { skeins: meanSkeins + z * sdSkeins, height: Math.exp(-(z * z) / 2) };
   });
+  const seen = points.filter(({ skeins }) => skeins > span.fromSkeins && skeins < span.toSkeins);
+  const heightAt = (skeins: number) => Math.exp(-(((skeins - meanSkeins) / sdSkeins) ** 2) / 2);
+  return [
+    { skeins: span.fromSkeins, height: heightAt(span.fromSkeins) },
+    ...seen,
+    { skeins: span.toSkeins, height: heightAt(span.toSkeins) },
+  ];
 }

@@ -10,9 +10,7 @@ export interface NumberLimits {
   unit?: string;
 }
 
-export type NumberReading =
-  | { ok: true; value: number | null }
-  | { ok: false; error: string };
+export type NumberReading = { ok: true; value: number | null } | { ok: false; error: string };
 
 const shown = new Intl.NumberFormat('en', { maximumFractionDigits: 6 });
 
@@ -25,7 +23,8 @@ export function readNumber(typed: string, limits: NumberLimits = {}): NumberRead
 }
 
 function withinLimits(value: number, { min, max, whole, unit }: NumberLimits): NumberReading {
-  const withUnit = (limit: number) => (unit ? `${shown.format(limit)} ${unit}` : shown.format(limit));
+  const withUnit = (limit: number) =>
+    unit ? `${shown.format(limit)} ${unit}` : shown.format(limit);
   if (whole && !Number.isInteger(value)) return { ok: false, error: 'Write a whole number' };
   if (min !== undefined && value < min) return { ok: false, error: `At least ${withUnit(min)}` };
   if (max !== undefined && value > max) return { ok: false, error: `At most ${withUnit(max)}` };
@@ -33,7 +32,12 @@ function withinLimits(value: number, { min, max, whole, unit }: NumberLimits): N
 }
 
 /** The next value up or down, on whole steps: 12.4 goes up to 13 with a step of 1. Stays within the limits. */
-export function stepNumber(value: number, direction: 1 | -1, step: number, limits: NumberLimits): number {
+export function stepNumber(
+  value: number,
+  direction: 1 | -1,
+  step: number,
+  limits: NumberLimits,
+): number {
   const steps = value / step;
   // A hair of tolerance, or 0.3 / 0.1 would count as 2.9999999999999996 steps.
   const next = direction === 1 ? Math.floor(steps + 1e-9) + 1 : Math.ceil(steps - 1e-9) - 1;

@@ -34,10 +34,10 @@ const gradesIn: readonly Grade[] = [
   [1000, 5000, 10000],
 ];
 
-const SHORT_MIN_PX = 3;
+/** Millimetres and eighths may stand close, as they do on any rule; wider grades want air. */
+const FINEST_MIN_PX = 3;
+const SHORT_MIN_PX = 5;
 const NUMBERED_MIN_PX = 27;
-/** Room that the size at the end of the rule needs to itself. */
-const END_CLEARANCE_PX = 26;
 
 export const mmPerNumber = { metric: 10, imperial: MM_PER_INCH } as const;
 
@@ -45,13 +45,22 @@ export const mmPerNumber = { metric: 10, imperial: MM_PER_INCH } as const;
 function gradeFor(units: RuleUnits, pxPerMm: number): Grade {
   const grades = units === 'metric' ? gradesCm : gradesIn;
   const pxPerUnit = pxPerMm * mmPerNumber[units];
-  const fits = ([short, , numbered]: Grade) =>
-    short * pxPerUnit >= SHORT_MIN_PX && numbered * pxPerUnit >= NUMBERED_MIN_PX;
+  const fits = (grade: Grade) =>
+    grade[0] * pxPerUnit >= (grade === grades[0] ? FINEST_MIN_PX : SHORT_MIN_PX) &&
+    grade[2] * pxPerUnit >= NUMBERED_MIN_PX;
   return grades.find(fits) ?? (grades[grades.length - 1] as Grade);
 }
 
-/** Ticks from 0 up to the length, without the one at the end, which says the size itself. */
-export function ruleTicks(lengthMm: number, units: RuleUnits, pxPerMm: number): RuleTick[] {
+/**
+ * Ticks from 0 up to the length, without the one at the end, which says the size itself.
+ * No number stands nearer than `endClearancePx` to that end.
+ */
+export function ruleTicks(
+  lengthMm: number,
+  units: RuleUnits,
+  pxPerMm: number,
+  endClearancePx: number,
+): RuleTick[] {
   if (!(lengthMm > 0) || !(pxPerMm > 0)) return [];
   const [short, longer, numbered] = gradeFor(units, pxPerMm);
   const perLonger = Math.round(longer / short);
@@ -61,8 +70,10 @@ export function ruleTicks(lengthMm: number, units: RuleUnits, pxPerMm: number): 
   return Array.from({ length: count }, (_, index): RuleTick => {
     const atMm = index * shortMm;
     if (index % perNumbered !== 0) return { atMm, rank: index % perLonger === 0 ? 1 : 0 };
-    const crowdsEnd = (lengthMm - atMm) * pxPerMm < END_CLEARANCE_PX;
-    return crowdsEnd ? { atMm, rank: 1 } : { atMm, rank: 2, number: (index / perNumbered) * numbered };
+    const crowdsEnd = (lengthMm - atMm) * pxPerMm < endClearancePx;
+    return crowdsEnd
+      ? { atMm, rank: 1 }
+      : { atMm, rank: 2, number: (index / perNumbered) * numbered };
   });
 }
 
