@@ -3,6 +3,7 @@
 // Units
 export * from './units/quantities';
 export * from './units/conversion';
+export * from './units/display';
 // Stitches and motifs
 export type { Moves, Stitch, StitchCode, StitchCounts } from './stitches/stitch';
 export { BASIC_STITCHES, stitch } from './stitches/stitchTable';
