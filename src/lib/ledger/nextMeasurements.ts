@@ -4,7 +4,7 @@ import { addUse, NO_YARN, type YarnUse } from '../hand/yarnUse';
 import { skeinsFor } from '../skeins/skeins';
 import { normalQuantile } from '../stats/normal';
 import type { Plan, PlanEvidence, YarnReading } from '../plan/plan';
-import { massG, lengthM } from '../units/quantities';
+import { lengthM, massG, QUANTITY_LIMITS } from '../units/quantities';
 import type { ColourLedger } from './colourLedger';
 import { evidenceOf, motifUse, useOfPiece } from './evidenceOf';
 import type { NextMeasurement } from './ledger';
@@ -83,7 +83,8 @@ function swatchCandidates(plan: Plan, hand: Hand, resolutionG: number): Candidat
   const use = useOfPiece(plan, { piece: 'swatch', reading: unravelled });
   if (!use) return [];
   const aboutM = expectedM(hand, use);
-  const errorM = lengthM(UNRAVELLED_ERROR * aboutM);
+  // A hand learnt from readings that contradict its gauge can expect less than nothing.
+  const errorM = lengthM(Math.min(Math.max(0, UNRAVELLED_ERROR * aboutM), QUANTITY_LIMITS.lengthM));
   return [
     candidate(plan, hand, 'weigh the swatch', use, 0, weighed(resolutionG)),
     candidate(plan, hand, 'unravel the swatch', use, 0, { ...unravelled, errorM }),
