@@ -52,8 +52,7 @@ export async function up({ context: { sequelize } }: Params): Promise<void> {
 
       create table audit_entries (
         id uuid primary key default gen_random_uuid(),
-        action text not null check
-          (action in ('roles-set', 'first-administrator', 'account-deleted')),
+        action text not null check (action in ('roles-set', 'first-administrator')),
         actor_id uuid references users on delete set null,
         actor_name text not null,
         subject_id uuid references users on delete set null,

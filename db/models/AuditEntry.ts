@@ -7,7 +7,7 @@ import {
   type Sequelize,
 } from 'sequelize';
 
-export type AuditAction = 'roles-set' | 'first-administrator' | 'account-deleted';
+export type AuditAction = 'roles-set' | 'first-administrator';
 
 /** Who changed whose account, and from what to what. Written once, never changed. */
 export class AuditEntry extends Model<
@@ -16,7 +16,6 @@ export class AuditEntry extends Model<
 > {
   declare id: CreationOptional<string>;
   declare action: AuditAction;
-  /** Names are kept beside the ids, which become null when an account is deleted. */
   declare actorId: string | null;
   declare actorName: string;
   declare subjectId: string | null;

@@ -54,10 +54,7 @@ export const workingRolesSchema = z
 
 export const signInSchema = z.object({ email: emailSchema, password: givenPasswordSchema });
 
-const notTheAddress = {
-  path: ['password'],
-  error: 'Choose a password that does not contain your e-mail address.',
-};
+export const CONTAINS_EMAIL = 'Choose a password that does not contain your e-mail address.';
 
 export const registerSchema = z
   .object({
@@ -66,9 +63,14 @@ export const registerSchema = z
     password: newPasswordSchema,
     roles: workingRolesSchema,
   })
-  .refine(({ email, password }) => !password.toLowerCase().includes(email), notTheAddress);
+  .refine(({ email, password }) => !password.toLowerCase().includes(email), {
+    path: ['password'],
+    error: CONTAINS_EMAIL,
+  });
 
 export const emailOnlySchema = z.object({ email: emailSchema });
+/** Says no more than that it was asked: what is found stays untold. */
+export const acceptedSchema = z.object({ isAccepted: z.boolean() });
 /** Whether the letter left: if not, the person asks for another. */
 export const letterSchema = z.object({ isMailSent: z.boolean() });
 
@@ -76,7 +78,8 @@ export const linkTokenSchema = z
   .string({ error: 'The link is not complete.' })
   .regex(/^[\w-]{43}$/, 'The link is not complete. Copy all of it from the letter.');
 export const confirmSchema = z.object({ token: linkTokenSchema });
-export const confirmedSchema = z.object({ email: z.string() });
+/** The address whose link was followed, to fill in at sign-in. */
+export const ownerSchema = z.object({ email: z.string() });
 export const resetPasswordSchema = z.object({
   token: linkTokenSchema,
   password: newPasswordSchema,

@@ -24,3 +24,6 @@ export function fieldErrors(error: z.ZodError): Record<string, string> {
   }
   return fields;
 }
+
+/** The response of a route that answers 204. */
+export const nothingSchema = z.void();

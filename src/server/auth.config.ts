@@ -1,4 +1,4 @@
-import { CredentialsSignin } from '@auth/core/errors';
+import { AuthError, CredentialsSignin } from '@auth/core/errors';
 import Credentials from '@auth/core/providers/credentials';
 import type { FullAuthConfig } from 'auth-astro/src/config';
 import { checkCredentials, type Refusal } from './commands/checkCredentials';
@@ -55,7 +55,8 @@ const authConfig: FullAuthConfig = {
   },
   logger: {
     error(error) {
-      if (!CALLERS_FAULTS.has(error.name)) console.error('auth:', error);
+      if (!CALLERS_FAULTS.has(error instanceof AuthError ? error.type : error.name))
+        console.error('auth:', error);
     },
     warn: (code) => console.warn('auth:', code),
     debug: () => undefined,

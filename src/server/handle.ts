@@ -29,6 +29,12 @@ interface RunContext<W extends Who, P extends Schema, Q extends Schema, B extend
   now: Date;
 }
 
+/**
+ * A value of the response schema, or a Response of its own such as CSV, or a function to call after
+ * the commit, for what must wait for it such as mail; its value is then the answer.
+ */
+type Answer<Value> = Value | Response | (() => Promise<Value>);
+
 export interface RouteSpec<
   W extends Who = Who,
   P extends Schema = Schema,
@@ -50,9 +56,7 @@ export interface RouteSpec<
   limit?: CallLimit;
   /** No session, transaction, database or default limit: pure calculation. */
   stateless?: boolean;
-  run(context: RunContext<W, P, Q, B>): Promise<Unparsed<R> | Response> | Unparsed<R> | Response;
-  /** What must wait for the commit, such as mail; its value is the answer. */
-  afterCommit?(result: Unparsed<R>, context: RunContext<W, P, Q, B>): Promise<Unparsed<R>>;
+  run(context: RunContext<W, P, Q, B>): Promise<Answer<Unparsed<R>>> | Answer<Unparsed<R>>;
 }
 
 export type Route = APIRoute & { spec: RouteSpec };
@@ -98,10 +102,7 @@ async function answer(spec: RouteSpec, context: APIContext): Promise<Response> {
   const result = await sequelize.transaction(async (transaction) =>
     spec.run(withTransaction(call, transaction)),
   );
-  if (spec.afterCommit && !(result instanceof Response)) {
-    return toResponse(spec, await spec.afterCommit(result, withTransaction(call, null)));
-  }
-  return toResponse(spec, result);
+  return toResponse(spec, typeof result === 'function' ? await result() : result);
 }
 
 function requireRole(who: 'signed-in' | readonly Role[], user: CurrentUser | null): void {

@@ -1,0 +1,55 @@
+import { Op, type WhereOptions } from 'sequelize';
+import { AuditEntry, User } from '../../../db/models';
+import {
+  AUDIT_ENTRIES_PER_PAGE,
+  PEOPLE_PER_PAGE,
+  type Audit,
+  type People,
+  type PeopleQuery,
+} from '../../schemas/people';
+import { presentAuditEntry, presentPerson } from '../presenters/people';
+
+/** One page of the people whose name or address holds the searched text, by name. */
+export async function listPeople({ search, page }: PeopleQuery): Promise<People> {
+  const where = searchCondition(search);
+  const totalCount = await User.count({ where });
+  const rows = await User.findAll({
+    where,
+    include: { association: 'roleRows', separate: true },
+    order: ['name', 'id'],
+    limit: PEOPLE_PER_PAGE,
+    offset: (page - 1) * PEOPLE_PER_PAGE,
+  });
+  return {
+    people: rows.map(presentPerson),
+    totalCount,
+    page,
+    pageCount: Math.max(1, Math.ceil(totalCount / PEOPLE_PER_PAGE)),
+  };
+}
+
+function searchCondition(search: string): WhereOptions<User> {
+  if (search === '') return {};
+  // The characters that LIKE gives a meaning, taken as themselves.
+  const pattern = `%${search.replace(/[\\%_]/g, '\\$&')}%`;
+  return { [Op.or]: [{ name: { [Op.iLike]: pattern } }, { email: { [Op.iLike]: pattern } }] };
+}
+
+/** One page of the changes made to accounts, newest first. */
+export async function listAudit(page: number): Promise<Audit> {
+  const totalCount = await AuditEntry.count();
+  const rows = await AuditEntry.findAll({
+    order: [
+      ['createdAt', 'DESC'],
+      ['id', 'ASC'],
+    ],
+    limit: AUDIT_ENTRIES_PER_PAGE,
+    offset: (page - 1) * AUDIT_ENTRIES_PER_PAGE,
+  });
+  return {
+    entries: rows.map(presentAuditEntry),
+    totalCount,
+    page,
+    pageCount: Math.max(1, Math.ceil(totalCount / AUDIT_ENTRIES_PER_PAGE)),
+  };
+}
