@@ -26,10 +26,13 @@ export async function withLock(name, work, { folder = stateSubfolder('locks') } 
       await sleep(POLL_MS);
     }
   }
+  const release = () => rmSync(path, { force: true });
+  process.once('exit', release);
   try {
     return await work();
   } finally {
-    rmSync(path, { force: true });
+    process.off('exit', release);
+    release();
   }
 }
 

@@ -2,6 +2,7 @@ import { accessSync, constants, existsSync, readFileSync } from 'node:fs';
 import { homedir } from 'node:os';
 import { join } from 'node:path';
 import { isDeepStrictEqual } from 'node:util';
+import { withLock } from './lock.mjs';
 import { root, stateSubfolder } from './paths.mjs';
 import { runOrThrow } from './processes.mjs';
 import { RunError, say } from './say.mjs';
@@ -20,7 +21,9 @@ export function checkNode() {
 }
 
 /** Installs the npm packages of package-lock.json unless node_modules holds just those. */
-export async function ensurePackages() {
+export const ensurePackages = () => withLock('packages', installIfChanged);
+
+async function installIfChanged() {
   const manifest = readJson(join(root, 'package.json'));
   const lock = readJson(join(root, 'package-lock.json')).packages;
   const isLockCurrent = ['dependencies', 'devDependencies'].every((kind) =>

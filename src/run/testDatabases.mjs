@@ -11,20 +11,15 @@ import {
 } from './databases.mjs';
 import { withLock } from './lock.mjs';
 import { root } from './paths.mjs';
-import { identify, runOrThrow } from './processes.mjs';
+import { identify } from './processes.mjs';
+import { runTypeScript } from './scripts.mjs';
 
 const TEMPLATE = 'ellwise_template_';
 const COPY = 'ellwise_test_';
 
 /** @param {string} url @param {string[]} steps of db/migrate.ts */
-export const migrate = (url, ...steps) => runScript('db/migrate.ts', url, ...steps);
-
-/** Runs a TypeScript file of ours on a database. @param {string} file @param {string} url @param {string[]} args */
-export function runScript(file, url, ...args) {
-  return runOrThrow(file, process.execPath, ['--import', 'tsx', file, ...args], {
-    env: { ...process.env, DATABASE_URL: url },
-  });
-}
+export const migrate = (url, ...steps) =>
+  runTypeScript('db/migrate.ts', { args: steps, env: { DATABASE_URL: url } });
 
 /**
  * A migrated, empty database to copy. It is kept from run to run until the migrations change.
