@@ -66,10 +66,11 @@ function number(what: string) {
 const atMost = (what: string, most: number, unit: string) =>
   `${what} must be at most ${inWords.format(most)}${unit && ` ${unit}`}`;
 
-/** A measurement: more than 0 and at most `most`. */
-export function measured(what: string, unit: string, most: number) {
+/** A measurement: more than 0, at least `least` and at most `most`. */
+export function measured(what: string, unit: string, most: number, least = 0) {
   return number(what)
     .gt(0, `${what} must be more than 0 ${unit}`)
+    .min(least, `${what} must be at least ${inWords.format(least)} ${unit}`)
     .max(most, atMost(what, most, unit));
 }
 

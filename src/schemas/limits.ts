@@ -31,6 +31,19 @@ export const PLAN_LIMITS = {
   secondsPerMove: 60,
 } as const;
 
+/** What no yarn and no stitch ever was: beyond these a number has been mistyped (ours). */
+export const POSSIBLE = {
+  leastSkeinMassG: 0.1,
+  leastPieceMassG: 0.01,
+  leastScaleStepG: 0.001,
+  leastPieceLengthM: 0.01,
+  leastMotifSideMm: 1,
+  /** A cobweb lace reaches some 20 m/g, the thickest rope of roving some 0.05. */
+  metresPerGram: { least: 0.01, most: 500 },
+  /** Of thread on a steel hook some 1 mm, of roving on the arms some 100. */
+  stitchSizeMm: { least: 0.2, most: 250 },
+} as const;
+
 /** The limits of what a person keeps. */
 export const KEPT_LIMITS = {
   yarns: 1_000,

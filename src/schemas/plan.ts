@@ -2,9 +2,10 @@ import * as z from 'zod';
 import { CONFIDENCES } from '../lib/plan/plan';
 import { lengthM, massG, priceMinor, widthMm } from '../lib/units/quantities';
 import { choice, counted, hex, list, measured, name, strict } from './fields';
-import { PLAN_LIMITS } from './limits';
+import { PLAN_LIMITS, POSSIBLE } from './limits';
 import { motifSchema } from './motif';
 import { checkPlan } from './planChecks';
+import { checkPutUp, checkStitchSize } from './possible';
 import { currencySchema } from './preferences';
 import { knownStitch, stitchCounts } from './stitchCounts';
 import {
@@ -37,10 +38,10 @@ const yarn = strict('Yarn', {
   putUp: strict('Put-up', {
     massG: skeinMassG.transform(massG),
     lengthM: skeinLengthM.transform(lengthM),
-  }),
+  }).superRefine(checkPutUp),
   price: strict('Price', {
     priceMinor: skeinPriceMinor.transform(priceMinor),
-    currency,
+    currency: currencySchema,
   }).nullable(),
 });
 
@@ -50,7 +51,7 @@ const swatch = strict('Swatch', {
   rows: swatchRows,
   widthMm: swatchWidthMm.transform(widthMm),
   heightMm: swatchHeightMm.transform(widthMm),
-});
+}).superRefine((flat, issues) => checkStitchSize(flat, flat, issues));
 
 const reading = z.discriminatedUnion(
   'by',
@@ -129,7 +130,7 @@ export const planSchema = strict('Plan', {
     1,
     PLAN_LIMITS.colourways,
   ),
-  motifSideMm: measured('Side of a motif', 'mm', PLAN_LIMITS.motifSideMm)
+  motifSideMm: measured('Side of a motif', 'mm', PLAN_LIMITS.motifSideMm, POSSIBLE.leastMotifSideMm)
     .transform(widthMm)
     .nullable(),
   size,

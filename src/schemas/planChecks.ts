@@ -1,4 +1,5 @@
 import { readyJoin } from '../lib/joins/readyJoins';
+import { layoutFor } from '../lib/layout/layouts';
 import type { Plan } from '../lib/plan/plan';
 
 interface Issues {
@@ -19,6 +20,9 @@ export function checkPlan(plan: Plan, issues: Issues): void {
   };
 
   const sides = plan.motifs[0]?.sides;
+  if (sides !== undefined && layoutFor(sides) === null) {
+    wrong(['motifs', 0, 'sides'], `Motifs of ${sides} sides cannot be laid out yet`);
+  }
   plan.motifs.forEach((motif, index) => {
     if (motif.sides !== sides) {
       wrong(

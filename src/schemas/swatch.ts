@@ -14,16 +14,32 @@ import {
   uuid,
   version,
 } from './fields';
-import { KEPT_LIMITS, PLAN_LIMITS } from './limits';
+import { KEPT_LIMITS, PLAN_LIMITS, POSSIBLE } from './limits';
+import { checkStitchSize } from './possible';
 import { knownStitch } from './stitchCounts';
 
 export const swatchStitches = counted('Stitches across the swatch', 1, PLAN_LIMITS.swatchStitches);
 export const swatchRows = counted('Rows of the swatch', 1, PLAN_LIMITS.swatchRows);
 export const swatchWidthMm = measured('Width of the swatch', 'mm', PLAN_LIMITS.swatchSizeMm);
 export const swatchHeightMm = measured('Height of the swatch', 'mm', PLAN_LIMITS.swatchSizeMm);
-export const pieceMassG = measured('Yarn weighed', 'g', PLAN_LIMITS.pieceMassG);
-export const scaleResolutionG = measured('Step of the scale', 'g', PLAN_LIMITS.skeinMassG);
-export const pieceLengthM = measured('Yarn unravelled', 'm', PLAN_LIMITS.pieceLengthM);
+export const pieceMassG = measured(
+  'Yarn weighed',
+  'g',
+  PLAN_LIMITS.pieceMassG,
+  POSSIBLE.leastPieceMassG,
+);
+export const scaleResolutionG = measured(
+  'Step of the scale',
+  'g',
+  PLAN_LIMITS.skeinMassG,
+  POSSIBLE.leastScaleStepG,
+);
+export const pieceLengthM = measured(
+  'Yarn unravelled',
+  'm',
+  PLAN_LIMITS.pieceLengthM,
+  POSSIBLE.leastPieceLengthM,
+);
 export const lengthErrorM = measuredOrZero('Error of the length', 'm', PLAN_LIMITS.pieceLengthM);
 
 /** A swatch can be measured again and again: its size, before and after blocking, and its yarn. */
@@ -66,9 +82,17 @@ const swatchFields = {
   measurements: list('Measurements', measurementSchema, 0, KEPT_LIMITS.measurementsPerSwatch),
 };
 
-export const swatchInput = strict('Swatch', swatchFields);
-export type SwatchInput = z.output<typeof swatchInput>;
-export const swatchUpdate = strict('Swatch', { ...swatchFields, version });
+export type SwatchInput = z.output<z.ZodObject<typeof swatchFields>>;
+export const swatchInput = strict('Swatch', swatchFields).superRefine(checkSizes);
+export const swatchUpdate = strict('Swatch', { ...swatchFields, version }).superRefine(checkSizes);
+
+function checkSizes(swatch: SwatchInput, issues: z.RefinementCtx): void {
+  swatch.measurements.forEach((measurement, index) => {
+    if (measurement.kind === 'size') {
+      checkStitchSize(swatch, measurement, issues, ['measurements', index]);
+    }
+  });
+}
 
 export const swatchSchema = z.strictObject({
   id: z.uuid(),

@@ -11,14 +11,20 @@ import {
   uuid,
   version,
 } from './fields';
-import { KEPT_LIMITS, PLAN_LIMITS } from './limits';
+import { KEPT_LIMITS, PLAN_LIMITS, POSSIBLE } from './limits';
+import { checkPutUp } from './possible';
 import { currencySchema } from './preferences';
 
 /** Published yarn weight categories, lace to jumbo. */
 export const WEIGHT_CATEGORIES = [0, 1, 2, 3, 4, 5, 6, 7] as const;
 
 export const weightCategory = choice('Yarn weight category', WEIGHT_CATEGORIES);
-export const skeinMassG = measured('Skein mass', 'g', PLAN_LIMITS.skeinMassG);
+export const skeinMassG = measured(
+  'Skein mass',
+  'g',
+  PLAN_LIMITS.skeinMassG,
+  POSSIBLE.leastSkeinMassG,
+);
 export const skeinLengthM = measured('Skein length', 'm', PLAN_LIMITS.skeinLengthM);
 export const skeinPriceMinor = counted('Price of a skein', 0, PLAN_LIMITS.priceMinor);
 export const yarnName = name('Yarn name');
@@ -31,7 +37,10 @@ export const moneySchema = strict('Price', {
 });
 export type Money = z.output<typeof moneySchema>;
 
-export const putUpSchema = strict('Put-up', { massG: skeinMassG, lengthM: skeinLengthM });
+export const putUpSchema = strict('Put-up', {
+  massG: skeinMassG,
+  lengthM: skeinLengthM,
+}).superRefine(checkPutUp);
 
 const yarnFields = {
   name: yarnName,

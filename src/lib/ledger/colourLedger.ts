@@ -33,7 +33,7 @@ export function colourLedger(
   colour: string,
   groups: readonly PieceGroup[],
 ): ColourLedger {
-  const ofColour = groups.filter((group) => group.colour === colour);
+  const ofColour = groups.filter((group) => group.colour === colour && group.count > 0);
   const use = ofColour.reduce((sum, group) => addUse(sum, useOfGroup(group), group.count), NO_YARN);
   const lines = new Map<string, LedgerLine>();
   let pieceVarianceM2 = 0;

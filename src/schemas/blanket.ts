@@ -1,0 +1,62 @@
+import * as z from 'zod';
+import { moment, name, strict, uuid, version } from './fields';
+import { KEPT_LIMITS } from './limits';
+import { planSchema } from './plan';
+
+const title = name('Title', KEPT_LIMITS.titleLength);
+
+export const blanketInput = strict('Blanket', { title, plan: planSchema });
+export type BlanketInput = z.output<typeof blanketInput>;
+export const blanketUpdate = strict('Blanket', { title, plan: planSchema, version });
+
+const blanketFields = {
+  id: z.uuid(),
+  version,
+  title: z.string(),
+  createdAt: moment,
+  updatedAt: moment,
+  /** When it was deleted; it can be restored. */
+  deletedAt: moment.nullable(),
+};
+
+export const blanketSchema = z.strictObject({ ...blanketFields, plan: planSchema });
+export type PresentedBlanket = z.input<typeof blanketSchema>;
+
+/** A blanket in a list: its headline figures instead of its plan. */
+export const blanketSummarySchema = z.strictObject({
+  ...blanketFields,
+  rows: z.number().int(),
+  columns: z.number().int(),
+  widthMm: z.number(),
+  heightMm: z.number(),
+  skeins: z.number().int(),
+  meanM: z.number(),
+  confidence: z.number(),
+  costMinor: z.number().int().nullable(),
+  currency: z.string().nullable(),
+  yarnName: z.string(),
+  colours: z.array(z.strictObject({ key: z.string(), name: z.string(), hex: z.string() })),
+});
+export type BlanketSummary = z.output<typeof blanketSummarySchema>;
+
+/** One save of a blanket; `version` is its address. */
+export const revisionSchema = z.strictObject({
+  version,
+  title: z.string(),
+  savedAt: moment,
+  isCurrent: z.boolean(),
+});
+export type PresentedRevision = z.output<typeof revisionSchema>;
+
+export const revisionWithPlanSchema = revisionSchema.extend({ plan: planSchema });
+export type RevisionWithPlan = z.input<typeof revisionWithPlanSchema>;
+
+export const revisionParams = z.strictObject({
+  id: uuid,
+  version: z
+    .string()
+    .regex(/^[1-9]\d{0,8}$/, 'Version must be a whole number')
+    .transform(Number),
+});
+/** Restoring an older save begins from the version the person sees now. */
+export const restoreInput = strict('Restore', { version });
