@@ -1,3 +1,5 @@
+import { useId } from 'react';
+
 /** Stand-ins for the real drawings, in mm: a motif of groups of three in a square of 142, and a blanket of them. */
 const joining = '#2d5872';
 const colourways = [
@@ -33,15 +35,19 @@ function Side({ round }: { round: number }) {
 }
 
 export function SampleMotif({ colourway = 0 }: { colourway?: number }) {
+  const id = useId();
   const colours = colourways[colourway] ?? [];
   return (
     <g transform="translate(71 71)">
+      <clipPath id={id}>
+        <path d="M0 0.5L-71 -70.5H71Z" />
+      </clipPath>
       <rect x="-70.5" y="-70.5" width="141" height="141" fill={joining} />
       {colours.map((colour, index) => (
         <g key={index} fill={colour}>
           {turns.map((turn) => (
             <g key={turn} transform={`rotate(${turn})`}>
-              <g style={{ clipPath: 'path("M0 0L-72 -71L72 -71Z")' }}>
+              <g clipPath={`url(#${id})`}>
                 <Side round={index + 1} />
               </g>
             </g>

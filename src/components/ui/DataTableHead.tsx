@@ -32,6 +32,7 @@ function HeadCell<Row>({ header }: { header: Header<Row, unknown> }) {
       className={classNames(
         'px-2.5 py-1 text-sm font-normal text-ink-2',
         figures ? 'text-end' : 'text-start',
+        column.id === 'select' && 'w-10',
       )}
     >
       {column.getCanSort() ? (

@@ -1,4 +1,5 @@
 import { useEffect, useRef } from 'react';
+import { capitalised, countInWords } from './inWords';
 import { Notice } from './Notice';
 
 export interface FieldError {
@@ -22,8 +23,7 @@ export function ErrorSummary({ errors, attempt }: ErrorSummaryProps) {
   }, [attempt]);
 
   if (errors.length === 0) return null;
-  const title =
-    errors.length === 1 ? 'One thing to put right' : `${errors.length} things to put right`;
+  const title = `${capitalised(countInWords(errors.length))} ${errors.length === 1 ? 'thing' : 'things'} to put right`;
   return (
     <Notice kind="problem" title={title} live>
       <ul className="space-y-0.5">

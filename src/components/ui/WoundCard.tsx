@@ -27,7 +27,7 @@ export function WoundCard(props: WoundCardProps) {
   return (
     <div
       className={classNames(
-        'inline-flex',
+        'inline-flex align-middle',
         beside ? 'items-center gap-3' : 'flex-col items-center gap-1 text-center',
         className,
       )}
@@ -66,20 +66,15 @@ function CardDrawing({ colour, weight, size = 'md', name, label, className }: Wo
         className="fill-card stroke-card-edge"
         strokeWidth={unitsPerPx}
       />
-      <g className="stroke-edge" strokeLinecap="round" strokeWidth={thickness + 2 * unitsPerPx}>
-        {strands.map(({ path }) => (
-          <path key={path} d={path} />
-        ))}
-      </g>
       <g strokeLinecap="round">
-        {strands.map(({ path, light, shade }) => (
-          <g key={path}>
-            <path d={path} stroke={colour} strokeWidth={thickness} />
-            <path d={shade} stroke="#000" strokeOpacity="0.3" strokeWidth={thickness * 0.2} />
-            <path d={light} stroke="#fff" strokeOpacity="0.4" strokeWidth={thickness * 0.18} />
-          </g>
-        ))}
+        <path d={strands.middle} className="stroke-edge" strokeWidth={thickness + 2 * unitsPerPx} />
+        <path d={strands.middle} stroke={colour} strokeWidth={thickness} />
+        <path d={strands.shade} stroke="#000" strokeOpacity="0.3" strokeWidth={0.2 * thickness} />
+        <path d={strands.light} stroke="#fff" strokeOpacity="0.4" strokeWidth={0.18 * thickness} />
       </g>
+      {size !== 'sm' && (
+        <path d={strands.plies} stroke="#000" strokeOpacity="0.17" strokeWidth={0.13 * thickness} />
+      )}
     </svg>
   );
 }

@@ -1,0 +1,94 @@
+import { READY_JOINS } from '../../lib/joins/readyJoins';
+import { fitOf } from '../../lib/joins/fit';
+import type { Estimate } from '../../lib/ledger/ledger';
+import { withBorder } from '../../lib/plan/edits';
+import type { Plan } from '../../lib/plan/plan';
+import type { Units } from '../../lib/units/display';
+import { Select } from '../ui/Select';
+import { Section } from './Section';
+import { SizeFields } from './SizeFields';
+import { codeWord, type Terms } from './stitchWord';
+import type { ChangePlan } from './usePlan';
+
+interface BlanketSectionProps {
+  plan: Plan;
+  estimate: Estimate;
+  units: Units;
+  terms: Terms;
+  change: ChangePlan;
+}
+
+const BORDER_STITCHES = ['sc', 'hdc', 'dc'] as const;
+const MOST_BORDER_ROUNDS = 12;
+
+/** How many motifs, how they are joined, and what goes round them. */
+export function BlanketSection({ plan, estimate, units, terms, change }: BlanketSectionProps) {
+  const stitch = plan.border[0]?.stitch ?? 'sc';
+  const rounds = Math.max(plan.border.length, MOST_BORDER_ROUNDS);
+  return (
+    <Section title="Blanket">
+      <SizeFields {...{ plan, estimate, units, change }} />
+      <div className="col-span-6">
+        <Select
+          label="Join"
+          value={plan.join.key}
+          onChange={(event) =>
+            change((old) => ({ ...old, join: { ...old.join, key: event.target.value } }))
+          }
+          options={READY_JOINS.map((join) => ({
+            value: join.key,
+            word: fitOf(estimate.sideStitches, join.fit).fits ? join.name : `${join.name} · does not fit`,
+          }))}
+        />
+      </div>
+      <div className="col-span-3">
+        <Select
+          label="Joined in"
+          value={plan.join.colour}
+          onChange={(event) =>
+            change((old) => ({ ...old, join: { ...old.join, colour: event.target.value } }))
+          }
+          options={plan.colours.map(({ key, name }) => ({ value: key, word: name }))}
+        />
+      </div>
+      <div className="col-span-3">
+        <Select
+          label="Corners"
+          value={plan.corners}
+          onChange={(event) =>
+            change((old) => ({ ...old, corners: event.target.value as Plan['corners'] }))
+          }
+          options={[
+            { value: 'crossed', word: 'Crossed inside' },
+            { value: 'gathered', word: 'Gathered' },
+          ]}
+        />
+      </div>
+      <div className="col-span-3">
+        <Select
+          label="Border"
+          value={String(plan.border.length)}
+          onChange={(event) => change((old) => withBorder(old, Number(event.target.value), stitch))}
+          options={Array.from({ length: rounds + 1 }, (_, count) => ({
+            value: String(count),
+            word: count === 0 ? 'No border' : count === 1 ? '1 round' : `${count} rounds`,
+          }))}
+        />
+      </div>
+      <div className="col-span-3">
+        <Select
+          label="of"
+          value={stitch}
+          disabled={plan.border.length === 0}
+          onChange={(event) =>
+            change((old) => withBorder(old, old.border.length, event.target.value))
+          }
+          options={[...new Set([...BORDER_STITCHES, stitch])].map((code) => ({
+            value: code,
+            word: codeWord(code, terms),
+          }))}
+        />
+      </div>
+    </Section>
+  );
+}

@@ -1,0 +1,178 @@
+import { Plus, Trash2 } from 'lucide-react';
+import {
+  withChangedColour,
+  withColour,
+  withColourway,
+  withoutColour,
+  withoutColourway,
+  withRoundColour,
+} from '../../lib/plan/edits';
+import type { Plan } from '../../lib/plan/plan';
+import { PLAN_LIMITS } from '../../schemas/limits';
+import { Button } from '../ui/Button';
+import { Sheet } from '../ui/Dialog';
+import { Field } from '../ui/Field';
+import { Select } from '../ui/Select';
+import { WoundCard } from '../ui/WoundCard';
+import type { ChangePlan } from './usePlan';
+
+interface ColourSheetProps {
+  open: boolean;
+  onOpenChange: (open: boolean) => void;
+  plan: Plan;
+  change: ChangePlan;
+}
+
+/** Colourways that can be edited by hand here; more arrive only from a file or a program. */
+const MOST_BY_HAND = 12;
+
+/** The colours of a plan, the colour of every round, and of the border. */
+export function ColourSheet({ open, onOpenChange, plan, change }: ColourSheetProps) {
+  return (
+    <Sheet
+      open={open}
+      onOpenChange={onOpenChange}
+      title="Colours"
+      description="Colourways take turns along the diagonals of the blanket."
+    >
+      <Colours {...{ plan, change }} />
+      <Colourways {...{ plan, change }} />
+      <BorderColours {...{ plan, change }} />
+    </Sheet>
+  );
+}
+
+interface PartProps {
+  plan: Plan;
+  change: ChangePlan;
+}
+
+function Colours({ plan, change }: PartProps) {
+  return (
+    <section className="pb-5">
+      <h3 className="pb-2">Yarn colours</h3>
+      <ul className="grid gap-3">
+        {plan.colours.map(({ key, name, hex }) => (
+          <li key={key} className="flex items-end gap-3">
+            <WoundCard colour={hex} weight={plan.yarn.weightCategory} size="md" />
+            <Field
+              className="flex-1"
+              label="Name"
+              value={name}
+              maxLength={PLAN_LIMITS.nameLength}
+              onChange={(event) => {
+                const next = event.target.value;
+                change((old) => withChangedColour(old, key, { name: next }), `colour name ${key}`);
+              }}
+              error={name.trim() === '' ? 'A colour needs a name' : undefined}
+            />
+            <Field
+              className="w-16"
+              label="Shade"
+              type="color"
+              value={hex}
+              aria-label={`Shade of ${name}`}
+              onChange={(event) => {
+                const next = event.target.value;
+                change((old) => withChangedColour(old, key, { hex: next }), `colour ${key}`);
+              }}
+            />
+            <Button
+              kind="quiet"
+              icon={Trash2}
+              disabled={plan.colours.length === 1}
+              onClick={() => change((old) => withoutColour(old, key))}
+              aria-label={`Remove ${name}`}
+            >
+              Remove
+            </Button>
+          </li>
+        ))}
+      </ul>
+      {plan.colours.length < PLAN_LIMITS.colours && (
+        <Button
+          className="mt-3"
+          icon={Plus}
+          onClick={() =>
+            change((old) => withColour(old, { name: `Colour ${old.colours.length + 1}`, hex: '#7d8f8b' }))
+          }
+        >
+          Add a colour
+        </Button>
+      )}
+    </section>
+  );
+}
+
+function Colourways({ plan, change }: PartProps) {
+  const options = plan.colours.map(({ key, name }) => ({ value: key, word: name }));
+  return (
+    <section className="border-t border-line py-5">
+      <h3 className="pb-2">Colourways of the motif</h3>
+      <ol className="grid gap-4">
+        {plan.colourways.slice(0, MOST_BY_HAND).map((colourway, i) => (
+          <li key={i}>
+            <div className="flex items-center justify-between">
+              <h4 className="font-bold">Colourway {i + 1}</h4>
+              <Button
+                kind="quiet"
+                small
+                icon={Trash2}
+                disabled={plan.colourways.length === 1}
+                onClick={() => change((old) => withoutColourway(old, i))}
+                aria-label={`Remove colourway ${i + 1}`}
+              >
+                Remove
+              </Button>
+            </div>
+            <div className="grid grid-cols-2 gap-2 sm:grid-cols-4">
+              {colourway.roundColours.map((colour, round) => (
+                <Select
+                  key={round}
+                  label={plan.motifs[colourway.motifIndex]?.rounds[round]?.label ?? ''}
+                  value={colour}
+                  options={options}
+                  onChange={(event) => {
+                    const next = event.target.value;
+                    change((old) => withRoundColour(old, i, round, next));
+                  }}
+                />
+              ))}
+            </div>
+          </li>
+        ))}
+      </ol>
+      {plan.colourways.length < MOST_BY_HAND && (
+        <Button className="mt-3" icon={Plus} onClick={() => change(withColourway)}>
+          Add a colourway
+        </Button>
+      )}
+    </section>
+  );
+}
+
+function BorderColours({ plan, change }: PartProps) {
+  if (plan.border.length === 0) return null;
+  return (
+    <section className="border-t border-line py-5">
+      <h3 className="pb-2">Border</h3>
+      <div className="grid grid-cols-2 gap-2 sm:grid-cols-4">
+        {plan.border.map(({ colour }, i) => (
+          <Select
+            key={i}
+            label={`Round ${i + 1}`}
+            value={colour}
+            options={plan.colours.map(({ key, name }) => ({ value: key, word: name }))}
+            onChange={(event) => {
+              const next = event.target.value;
+              change((old) => ({
+                ...old,
+                border: old.border.map((round, j) => (j === i ? { ...round, colour: next } : round)),
+              }));
+            }}
+          />
+        ))}
+      </div>
+    </section>
+  );
+}

@@ -1,0 +1,103 @@
+import { Palette } from 'lucide-react';
+import type { Estimate } from '../../lib/ledger/ledger';
+import { READY_MOTIFS, readyMotif } from '../../lib/motifs/readyMotifs';
+import { withMotif } from '../../lib/plan/edits';
+import type { Plan } from '../../lib/plan/plan';
+import { showFabric, type Units } from '../../lib/units/display';
+import { PLAN_LIMITS } from '../../schemas/limits';
+import { Button } from '../ui/Button';
+import { Select } from '../ui/Select';
+import { WoundCard } from '../ui/WoundCard';
+import { FabricField } from './QuantityFields';
+import { Section } from './Section';
+import type { ChangePlan } from './usePlan';
+
+interface MotifSectionProps {
+  plan: Plan;
+  estimate: Estimate;
+  units: Units;
+  change: ChangePlan;
+  onColours: () => void;
+}
+
+/** Which motif, to how many rounds, how big it came out, and in which colours. */
+export function MotifSection({ plan, estimate, units, change, onColours }: MotifSectionProps) {
+  const motif = plan.motifs[0];
+  if (!motif) return null;
+  const ready = readyMotif(motif.key);
+  const choose = (key: string, rounds: number) => {
+    const next = readyMotif(key, rounds);
+    if (next) change((old) => withMotif(old, next));
+  };
+  const computedMm = estimate.motifs[0]?.acrossMm ?? 0;
+  const across = motif.sides === 0 ? 'Across, measured' : motif.sides === 6 ? 'Flat to flat, measured' : 'Side, measured';
+  return (
+    <Section title="Motif">
+      <div className="col-span-6">
+        <Select
+          label="Pattern"
+          value={motif.key}
+          onChange={(event) => choose(event.target.value, motif.rounds.length)}
+          options={[
+            ...(ready ? [] : [{ value: motif.key, word: motif.name }]),
+            ...READY_MOTIFS.map(({ key, name }) => ({ value: key, word: name })),
+          ]}
+        />
+      </div>
+      <div className="col-span-3">
+        <Select
+          label="Worked to"
+          value={String(motif.rounds.length)}
+          disabled={!ready}
+          onChange={(event) => choose(motif.key, Number(event.target.value))}
+          options={(ready ?? motif).rounds.map((_, i) => ({
+            value: String(i + 1),
+            word: i === 0 ? '1 round' : `${i + 1} rounds`,
+          }))}
+        />
+      </div>
+      <div className="col-span-3">
+        <FabricField
+          label={across}
+          units={units}
+          optional
+          maxMm={PLAN_LIMITS.motifSideMm}
+          valueMm={plan.motifSideMm}
+          onChange={(motifSideMm) => change((old) => ({ ...old, motifSideMm }), 'motif side')}
+          hint={plan.motifSideMm === null ? `${showFabric(computedMm, units)} by its rounds` : undefined}
+        />
+      </div>
+      <RoundCards plan={plan} />
+      <div className="col-span-6">
+        <Button icon={Palette} onClick={onColours}>
+          Change colours
+        </Button>
+      </div>
+    </Section>
+  );
+}
+
+/** The first colourway, round by round. */
+function RoundCards({ plan }: { plan: Plan }) {
+  const motif = plan.motifs[0];
+  const colourway = plan.colourways[0];
+  return (
+    <ul className="col-span-6 flex flex-wrap gap-x-2 gap-y-1" aria-label="Colours of the first colourway">
+      {colourway?.roundColours.map((key, i) => {
+        const colour = plan.colours.find((each) => each.key === key);
+        const label = motif?.rounds[i]?.label ?? '';
+        return (
+          <li key={label} className="text-center text-xs text-ink-2">
+            <WoundCard
+              colour={colour?.hex ?? '#888888'}
+              weight={plan.yarn.weightCategory}
+              size="sm"
+              label={`${label}: ${colour?.name ?? 'no colour'}`}
+            />
+            <span aria-hidden>{label}</span>
+          </li>
+        );
+      })}
+    </ul>
+  );
+}
