@@ -10,6 +10,8 @@ export default defineConfig({
   integrations: [react(), auth({ configFile: './src/server/auth.config.ts' })],
   // Host and protocol are pinned by src/server/entry.mjs before a request reaches Astro.
   security: { checkOrigin: true, allowedDomains: [{}] },
+  // Names each page's own scripts by hash; src/server/entry completes the policy.
+  experimental: { csp: true },
   session: { driver: 'memory' },
   devToolbar: { enabled: false },
   vite: {
