@@ -7,9 +7,9 @@ import { evidenceOf } from './evidenceOf';
 import type { Notice } from './ledger';
 
 /** A gauge this far outside its category's published range is questioned (ours). */
-const GAUGE_TOLERANCE = 0.2;
+export const GAUGE_TOLERANCE = 0.2;
 /** A weight this many standard deviations from what the hand could take is questioned (ours). */
-const READING_TOLERANCE = 3;
+export const READING_TOLERANCE = 3;
 /** Motifs of one blanket that differ by more than this are questioned (ours). */
 const SIDE_TOLERANCE = 0.03;
 /** Up to this size a blanket may be meant for a baby (published crib sizes reach 45 × 60 in). */
