@@ -78,7 +78,7 @@ export function Controls() {
           />
           <Select
             label="Join"
-            error="Braid loops need a side of 3 modulo 4 stitches: 15 or 19"
+            error="Braid loops need 15 or 19 stitches a side; this motif has 16"
             options={[{ value: 'braid', word: 'Braid loops' }]}
           />
           <Field label="Dye lot" defaultValue="K418" disabled />

@@ -12,10 +12,7 @@ interface AnswerBarProps {
 /** On a phone the answer stays in view at the foot of the screen; on a desktop it is in view anyway. */
 export function AnswerBar({ answer, detail, action }: AnswerBarProps) {
   return (
-    <div
-      data-chrome
-      className="sticky bottom-0 z-30 flex items-center gap-4 border-t border-edge bg-surface px-4 pt-2 pb-[max(0.5rem,env(safe-area-inset-bottom))] lg:hidden"
-    >
+    <div data-chrome className="answer-bar">
       <div className="min-w-0 flex-1">
         <p className="text-xl font-bold tabular-nums">{answer}</p>
         {detail && <p className="truncate text-sm text-ink-2">{detail}</p>}

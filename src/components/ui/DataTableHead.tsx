@@ -40,7 +40,7 @@ function HeadCell<Row>({ header }: { header: Header<Row, unknown> }) {
           type="button"
           onClick={column.getToggleSortingHandler()}
           className={classNames(
-            '-mx-1 inline-flex min-h-7 items-center gap-1 rounded-control px-1 hover:text-ink coarse:min-h-11',
+            '-mx-1 inline-flex min-h-7 items-center gap-1 rounded-control px-1 whitespace-nowrap hover:text-ink coarse:min-h-11',
             sorted && 'font-bold text-ink',
             figures && 'flex-row-reverse',
           )}

@@ -51,7 +51,7 @@ function Panel(props: DialogProps & { place: string }) {
               )}
             </div>
             <Radix.Close asChild>
-              <Button kind="quiet" icon={X} className="-me-2 shrink-0">
+              <Button kind="quiet" icon={X} className="-me-2 -mt-1.5 shrink-0">
                 Close
               </Button>
             </Radix.Close>

@@ -34,7 +34,7 @@ export function Toast({ open, onOpenChange, children, action }: ToastProps) {
       </Radix.Root>
       <Radix.Viewport
         data-chrome
-        className="fixed inset-x-4 bottom-[max(1rem,env(safe-area-inset-bottom))] z-50 mx-auto max-w-md outline-none"
+        className="fixed inset-x-4 bottom-[calc(1rem+max(var(--answer-bar),env(safe-area-inset-bottom,0px)))] z-50 mx-auto max-w-md outline-none"
       />
     </Radix.Provider>
   );
