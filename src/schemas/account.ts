@@ -14,7 +14,7 @@ export const emailSchema = z
   .string({ error: 'Enter your e-mail address.' })
   .trim()
   .toLowerCase()
-  .min(1, 'Enter your e-mail address.')
+  .min(1, { error: 'Enter your e-mail address.', abort: true })
   .max(EMAIL_MAX_LENGTH, `An e-mail address has at most ${EMAIL_MAX_LENGTH} characters.`)
   .pipe(z.email('Enter an address like name@example.com.'));
 

@@ -10,7 +10,7 @@ const modules = Object.entries(files).map(([file, exports]) => ({
   exports,
 }));
 
-const operations = operationsOf(modules);
+export const operations = operationsOf(modules);
 const document = JSON.stringify(buildOpenApi(operations), null, 2);
 
 export const GET: APIRoute = () =>
