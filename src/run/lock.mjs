@@ -6,6 +6,7 @@ import { identify, isAlive, sleep } from './processes.mjs';
 import { say } from './say.mjs';
 
 const POLL_MS = 100;
+const WAITS_UNTOLD = 20;
 const BREAKER_MAX_AGE_MS = 10_000;
 
 /**
@@ -16,13 +17,13 @@ const BREAKER_MAX_AGE_MS = 10_000;
  */
 export async function withLock(name, work, { folder = stateSubfolder('locks') } = {}) {
   const path = join(folder, name);
-  let told = false;
-  while (!take(path)) {
+  for (let waits = 0; !take(path); waits += 1) {
     const holder = read(path);
     if (holder && !isAlive(holder)) takeAway(path);
     else {
-      if (holder && !told) say(`Waiting for another Ellwise command (process ${holder.pid})`);
-      told = true;
+      if (holder && waits === WAITS_UNTOLD) {
+        say(`Waiting for another Ellwise command (process ${holder.pid})`);
+      }
       await sleep(POLL_MS);
     }
   }

@@ -23,10 +23,13 @@ export const CLUSTER_USER = 'ellwise';
 /** Only what a program needs to find itself; PGDATA and the like of the caller would mislead it. */
 const env = { PATH: process.env.PATH, LANG: 'C.UTF-8', LC_ALL: 'C.UTF-8' };
 
-/** Starts the private cluster, making it the first time; harmless when it runs. @returns {Promise<Cluster>} */
-export async function startCluster() {
+/**
+ * Starts the private cluster, making it the first time; harmless when it runs.
+ * @param {ClusterPlace} [given] @returns {Promise<Cluster>}
+ */
+export async function startCluster(given) {
   return withLock('postgres', async () => {
-    const place = clusterPlace();
+    const place = given ?? clusterPlace();
     const programs = await postgresPrograms(place.data);
     const passwords = readOrMakeSecrets(place.passwords, () => ({
       adminPassword: newSecret(),
@@ -39,10 +42,10 @@ export async function startCluster() {
   });
 }
 
-/** Stops the private cluster; true when it was running. */
-export async function stopCluster() {
+/** Stops the private cluster; true when it was running. @param {ClusterPlace} [given] */
+export async function stopCluster(given) {
   return withLock('postgres', async () => {
-    const place = clusterPlace();
+    const place = given ?? clusterPlace();
     if (runningPort(place) === undefined) return false;
     const programs = await postgresPrograms(place.data);
     const args = ['-D', place.data, '-m', 'fast', '-w', '-t', String(START_PATIENCE_S), 'stop'];

@@ -2,7 +2,7 @@ import { createHash } from 'node:crypto';
 import { chmodSync, chownSync, existsSync, lstatSync, mkdirSync } from 'node:fs';
 import { join } from 'node:path';
 import { canEnter, unprivilegedAccount } from './account.mjs';
-import { root, stateFolder } from './paths.mjs';
+import { stateFolder } from './paths.mjs';
 import { RunError } from './say.mjs';
 
 /**
@@ -16,15 +16,15 @@ import { RunError } from './say.mjs';
 
 /**
  * Where the private cluster lives, and as whom: in the state folder, or under /var/tmp when the
- * account that runs it cannot enter the checkout (one under /root, say).
- * @returns {ClusterPlace}
+ * account that runs it cannot enter that (in a checkout under /root, say).
+ * @param {string} [state] @returns {ClusterPlace}
  */
-export function clusterPlace() {
+export function clusterPlace(state = stateFolder) {
   const account = unprivilegedAccount();
-  mkdirSync(stateFolder, { recursive: true });
-  const isOutside = account !== undefined && !canEnter(account, stateFolder);
-  const name = createHash('sha256').update(root).digest('hex').slice(0, 16);
-  const folder = isOutside ? `/var/tmp/ellwise-${name}` : join(stateFolder, 'postgres');
+  mkdirSync(state, { recursive: true });
+  const isOutside = account !== undefined && !canEnter(account, state);
+  const name = createHash('sha256').update(state).digest('hex').slice(0, 16);
+  const folder = isOutside ? `/var/tmp/ellwise-${name}` : join(state, 'postgres');
   return {
     folder,
     data: join(folder, 'data'),

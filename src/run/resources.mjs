@@ -15,6 +15,7 @@ export function openResources({ interruptedCode = 130 } = {}) {
     /** @param {() => unknown} close */
     add: (close) => closers.push(close),
     close: () => (closing ??= closeAll()),
+    isClosing: () => closing !== undefined,
   };
   for (const name of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
     process.on(name, async () => {

@@ -16,7 +16,8 @@ async function start() {
     const web = await withLock('start', () => launch(resources));
     if (!web) return 0;
     const code = await web.ended;
-    say(`The web server ended (exit code ${code}).`);
+    if (resources.isClosing()) return 0;
+    say(`The web server ended by itself (exit code ${code}).`);
     return 1;
   } finally {
     await resources.close();

@@ -9,6 +9,7 @@ const KEEP_ALIVE_TIMEOUT_MS = 5_000;
 const SOCKET_IDLE_TIMEOUT_MS = 60_000;
 const TIMEOUT_CHECK_MS = 1_000;
 const DRAIN_TIMEOUT_MS = 10_000;
+const TIDY_INTERVAL_MS = 100;
 
 /** @typedef {(req: import('node:http').IncomingMessage, res: import('node:http').ServerResponse) => unknown} Handler */
 
@@ -63,9 +64,12 @@ export function createServer({ handler, settings, pingDatabase, timeouts }) {
   /** Stops taking requests and resolves once those in hand are answered. @returns {Promise<void>} */
   const drain = () => {
     isDraining = true;
+    // Connections that become idle only now would be kept open for a next request.
+    const tidying = setInterval(() => server.closeIdleConnections(), TIDY_INTERVAL_MS);
     const impatience = setTimeout(() => server.closeAllConnections(), DRAIN_TIMEOUT_MS);
     return new Promise((resolve) => {
       server.close(() => {
+        clearInterval(tidying);
         clearTimeout(impatience);
         resolve();
       });
