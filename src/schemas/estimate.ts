@@ -87,6 +87,7 @@ export const estimateSchema = z.strictObject({
     widthSdMm: figure,
     heightSdMm: figure,
     seamMm: figure,
+    edgeMm: figure,
     borderMm: figure,
   }),
   stitchWidthMm: figure,

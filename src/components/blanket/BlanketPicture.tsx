@@ -97,8 +97,9 @@ function MotifRows({ plan, estimate }: { plan: Plan; estimate: Estimate }) {
       {Array.from({ length: rows }, (_, row) => {
         // Row r begins with colourway r: the pattern is drawn that many motifs further left.
         const shiftMm = (row % count) * pitchMm;
-        const leftMm = size.borderMm - size.seamMm / 2 + (hexagons && row % 2 ? pitchMm / 2 : 0);
-        const topMm = size.borderMm - size.seamMm / 2 + row * rowMm;
+        const outsideMm = size.borderMm + size.edgeMm - size.seamMm / 2;
+        const leftMm = outsideMm + (hexagons && row % 2 ? pitchMm / 2 : 0);
+        const topMm = outsideMm + row * rowMm;
         return (
           <g key={row} transform={`translate(${leftMm - shiftMm} ${topMm})`}>
             <rect x={shiftMm} width={columns * pitchMm} height={bandMm} fill={`url(#${id})`} />

@@ -41,19 +41,24 @@ function scRoundsToFit(n: number, m: number, r: number): number | null {
 }
 
 /**
- * The fit in words: "15 stitches a side fit: 3 repeats of 4 and 3 over." Singular and plural as due.
+ * The fit in words: "15 stitches a side fit: 3 repeats of 4, and 3." Singular and plural as due.
  */
 export function fitInWords(n: number, fit: Fit): string {
   const result = fitOf(n, fit);
+  const side = `${counted(n, 'stitch', 'stitches')} a side`;
   if (result.fits) {
+    const verb = n === 1 ? 'fits' : 'fit';
     return fit.multipleOf === 1
-      ? `${n} stitches a side fit: any count does.`
-      : `${n} stitches a side fit: ${result.repeats} repeats of ${fit.multipleOf}, and ${fit.plus}.`;
+      ? `${side} ${verb}: any count does.`
+      : `${side} ${verb}: ${counted(result.repeats, 'repeat', 'repeats')} of ${fit.multipleOf}, and ${fit.plus}.`;
   }
   const rounds = result.scRounds;
   const cure =
     rounds === null
       ? 'Rounds of sc cannot make it fit: choose another number of rounds or another join.'
-      : `${rounds} round${rounds === 1 ? '' : 's'} of sc with 3 sc in each corner would make it fit.`;
-  return `${n} stitches a side do not fit a multiple of ${fit.multipleOf} and ${fit.plus}: ${result.nearest.join(' or ')} would. ${cure}`;
+      : `${counted(rounds, 'round', 'rounds')} of sc with 3 sc in each corner would make it fit.`;
+  return `${side} ${n === 1 ? 'does' : 'do'} not fit a multiple of ${fit.multipleOf} and ${fit.plus}: ${result.nearest.join(' or ')} would. ${cure}`;
 }
+
+const counted = (count: number, one: string, more: string): string =>
+  `${count} ${count === 1 ? one : more}`;

@@ -13,3 +13,7 @@ export function seamWidthMm({ width }: Join, gauge: Gauge): number {
     stitchesMm,
   );
 }
+
+/** Fabric outside the outermost motifs: a join of added rounds leaves half a seam there, others none. */
+export const joinEdgeMm = (join: Join, gauge: Gauge): number =>
+  join.roundsAdded > 0 ? seamWidthMm(join, gauge) / 2 : 0;

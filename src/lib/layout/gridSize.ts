@@ -8,6 +8,8 @@ export interface GridMeasures {
   readonly acrossMm: number;
   /** Added by each seam. */
   readonly seamMm: number;
+  /** Rounds that the join adds outside the outermost motifs, on one side. */
+  readonly edgeMm: number;
   /** Width of the border on one side. */
   readonly borderMm: number;
 }
@@ -18,10 +20,10 @@ export interface GridSize {
 }
 
 /**
- * Finished size: columns × motif + (columns - 1) × seam + 2 × border, and so on down.
+ * Finished size: columns × motif + (columns - 1) × seam + 2 × (edge + border), and so on down.
  * Rows of hexagons nest by a quarter of their height and stand half a motif right of one another.
  *
- * Example: 8 × 10 squares of 142 mm, 5 mm seams, 15 mm border: 1201 × 1495 mm.
+ * Example: 8 × 10 squares of 142 mm, 5 mm seams, no edge, 15 mm border: 1201 × 1495 mm.
  */
 export function gridSize(
   layout: Layout,
@@ -29,15 +31,15 @@ export function gridSize(
   columns: number,
   measures: GridMeasures,
 ): GridSize {
-  const { acrossMm, seamMm, borderMm } = measures;
-  const straight = (count: number): number =>
-    count * acrossMm + (count - 1) * seamMm + 2 * borderMm;
+  const { acrossMm, seamMm } = measures;
+  const outsideMm = 2 * (measures.edgeMm + measures.borderMm);
+  const straight = (count: number): number => count * acrossMm + (count - 1) * seamMm + outsideMm;
   if (layout === 'square') return { widthMm: straight(columns), heightMm: straight(rows) };
   const sideMm = acrossMm / Math.sqrt(3);
   const rowMm = 1.5 * sideMm + (Math.sqrt(3) / 2) * seamMm;
   return {
     widthMm: straight(columns) + (rows > 1 ? (acrossMm + seamMm) / 2 : 0),
-    heightMm: 2 * sideMm + (rows - 1) * rowMm + 2 * borderMm,
+    heightMm: 2 * sideMm + (rows - 1) * rowMm + outsideMm,
   };
 }
 

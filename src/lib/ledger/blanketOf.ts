@@ -3,7 +3,7 @@ import { DomainError } from '../errors';
 import type { Join } from '../joins/join';
 import { cornerLinks } from '../joins/links';
 import { readyJoin } from '../joins/readyJoins';
-import { seamWidthMm } from '../joins/seamWidth';
+import { joinEdgeMm, seamWidthMm } from '../joins/seamWidth';
 import { colourwayCounts } from '../layout/colourwayCounts';
 import { gridCounts } from '../layout/gridCounts';
 import { gridFor, gridSize } from '../layout/gridSize';
@@ -49,6 +49,7 @@ export function blanketOf(plan: Plan): Blanket {
   const measures = {
     acrossMm: Math.max(...geometries.map(({ acrossMm }) => acrossMm)),
     seamMm: seamWidthMm(join, gauge),
+    edgeMm: joinEdgeMm(join, gauge),
     borderMm: plan.border.reduce((sum, { stitch }) => sum + gauge.heightMm(stitch), 0),
   };
   const { rows, columns } = gridFor(layout, plan.size, measures);
@@ -68,6 +69,7 @@ export function blanketOf(plan: Plan): Blanket {
       widthSdMm: columns * acrossSdMm,
       heightSdMm: rows * acrossSdMm,
       seamMm: measures.seamMm,
+      edgeMm: measures.edgeMm,
       borderMm: measures.borderMm,
     },
     colourwayMotifs: colourwayCounts(rows, columns, plan.colourways.length),

@@ -95,6 +95,8 @@ export interface FinishedSize {
   readonly widthSdMm: number;
   readonly heightSdMm: number;
   readonly seamMm: number;
+  /** Rounds that the join adds outside the outermost motifs, on one side. */
+  readonly edgeMm: number;
   readonly borderMm: number;
 }
 

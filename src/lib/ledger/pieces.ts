@@ -43,6 +43,10 @@ export interface PieceContext {
 /** Sides and corners that a join finds on one motif; a circle has four places to touch and no corner. */
 export const joinSidesOf = (motif: Motif): number => (motif.sides === 0 ? 4 : motif.sides);
 
+/** Stitches of a side where nothing touches it: a quarter of a circle, not only what would touch. */
+const openSideStitches = (motif: Motif, sideStitches: number): number =>
+  motif.sides === 0 ? (motif.rounds.at(-1)?.perSide ?? 0) / joinSidesOf(motif) : sideStitches;
+
 /** Every piece of the blanket, by colour; its cost grows with the colourways, not with the area. */
 export function piecesOf(context: PieceContext): PieceGroup[] {
   return [
@@ -116,8 +120,7 @@ function joinPieces(context: PieceContext): PieceGroup[] {
 function addedRounds({ plan, join, colourwayMotifs, sideStitches }: PieceContext): PieceGroup[] {
   return plan.colourways.map(({ motifIndex, roundColours }, i) => {
     const motif = plan.motifs[motifIndex] as Motif;
-    // The added rounds of a circle run all the way round it, not only where it touches.
-    const n = motif.sides === 0 ? (motif.rounds.at(-1)?.perSide ?? 0) / 4 : sideStitches;
+    const n = openSideStitches(motif, sideStitches);
     const made = addCounts(
       scaleCounts(countsOnSide(join, join.perMotifSide, n), joinSidesOf(motif)),
       scaleCounts(join.perMotifCorner, motif.sides),
@@ -146,7 +149,8 @@ function lastRoundLinks(
 function borderPieces({ plan, join, counts, sideStitches }: PieceContext): PieceGroup[] {
   const codes = plan.border.map(({ stitch }) => stitch);
   const sides = counts.outerSides;
-  return borderRounds(codes, counts, outerSideStitches(join, sideStitches)).map((made, i) => {
+  const n = outerSideStitches(join, openSideStitches(plan.motifs[0] as Motif, sideStitches));
+  return borderRounds(codes, counts, n).map((made, i) => {
     const colour = plan.border[i]?.colour as string;
     const attached = i === 0 || plan.border[i - 1]?.colour !== colour;
     return {

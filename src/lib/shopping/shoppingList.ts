@@ -54,7 +54,10 @@ export function shoppingList({
   const { price, putUp } = plan.yarn;
   const lines = plan.colours.map(({ key, name, hex }, i): ShoppingLine => {
     const need = estimate.colours[i] as Estimate['colours'][number];
-    const lots = stash.filter(({ colour }) => colour === key).map(lotYarn);
+    const lots = stash
+      .filter(({ colour }) => colour === key)
+      .map(lotYarn)
+      .filter(({ massG }) => massG > 0);
     const haveM = sum(lots, ({ lengthM }) => lengthM);
     const haveVarianceM2 = sum(lots, ({ varianceM2 }) => varianceM2);
     const toBuySkeins = skeinsFor(
@@ -70,8 +73,8 @@ export function shoppingList({
       neededG: need.neededG,
       haveM,
       haveG: sum(lots, ({ massG }) => massG),
-      toBuySkeins: need.meanM > 0 ? toBuySkeins : 0,
-      mixesLots: lots.length + (toBuySkeins > 0 ? 1 : 0) > 1,
+      toBuySkeins,
+      mixesLots: need.meanM > 0 && lots.length + (toBuySkeins > 0 ? 1 : 0) > 1,
       costMinor: price && toBuySkeins * price.priceMinor,
     };
   });

@@ -1,3 +1,4 @@
+import { DomainError } from '../errors';
 import { dot, inverse, times, type Matrix, type Vector } from './linear';
 
 /** A linear-Gaussian belief about some unknowns. */
@@ -23,6 +24,7 @@ export interface Observation {
  * Exact posterior of a linear-Gaussian model, in information form.
  * With every prior variance very large this is ordinary least squares (tested against NIST's
  * certified regressions). Cost: one inverse of the size of the unknowns.
+ * Throws DomainError for an observation without noise, which would leave nothing to weigh it against.
  *
  * Example: prior mean 0, variance 1; one observation of 2 with row [1] and variance 1 gives
  * mean 1 and variance 0.5.
@@ -33,6 +35,12 @@ export function posterior(prior: Prior, observations: readonly Observation[]): B
   );
   const pull = prior.mean.map(() => 0);
   for (const { row, value, variance } of observations) {
+    if (!(variance > 0 && variance < Infinity)) {
+      throw new DomainError(
+        'no-noise',
+        `posterior requires observations of a positive finite variance, got ${variance}`,
+      );
+    }
     const surprise = value - dot(row, prior.mean);
     row.forEach((weight, i) => {
       if (weight === 0) return;
