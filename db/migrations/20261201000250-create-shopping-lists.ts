@@ -13,6 +13,8 @@ const UP = `
     owner_id uuid NOT NULL REFERENCES users (id) ON DELETE CASCADE,
     blanket_id uuid,
     title text NOT NULL CHECK (length(title) BETWEEN 1 AND 120),
+    yarn_name text NOT NULL CHECK (length(yarn_name) BETWEEN 1 AND 80),
+    currency text CHECK (currency ~ '^[A-Z]{3}$'),
     confidence double precision NOT NULL CHECK (confidence > 0 AND confidence < 1),
     lines json NOT NULL CHECK (json_typeof(lines) = 'array'),
     bought json NOT NULL DEFAULT '[]' CHECK (json_typeof(bought) = 'array'),

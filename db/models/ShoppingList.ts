@@ -6,7 +6,7 @@ import {
   type InferCreationAttributes,
   type Sequelize,
 } from 'sequelize';
-import type { ShoppingLine } from '../../src/schemas/shoppingList';
+import type { BlanketShopping, ShoppingLine } from '../../src/schemas/shoppingList';
 import {
   editedColumns,
   idColumn,
@@ -25,7 +25,9 @@ export class ShoppingList extends Model<
   declare ownerId: string;
   declare blanketId: string | null;
   declare title: string;
-  declare confidence: number;
+  declare yarnName: string;
+  declare currency: string | null;
+  declare confidence: BlanketShopping['confidence'];
   declare lines: ShoppingLine[];
   /** Colour keys of the lines that have been bought. */
   declare bought: string[];
@@ -41,6 +43,8 @@ export function init(sequelize: Sequelize): void {
       ownerId: uuidColumn,
       blanketId: DataTypes.UUID,
       title: textColumn,
+      yarnName: textColumn,
+      currency: DataTypes.TEXT,
       confidence: measuredColumn,
       lines: jsonColumn,
       bought: jsonColumn,

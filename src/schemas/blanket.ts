@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { moment, name, strict, uuid, version } from './fields';
+import { choice, listQuery, moment, name, strict, uuid, version } from './fields';
 import { KEPT_LIMITS } from './limits';
 import { planSchema } from './plan';
 
@@ -22,22 +22,34 @@ const blanketFields = {
 export const blanketSchema = z.strictObject({ ...blanketFields, plan: planSchema });
 export type PresentedBlanket = z.input<typeof blanketSchema>;
 
-/** A blanket in a list: its headline figures instead of its plan. */
-export const blanketSummarySchema = z.strictObject({
-  ...blanketFields,
+const blanketFigures = z.strictObject({
   rows: z.number().int(),
   columns: z.number().int(),
   widthMm: z.number(),
   heightMm: z.number(),
   skeins: z.number().int(),
   meanM: z.number(),
-  confidence: z.number(),
   costMinor: z.number().int().nullable(),
-  currency: z.string().nullable(),
+});
+export type BlanketFigures = z.output<typeof blanketFigures>;
+
+/** A blanket in a list: its headline figures instead of its plan. */
+export const blanketSummarySchema = z.strictObject({
+  ...blanketFields,
   yarnName: z.string(),
+  confidence: z.number(),
+  currency: z.string().nullable(),
   colours: z.array(z.strictObject({ key: z.string(), name: z.string(), hex: z.string() })),
+  /** Null when the plan was made for an older edition of the program. */
+  figures: blanketFigures.nullable(),
 });
 export type BlanketSummary = z.output<typeof blanketSummarySchema>;
+
+/** Which blankets a list holds: those at hand, or those deleted and not yet restored. */
+export const blanketsQuery = listQuery.extend({
+  deleted: choice('deleted', ['no', 'only']).default('no'),
+});
+export type BlanketsQuery = z.output<typeof blanketsQuery>;
 
 /** One save of a blanket; `version` is its address. */
 export const revisionSchema = z.strictObject({

@@ -116,6 +116,7 @@ export const hex = z
 
 export const uuid = z.uuid({ error: 'This is not the id of anything kept here' });
 export const idParams = z.strictObject({ id: uuid });
+export const keyParams = z.strictObject({ id: name('Key', PLAN_LIMITS.keyLength) });
 
 /** Number of the save that an edit began from; an edit that began from an older one is refused. */
 export const version = counted('Version', 1, 2_147_483_647);
@@ -125,6 +126,9 @@ export const day = z.iso.date({ error: 'Date must be a day such as 2026-11-30' }
 
 /** A moment in a response, ISO 8601 in UTC. */
 export const moment = z.iso.datetime();
+
+/** A table as RFC 4180, for a spreadsheet. */
+export const csvText = z.string();
 
 const TEXT_NUMBER = /^[+-]?(\d+([.,]\d*)?|[.,]\d+)$/;
 const GROUPED = /^[+-]?[1-9]\d{0,2},\d{3}$/;

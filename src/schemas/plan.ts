@@ -29,6 +29,9 @@ import {
 
 export { PLAN_LIMITS };
 
+/** Edition of this schema, stored beside every plan; a migration converts older ones. */
+export const PLAN_SCHEMA_VERSION = 1;
+
 const colourKey = name('Key of a colour', PLAN_LIMITS.keyLength);
 const motifIndex = counted('Number of a motif', 0, PLAN_LIMITS.motifs - 1);
 

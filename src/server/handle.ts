@@ -50,6 +50,8 @@ export interface RouteSpec<
   body?: B;
   response: R;
   status?: 200 | 201 | 204;
+  /** Of a route that answers a Response of its own; else JSON. */
+  mediaType?: string;
   /** Codes this route answers beyond those every route of its kind can. */
   errors?: readonly ErrorCode[];
   example: { params?: Unparsed<P>; query?: Unparsed<Q>; body?: Unparsed<B> };

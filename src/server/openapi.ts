@@ -134,10 +134,10 @@ function parametersOf(
   }));
 }
 
-function success({ status = 200, response }: RouteSpec): Json {
+function success({ status = 200, mediaType = 'application/json', response }: RouteSpec): Json {
   if (status === 204) return { 204: { description: 'Done.' } };
   const schema = jsonSchemaOf(response, 'output');
-  return { [status]: { description: 'Done.', content: { 'application/json': { schema } } } };
+  return { [status]: { description: 'Done.', content: { [mediaType]: { schema } } } };
 }
 
 /** What can go wrong by the kind of route it is, with the codes it names itself. */

@@ -1,0 +1,21 @@
+import type { Transaction } from 'sequelize';
+import { Colourway } from '../../../db/models';
+import type { CurrentUser } from '../../schemas/user';
+import type { PresentedColourway } from '../../schemas/yarn';
+import { presentColourway } from '../presenters/yarn';
+import { lockOwn } from '../queries/own';
+import { onceByName } from './createColourway';
+import { requireVersion } from './requireVersion';
+
+export async function updateColourway(
+  user: CurrentUser,
+  id: string,
+  { version, name, hex }: { version: number; name: string; hex: string },
+  transaction: Transaction,
+): Promise<PresentedColourway> {
+  const row = await lockOwn(Colourway, user, id, transaction);
+  await requireVersion(row, version, () => presentColourway(row));
+  return presentColourway(
+    await onceByName(row.update({ name, hex, version: version + 1 }, { transaction })),
+  );
+}
