@@ -37,7 +37,9 @@ export function BlanketSection({ plan, estimate, units, terms, change }: Blanket
           }
           options={READY_JOINS.map((join) => ({
             value: join.key,
-            word: fitOf(estimate.sideStitches, join.fit).fits ? join.name : `${join.name} · does not fit`,
+            word: fitOf(estimate.sideStitches, join.fit).fits
+              ? join.name
+              : `${join.name} · does not fit`,
           }))}
         />
       </div>

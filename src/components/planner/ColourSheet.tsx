@@ -94,7 +94,9 @@ function Colours({ plan, change }: PartProps) {
           className="mt-3"
           icon={Plus}
           onClick={() =>
-            change((old) => withColour(old, { name: `Colour ${old.colours.length + 1}`, hex: '#7d8f8b' }))
+            change((old) =>
+              withColour(old, { name: `Colour ${old.colours.length + 1}`, hex: '#7d8f8b' }),
+            )
           }
         >
           Add a colour
@@ -167,7 +169,9 @@ function BorderColours({ plan, change }: PartProps) {
               const next = event.target.value;
               change((old) => ({
                 ...old,
-                border: old.border.map((round, j) => (j === i ? { ...round, colour: next } : round)),
+                border: old.border.map((round, j) =>
+                  j === i ? { ...round, colour: next } : round,
+                ),
               }));
             }}
           />

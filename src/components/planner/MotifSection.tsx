@@ -30,7 +30,12 @@ export function MotifSection({ plan, estimate, units, change, onColours }: Motif
     if (next) change((old) => withMotif(old, next));
   };
   const computedMm = estimate.motifs[0]?.acrossMm ?? 0;
-  const across = motif.sides === 0 ? 'Across, measured' : motif.sides === 6 ? 'Flat to flat, measured' : 'Side, measured';
+  const across =
+    motif.sides === 0
+      ? 'Across, measured'
+      : motif.sides === 6
+        ? 'Flat to flat, measured'
+        : 'Side, measured';
   return (
     <Section title="Motif">
       <div className="col-span-6">
@@ -64,7 +69,9 @@ export function MotifSection({ plan, estimate, units, change, onColours }: Motif
           maxMm={PLAN_LIMITS.motifSideMm}
           valueMm={plan.motifSideMm}
           onChange={(motifSideMm) => change((old) => ({ ...old, motifSideMm }), 'motif side')}
-          hint={plan.motifSideMm === null ? `${showFabric(computedMm, units)} by its rounds` : undefined}
+          hint={
+            plan.motifSideMm === null ? `${showFabric(computedMm, units)} by its rounds` : undefined
+          }
         />
       </div>
       <RoundCards plan={plan} />
@@ -82,7 +89,10 @@ function RoundCards({ plan }: { plan: Plan }) {
   const motif = plan.motifs[0];
   const colourway = plan.colourways[0];
   return (
-    <ul className="col-span-6 flex flex-wrap gap-x-2 gap-y-1" aria-label="Colours of the first colourway">
+    <ul
+      className="col-span-6 flex flex-wrap gap-x-2 gap-y-1"
+      aria-label="Colours of the first colourway"
+    >
       {colourway?.roundColours.map((key, i) => {
         const colour = plan.colours.find((each) => each.key === key);
         const label = motif?.rounds[i]?.label ?? '';

@@ -68,7 +68,10 @@ function GridFields({ size, change }: { size: PlanSize & { by: 'grid' }; change:
         onCommit={(reading) =>
           reading.ok &&
           reading.value !== null &&
-          change((old) => ({ ...old, size: { ...size, [key]: reading.value } as PlanSize }), `grid ${key}`)
+          change(
+            (old) => ({ ...old, size: { ...size, [key]: reading.value } as PlanSize }),
+            `grid ${key}`,
+          )
         }
       />
     </div>
@@ -100,7 +103,8 @@ function TargetFields({
         maxMm={PLAN_LIMITS.targetSizeMm}
         valueMm={size[key]}
         onChange={(value) =>
-          value !== null && change((old) => ({ ...old, size: { ...size, [key]: value } }), `target ${key}`)
+          value !== null &&
+          change((old) => ({ ...old, size: { ...size, [key]: value } }), `target ${key}`)
         }
       />
     </div>

@@ -97,7 +97,8 @@ function NoSwatch({ plan, title, change }: { plan: Plan; title: string; change: 
   return (
     <Section title={title}>
       <p className="col-span-6 text-ink-2">
-        None yet: the figures use the usual gauge of weight {weightCategory}, and say how unsure that is.
+        None yet: the figures use the usual gauge of weight {weightCategory}, and say how unsure
+        that is.
       </p>
       <div className="col-span-6">
         <Button onClick={begin}>Enter a swatch</Button>

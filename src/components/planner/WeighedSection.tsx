@@ -93,11 +93,15 @@ function PieceSelect({
   onChange: (item: PlanEvidence) => void;
 }) {
   const { reading } = item;
-  const counts = item.piece === 'motifs' ? [...new Set([...TOGETHER, item.count])].sort((a, b) => a - b) : TOGETHER;
+  const counts =
+    item.piece === 'motifs'
+      ? [...new Set([...TOGETHER, item.count])].sort((a, b) => a - b)
+      : TOGETHER;
   const value = item.piece === 'motifs' ? String(item.count) : item.piece;
   function choose(chosen: string) {
     if (chosen === 'swatch') onChange({ piece: 'swatch', reading });
-    else if (chosen !== 'counted') onChange({ piece: 'motifs', count: Number(chosen), motifIndex: 0, reading });
+    else if (chosen !== 'counted')
+      onChange({ piece: 'motifs', count: Number(chosen), motifIndex: 0, reading });
   }
   return (
     <Select
@@ -106,7 +110,9 @@ function PieceSelect({
       onChange={(event) => choose(event.target.value)}
       options={[
         ...(item.piece === 'counted' ? [{ value: 'counted', word: item.label }] : []),
-        ...(plan.swatch || item.piece === 'swatch' ? [{ value: 'swatch', word: 'the swatch' }] : []),
+        ...(plan.swatch || item.piece === 'swatch'
+          ? [{ value: 'swatch', word: 'the swatch' }]
+          : []),
         ...counts.map((count) => ({
           value: String(count),
           word: count === 1 ? '1 motif' : `${count} motifs`,
@@ -135,13 +141,18 @@ function ReadingFields({
           maxM={PLAN_LIMITS.pieceLengthM}
           valueM={reading.lengthM}
           onChange={(value) =>
-            set({ ...item, reading: { ...reading, lengthM: value, errorM: lengthM(0.01 * value) } }, 'unravelled')
+            set(
+              { ...item, reading: { ...reading, lengthM: value, errorM: lengthM(0.01 * value) } },
+              'unravelled',
+            )
           }
         />
       </div>
     );
   }
-  const resolutions = [...new Set<number>([...RESOLUTIONS, reading.resolutionG])].sort((a, b) => a - b);
+  const resolutions = [...new Set<number>([...RESOLUTIONS, reading.resolutionG])].sort(
+    (a, b) => a - b,
+  );
   return (
     <>
       <div className="col-span-2">
@@ -163,7 +174,10 @@ function ReadingFields({
           label="Scale reads"
           value={String(reading.resolutionG)}
           onChange={(event) =>
-            set({ ...item, reading: { ...reading, resolutionG: massG(Number(event.target.value)) } })
+            set({
+              ...item,
+              reading: { ...reading, resolutionG: massG(Number(event.target.value)) },
+            })
           }
           options={resolutions.map((resolution) => ({
             value: String(resolution),

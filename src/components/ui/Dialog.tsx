@@ -17,8 +17,8 @@ interface DialogProps {
 
 const centred =
   'max-h-[85dvh] w-[min(32rem,calc(100vw-2rem))] top-1/2 left-1/2 -translate-x-1/2 -translate-y-1/2 rounded-control border';
-const sideways =
-  'inset-y-0 right-0 w-full sm:w-[min(34rem,90vw)] sm:border-s pb-[env(safe-area-inset-bottom)]';
+const sideways = 'inset-y-0 right-0 w-full sm:border-s pb-[env(safe-area-inset-bottom)]';
+const sheetWidth = { usual: 'sm:w-[min(34rem,90vw)]', wide: 'sm:w-[min(72rem,94vw)]' } as const;
 
 /** A question in the middle of the page. */
 export function Dialog(props: DialogProps) {
@@ -26,8 +26,8 @@ export function Dialog(props: DialogProps) {
 }
 
 /** A long thing beside the page: full height, and the whole screen on a phone. */
-export function Sheet(props: DialogProps) {
-  return <Panel {...props} place={sideways} />;
+export function Sheet({ wide, ...props }: DialogProps & { wide?: boolean }) {
+  return <Panel {...props} place={classNames(sideways, sheetWidth[wide ? 'wide' : 'usual'])} />;
 }
 
 function Panel(props: DialogProps & { place: string }) {

@@ -1,0 +1,67 @@
+import { READY_JOINS } from '../../lib/joins/readyJoins';
+import type { Plan } from '../../lib/plan/plan';
+import type { Units } from '../../lib/units/display';
+import { Select } from '../ui/Select';
+import { useUnits } from '../ui/useUnits';
+import CompareJoins from './CompareJoins';
+
+interface JoinsPageProps {
+  plan: Plan;
+  units: Units;
+  /** Id of the blanket compared on; null is the example. */
+  chosen: string | null;
+  blankets: readonly { id: string; title: string }[];
+}
+
+/** The joins side by side on one blanket, then each in words. */
+export default function JoinsPage({ plan, units: initial, chosen, blankets }: JoinsPageProps) {
+  const units = useUnits(initial);
+  return (
+    <div className="grid gap-8 pb-10">
+      <header className="flex flex-wrap items-end justify-between gap-4">
+        <div>
+          <h1>Joins</h1>
+          <p className="mt-1 max-w-2xl text-ink-2">
+            The same motifs, grid and border; only the join differs. Yarn and time are at the
+            tension of the blanket chosen.
+          </p>
+        </div>
+        <Select
+          className="w-72"
+          label="Compared on"
+          value={chosen ?? ''}
+          onChange={({ target: { value } }) =>
+            window.location.assign(value === '' ? '/joins' : `/joins?blanket=${value}`)
+          }
+          options={[
+            { value: '', word: 'the example blanket' },
+            ...blankets.map(({ id, title }) => ({ value: id, word: title })),
+          ]}
+        />
+      </header>
+      <CompareJoins plan={plan} units={units} />
+      <section>
+        <h2>Each join in words</h2>
+        <dl className="mt-3 grid gap-x-10 gap-y-5 md:grid-cols-2">
+          {READY_JOINS.map((join) => (
+            <div key={join.key} className="border-t border-line pt-3">
+              <dt className="font-bold">{join.name}</dt>
+              <dd className="mt-1">{join.description}</dd>
+              <dd className="mt-1 text-sm text-ink-2">{needsInWords(join.fit)}</dd>
+              {join.cautions.map((caution) => (
+                <dd key={caution} className="mt-1 text-sm text-ink-2">
+                  {caution}
+                </dd>
+              ))}
+            </div>
+          ))}
+        </dl>
+      </section>
+    </div>
+  );
+}
+
+function needsInWords({ multipleOf, plus }: { multipleOf: number; plus: number }): string {
+  if (multipleOf === 1) return 'Fits a side of any number of stitches.';
+  return `Needs a multiple of ${multipleOf} and ${plus} between corner centres.`;
+}

@@ -1,0 +1,82 @@
+import { useId } from 'react';
+import { Bar, BarChart, ResponsiveContainer, XAxis, YAxis } from 'recharts';
+import { PARTS, type Estimate } from '../../lib/ledger/ledger';
+import type { Plan } from '../../lib/plan/plan';
+import { showYarn, YARN_UNIT, type Units } from '../../lib/units/display';
+import { StrandPattern } from '../ui/StrandPattern';
+import { PART_WORDS } from './words';
+
+interface PartsChartProps {
+  plan: Plan;
+  estimate: Estimate;
+  units: Units;
+}
+
+/** Yarn by part, each bar laid of the colours' own strands, with the same figures as a list beneath. */
+export default function PartsChart({ plan, estimate, units }: PartsChartProps) {
+  const id = useId();
+  const rows = PARTS.map((part) => {
+    const ofPart = estimate.parts.filter((each) => each.part === part);
+    return {
+      part: PART_WORDS[part],
+      totalM: ofPart.reduce((sum, { lengthM }) => sum + lengthM, 0),
+      ...Object.fromEntries(
+        ofPart.map(({ colour, lengthM }) => [colour, lengthM / YARN_UNIT[units].m]),
+      ),
+    };
+  });
+  return (
+    <figure>
+      <div aria-hidden className="keeps-colour h-44">
+        <ResponsiveContainer>
+          <BarChart
+            data={rows}
+            layout="vertical"
+            margin={{ left: 0, right: 8, top: 4, bottom: 0 }}
+            barCategoryGap={8}
+          >
+            <defs>
+              {plan.colours.map(({ key, hex }) => (
+                <StrandPattern
+                  key={key}
+                  id={`${id}${key}`}
+                  colour={hex}
+                  weight={plan.yarn.weightCategory}
+                />
+              ))}
+            </defs>
+            <XAxis type="number" hide />
+            <YAxis
+              type="category"
+              dataKey="part"
+              width={92}
+              tickLine={false}
+              axisLine={false}
+              tick={{ fill: 'var(--color-ink)', fontSize: 13 }}
+            />
+            {plan.colours.map(({ key }) => (
+              <Bar
+                key={key}
+                dataKey={key}
+                stackId="yarn"
+                fill={`url(#${id}${key})`}
+                stroke="var(--color-edge)"
+                isAnimationActive={false}
+              />
+            ))}
+          </BarChart>
+        </ResponsiveContainer>
+      </div>
+      <figcaption>
+        <dl className="grid grid-cols-[1fr_auto] gap-x-4 text-sm">
+          {rows.map(({ part, totalM }) => (
+            <div key={part} className="contents">
+              <dt className="text-ink-2">{part}</dt>
+              <dd className="figures text-end">{showYarn(totalM, units)}</dd>
+            </div>
+          ))}
+        </dl>
+      </figcaption>
+    </figure>
+  );
+}

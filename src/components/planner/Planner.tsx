@@ -1,0 +1,181 @@
+import { Redo2, Undo2 } from 'lucide-react';
+import { lazy, Suspense, useMemo, useState, type ReactNode } from 'react';
+import { estimate as estimateOf } from '../../lib/ledger/estimate';
+import type { Plan } from '../../lib/plan/plan';
+import { showFabric, showSize, type Units } from '../../lib/units/display';
+import { BlanketPicture } from '../blanket/BlanketPicture';
+import { AnswerBar } from '../ui/AnswerBar';
+import { Button } from '../ui/Button';
+import { useTerms, useUnits } from '../ui/useUnits';
+import { Answer, skeinWord, sureWord } from './Answer';
+import { BlanketSection } from './BlanketSection';
+import { ChancePanel } from './ChancePanel';
+import { ColourRows } from './ColourRows';
+import { ColourSheet } from './ColourSheet';
+import { DoubtPanel } from './DoubtPanel';
+import { MotifSection } from './MotifSection';
+import { NextPanel } from './NextPanel';
+import { PartsPanel } from './PartsPanel';
+import { PlanNotices } from './PlanNotices';
+import type { Terms } from './stitchWord';
+import { SwatchSection } from './SwatchSection';
+import type { PlanEditing } from './usePlan';
+import { WeighedSection } from './WeighedSection';
+import { YarnSection } from './YarnSection';
+
+const LedgerSheet = lazy(() => import('./LedgerSheet'));
+const CompareSheet = lazy(() => import('./CompareSheet'));
+const ShoppingSheet = lazy(() => import('./ShoppingSheet'));
+
+export interface PlannerPreferences {
+  units: Units;
+  terms: Terms;
+  currency: string;
+}
+
+interface PlannerProps {
+  editing: PlanEditing;
+  preferences: PlannerPreferences;
+  /** Above the inputs: a title, or the name and the state of a saved blanket. */
+  heading: ReactNode;
+  /** Beside undo and redo: how the plan is kept. */
+  keeping?: ReactNode;
+  /** Where the shopping list of a saved blanket is; without it the list opens here. */
+  shoppingHref?: string;
+}
+
+type OpenSheet = 'none' | 'colours' | 'ledger' | 'compare' | 'shopping';
+
+/** The estimator: inputs left, the answer and the picture right; everything recomputed at each change. */
+export function Planner({ editing, preferences, heading, keeping, shoppingHref }: PlannerProps) {
+  const { plan, change } = editing;
+  const units = useUnits(preferences.units);
+  const terms = useTerms(preferences.terms);
+  const estimate = useMemo(() => estimateOf(plan), [plan]);
+  const [sheet, setSheet] = useState<OpenSheet>('none');
+  const [ledgerColour, setLedgerColour] = useState('all');
+  const [picked, setPicked] = useState<string | null>(null);
+  const chosen = picked ?? hungriest(plan, estimate.colours);
+  const close = () => setSheet('none');
+  const openLedger = (colour: string) => {
+    setLedgerColour(colour);
+    setSheet('ledger');
+  };
+  const shared = { plan, estimate, units, change };
+
+  return (
+    <>
+      <div className="lg:grid lg:grid-cols-[minmax(22rem,25rem)_1fr]">
+        <form
+          className="grid content-start gap-5 px-4 pt-6 pb-8 lg:border-e lg:border-line lg:px-8"
+          onSubmit={(event) => event.preventDefault()}
+          aria-label="The plan"
+        >
+          {heading}
+          <HistoryBar editing={editing} keeping={keeping} />
+          <YarnSection {...shared} currency={preferences.currency} />
+          <SwatchSection {...shared} terms={terms} />
+          <WeighedSection {...shared} />
+          <MotifSection {...shared} onColours={() => setSheet('colours')} />
+          <BlanketSection {...shared} terms={terms} />
+        </form>
+        <div className="grid content-start gap-8 px-4 pt-6 pb-10 lg:px-9" data-answer>
+          <Answer {...shared} />
+          <ColourRows {...shared} chosen={chosen} onChoose={setPicked} onLedger={openLedger} />
+          <div className="grid gap-8 xl:grid-cols-[minmax(0,1.35fr)_minmax(17rem,1fr)]">
+            <FinishedSize {...shared} />
+            <div className="grid content-start gap-7">
+              <ChancePanel {...shared} chosen={chosen} />
+              <NextPanel {...shared} />
+              <DoubtPanel {...shared} />
+              <PartsPanel {...shared} />
+            </div>
+          </div>
+          <div className="flex flex-wrap gap-3">
+            <ShoppingButton href={shoppingHref} onOpen={() => setSheet('shopping')} />
+            <Button onClick={() => setSheet('compare')}>Compare joins</Button>
+            <Button onClick={() => openLedger('all')}>Open the ledger</Button>
+          </div>
+          <PlanNotices notices={estimate.notices} />
+        </div>
+      </div>
+      <AnswerBar
+        answer={skeinWord(estimate.totals.skeins)}
+        detail={`${sureWord(plan.confidence)} sure · ${showSize(estimate.size.widthMm, estimate.size.heightMm, units)}`}
+        action={<ShoppingButton href={shoppingHref} onOpen={() => setSheet('shopping')} />}
+      />
+      <ColourSheet open={sheet === 'colours'} onOpenChange={close} {...{ plan, change }} />
+      <Suspense>
+        {sheet === 'ledger' && (
+          <LedgerSheet
+            {...shared}
+            terms={terms}
+            colour={ledgerColour}
+            onColour={setLedgerColour}
+            onClose={close}
+          />
+        )}
+        {sheet === 'compare' && <CompareSheet {...shared} onClose={close} />}
+        {sheet === 'shopping' && <ShoppingSheet {...shared} onClose={close} />}
+      </Suspense>
+    </>
+  );
+}
+
+/** The colour that takes the most yarn: the first one worth looking at. */
+function hungriest(plan: Plan, colours: readonly { colour: string; meanM: number }[]): string {
+  const [first] = colours.toSorted((left, right) => right.meanM - left.meanM);
+  return first?.colour ?? plan.colours[0]?.key ?? '';
+}
+
+function HistoryBar({ editing, keeping }: { editing: PlanEditing; keeping?: ReactNode }) {
+  const { undo, redo, canUndo, canRedo } = editing;
+  return (
+    <div className="-ms-2 flex flex-wrap items-center gap-1" data-chrome>
+      <Button kind="quiet" small icon={Undo2} onClick={undo} disabled={!canUndo} title="Ctrl+Z">
+        Undo
+      </Button>
+      <Button
+        kind="quiet"
+        small
+        icon={Redo2}
+        onClick={redo}
+        disabled={!canRedo}
+        title="Ctrl+Shift+Z"
+      >
+        Redo
+      </Button>
+      <span className="ms-auto">{keeping}</span>
+    </div>
+  );
+}
+
+function ShoppingButton({ href, onOpen }: { href?: string; onOpen: () => void }) {
+  if (!href) {
+    return (
+      <Button kind="primary" onClick={onOpen}>
+        Shopping list
+      </Button>
+    );
+  }
+  return (
+    <a className="btn btn-primary" href={href}>
+      Shopping list
+    </a>
+  );
+}
+
+function FinishedSize({ plan, estimate, units }: Parameters<typeof BlanketPicture>[0]) {
+  const { size, rows, columns } = estimate;
+  return (
+    <div className="min-w-0">
+      <BlanketPicture {...{ plan, estimate, units }} maxHeightPx={560} />
+      <p className="mt-2">
+        <b className="text-lg">{showSize(size.widthMm, size.heightMm, units)}</b> finished,{' '}
+        {columns} × {rows} motifs, joins and border included. Give or take{' '}
+        {showFabric(1.96 * size.widthSdMm, units)} by {showFabric(1.96 * size.heightSdMm, units)}
+        {plan.motifSideMm === null && ': measure a finished motif to narrow that'}.
+      </p>
+    </div>
+  );
+}

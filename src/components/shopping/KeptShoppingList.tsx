@@ -1,0 +1,94 @@
+import { useMutation } from '@tanstack/react-query';
+import { Printer } from 'lucide-react';
+import { useState } from 'react';
+import { ApiError } from '../../client/api';
+import { tickLines } from '../../client/queries/shopping';
+import { showPrice, showYarn, type Units } from '../../lib/units/display';
+import {
+  keptShoppingListSchema,
+  type KeptShoppingList as KeptList,
+} from '../../schemas/shoppingList';
+import { WithQueries } from '../islands/WithQueries';
+import { Button, ButtonLink } from '../ui/Button';
+import { Checkbox } from '../ui/Checkbox';
+import { Notice } from '../ui/Notice';
+import { useUnits } from '../ui/useUnits';
+
+interface KeptShoppingListProps {
+  initial: KeptList;
+  units: Units;
+}
+
+/** A shopping list as it was kept, to tick off in the shop. */
+export default function KeptShoppingList(props: KeptShoppingListProps) {
+  return (
+    <WithQueries>
+      <TickList {...props} />
+    </WithQueries>
+  );
+}
+
+function TickList({ initial, units: shown }: KeptShoppingListProps) {
+  const units = useUnits(shown);
+  const [list, setList] = useState(initial);
+  const tick = useMutation({
+    mutationFn: (bought: readonly string[]) => tickLines(list, bought),
+    onSuccess: setList,
+    onError: (error) => {
+      // Ticked on another device meanwhile: show that list, to be ticked again.
+      const current = error instanceof ApiError && keptShoppingListSchema.safeParse(error.current);
+      if (current && current.success) setList(current.data);
+    },
+  });
+  const toBuy = list.lines.filter(({ toBuySkeins }) => toBuySkeins > 0);
+  const bought = toBuy.filter((line) => line.bought).map(({ colour }) => colour);
+  const toggle = (colour: string) =>
+    tick.mutate(
+      bought.includes(colour) ? bought.filter((each) => each !== colour) : [...bought, colour],
+    );
+  return (
+    <div className="grid max-w-xl gap-6 pb-10">
+      <header>
+        <h1>{list.title}</h1>
+        <p className="mt-1 text-ink-2" role="status">
+          {bought.length} of {toBuy.length} colours bought, {list.toBuySkeins} skeins of{' '}
+          {list.yarnName} in all.
+        </p>
+      </header>
+      {tick.error && (
+        <Notice kind="problem" live>
+          {tick.error.message}
+        </Notice>
+      )}
+      {toBuy.length === 0 && <p>Nothing to buy: the stash covers this blanket.</p>}
+      <ul>
+        {toBuy.map((line) => (
+          <li key={line.colour} className="flex items-center gap-4 border-t border-line py-2">
+            <Checkbox
+              checked={line.bought}
+              disabled={tick.isPending}
+              onChange={() => toggle(line.colour)}
+              label={`${line.name}: ${line.toBuySkeins} ${line.toBuySkeins === 1 ? 'skein' : 'skeins'}`}
+            />
+            <span className="figures ms-auto text-sm text-ink-2">
+              {showYarn(line.neededM, units)}
+              {line.costMinor !== null &&
+                list.currency &&
+                `, ${showPrice(line.costMinor, list.currency)}`}
+            </span>
+          </li>
+        ))}
+      </ul>
+      <div className="flex flex-wrap gap-3" data-chrome>
+        <Button icon={Printer} onClick={() => window.print()}>
+          Print
+        </Button>
+        {list.blanketId && (
+          <ButtonLink href={`/blankets/${list.blanketId}/shopping-list`}>
+            The list as it is now
+          </ButtonLink>
+        )}
+      </div>
+    </div>
+  );
+}

@@ -1,0 +1,20 @@
+import Papa from 'papaparse';
+
+/** Text that begins so would run as a formula in a spreadsheet (OWASP ASVS 5, 1.2.10). */
+// eslint-disable-next-line no-control-regex -- NUL and control characters are what it looks for
+const FORMULA_START = /^[=+\-@\t\r\0]/;
+
+/** A cell: numbers stay numbers, so that a negative one is not taken for a formula. */
+export type CsvCell = string | number | null;
+
+/**
+ * Records as CSV after RFC 4180: CRLF between records, quotes where they are needed, one header
+ * line. Text that a spreadsheet would run is preceded by a single quote.
+ *
+ * Example: `toCsv(['colour', 'm'], [['=x', -1]])` is `colour,m` and `"'=x",-1`, with CRLF between.
+ */
+export const toCsv = (header: readonly string[], rows: readonly (readonly CsvCell[])[]): string =>
+  Papa.unparse([[...header], ...rows.map((row) => [...row])], {
+    newline: '\r\n',
+    escapeFormulae: FORMULA_START,
+  });
