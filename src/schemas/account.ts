@@ -103,3 +103,8 @@ export type Registration = z.output<typeof registerSchema>;
 export type ProfileForm = z.input<typeof profileSchema>;
 export type Profile = z.output<typeof profileSchema>;
 export type Letter = z.output<typeof letterSchema>;
+
+/** How Auth.js answers a sign-in that asked not to be redirected. */
+export const signInAnswerSchema = z.object({ url: z.url() });
+/** Why a sign-in was refused; `failed` is anything but the person's own doing. */
+export type SignInRefusal = 'wrong' | 'unconfirmed' | 'too-many' | 'failed';

@@ -27,3 +27,6 @@ export function fieldErrors(error: z.ZodError): Record<string, string> {
 
 /** The response of a route that answers 204. */
 export const nothingSchema = z.void();
+
+/** A schema whose fields keep their types when parsed, as a form's must. */
+export type FormSchema<Values> = z.ZodType<Values, Values>;

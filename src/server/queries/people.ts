@@ -6,6 +6,7 @@ import {
   type Audit,
   type People,
   type PeopleQuery,
+  type Person,
 } from '../../schemas/people';
 import { presentAuditEntry, presentPerson } from '../presenters/people';
 
@@ -28,6 +29,12 @@ export async function listPeople({ search, page }: PeopleQuery): Promise<People>
   };
 }
 
+/** One person; null for an id that nobody has. */
+export async function findPerson(id: string): Promise<Person | null> {
+  const row = await User.findByPk(id, { include: 'roleRows' });
+  return row && presentPerson(row);
+}
+
 function searchCondition(search: string): WhereOptions<User> {
   if (search === '') return {};
   // The characters that LIKE gives a meaning, taken as themselves.
@@ -35,10 +42,12 @@ function searchCondition(search: string): WhereOptions<User> {
   return { [Op.or]: [{ name: { [Op.iLike]: pattern } }, { email: { [Op.iLike]: pattern } }] };
 }
 
-/** One page of the changes made to accounts, newest first. */
-export async function listAudit(page: number): Promise<Audit> {
-  const totalCount = await AuditEntry.count();
+/** One page of the changes made to accounts, or to one, newest first. */
+export async function listAudit(page: number, subjectId?: string): Promise<Audit> {
+  const where = subjectId === undefined ? {} : { subjectId };
+  const totalCount = await AuditEntry.count({ where });
   const rows = await AuditEntry.findAll({
+    where,
     order: [
       ['createdAt', 'DESC'],
       ['id', 'ASC'],
