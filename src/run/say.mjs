@@ -12,9 +12,16 @@ export async function runMain(main) {
   try {
     process.exitCode = (await main()) ?? process.exitCode ?? 0;
   } catch (error) {
-    process.stderr.write(
-      error instanceof RunError ? `\n${error.message}\n` : `${error?.stack ?? error}\n`,
-    );
+    process.stderr.write(`\n${explain(error)}\n`);
     process.exitCode = 1;
   }
+}
+
+/** @param {any} error */
+function explain(error) {
+  if (error instanceof RunError) return error.message;
+  if (error?.code === 'EACCES') {
+    return `${error.message}\nRun this as the owner of that path, or remove .ellwise to begin afresh.`;
+  }
+  return error?.stack ?? String(error);
 }
