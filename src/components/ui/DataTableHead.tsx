@@ -46,7 +46,7 @@ function HeadCell<Row>({ header }: { header: Header<Row, unknown> }) {
           )}
         >
           {word}
-          <Icon size={13} aria-hidden className="shrink-0" />
+          <Icon size={13} aria-hidden className="shrink-0 print:hidden" />
         </button>
       ) : (
         word

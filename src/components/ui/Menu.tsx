@@ -26,7 +26,7 @@ interface MenuProps {
 /** A button that opens a list of acts. */
 export function Menu({ word, icon, kind, small, items }: MenuProps) {
   return (
-    <DropdownMenu.Root>
+    <DropdownMenu.Root modal={false}>
       <DropdownMenu.Trigger asChild>
         <Button kind={kind} small={small} icon={icon}>
           {word}

@@ -13,7 +13,7 @@ export function Skeleton({ label, lines = 3 }: SkeletonProps) {
         <div
           key={index}
           aria-hidden
-          className="h-4 animate-pulse rounded-fine bg-line"
+          className="h-4 animate-pulse rounded-fine bg-line forced-colors:border"
           style={{ width: `${92 - ((index * 23) % 41)}%` }}
         />
       ))}

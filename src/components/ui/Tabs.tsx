@@ -40,8 +40,8 @@ export function Tabs<Key extends string>({
             key={key}
             value={key}
             className={classNames(
-              'min-h-10 shrink-0 border-b-3 border-transparent pt-0.5 text-ink-2 hover:text-ink coarse:min-h-11',
-              'data-[state=active]:border-teal data-[state=active]:font-bold data-[state=active]:text-ink',
+              'min-h-10 shrink-0 text-ink-2 hover:text-ink coarse:min-h-11',
+              'data-[state=active]:border-b-3 data-[state=active]:border-teal data-[state=active]:pt-[3px] data-[state=active]:font-bold data-[state=active]:text-ink',
               'focus-visible:-outline-offset-2',
             )}
           >
