@@ -1,3 +1,4 @@
+import { DomainError } from '../errors';
 import { dot } from '../stats/linear';
 import {
   posterior,
@@ -71,7 +72,7 @@ export function learnHand(
 /** Expected yarn per loop of one stitch, in mm. */
 export function loopLengthMm(hand: Hand, code: StitchCode): number {
   const [common = NaN] = hand.belief.mean;
-  return common + (hand.belief.mean[1 + hand.stitches.indexOf(code)] ?? NaN);
+  return common + (hand.belief.mean[1 + placeOf(hand.stitches, code)] ?? NaN);
 }
 
 /** Expected yarn per length of sewn seam. */
@@ -114,6 +115,17 @@ export const handCovarianceM2 = (hand: Hand, left: YarnUse, right: YarnUse): num
 
 /** Metres of yarn per mm of loop, for each unknown; per unit of the sewing factor for the last. */
 function rowOf(stitches: readonly StitchCode[], { loops, seamM }: YarnUse): number[] {
-  const perStitch = stitches.map((code) => (loops.get(code) ?? 0) / 1000);
+  const perStitch = stitches.map(() => 0);
+  for (const [code, count] of loops) perStitch[placeOf(stitches, code)] = count / 1000;
   return [perStitch.reduce((sum, value) => sum + value, 0), ...perStitch, seamM];
+}
+
+function placeOf(stitches: readonly StitchCode[], code: StitchCode): number {
+  const place = stitches.indexOf(code);
+  if (place < 0)
+    throw new DomainError(
+      'stitch-not-in-hand',
+      `A hand of ${stitches.join(', ')} knows no "${code}"`,
+    );
+  return place;
 }

@@ -6,7 +6,7 @@ import { probabilityShort, quantileM, SKEIN_SPREAD, skeinsFor } from '../skeins/
 import { normalQuantile } from '../stats/normal';
 import { blanketOf, type Blanket } from './blanketOf';
 import { colourLedger, useOfGroup, type ColourLedger } from './colourLedger';
-import { evidenceOf } from './evidenceOf';
+import { evidenceOf, swatchUse } from './evidenceOf';
 import { PARTS, type ColourEstimate, type Estimate, type LedgerLine } from './ledger';
 import { nextMeasurements } from './nextMeasurements';
 import { noticesOf } from './notices';
@@ -58,10 +58,11 @@ export function estimate(plan: Plan): Estimate {
   };
 }
 
-/** The hand learnt from the plan's evidence, for every stitch of the blanket and of the evidence. */
+/** The hand learnt from the plan's evidence, for every stitch of the blanket, the evidence and the swatch. */
 function handOf({ plan, gauge }: Blanket, groups: readonly PieceGroup[]): Hand {
   const evidence = evidenceOf(plan);
-  const uses = [...groups.map(useOfGroup), ...evidence.map(({ use }) => use)];
+  const swatch = swatchUse(plan) ?? NO_YARN;
+  const uses = [...groups.map(useOfGroup), ...evidence.map(({ use }) => use), swatch];
   const stitches = [...new Set(uses.flatMap(({ loops }) => [...loops.keys()]))].sort();
   return learnHand(gauge.stitchWidthMm, stitches, evidence);
 }

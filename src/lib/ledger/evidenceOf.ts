@@ -26,13 +26,14 @@ export function evidenceOf(plan: Plan): Evidence[] {
 
 /** Yarn use of a measured piece, or null where the plan has no such piece (a swatch not yet made). */
 export function useOfPiece(plan: Plan, item: PlanEvidence): YarnUse | null {
-  if (item.piece === 'swatch') {
-    const { swatch } = plan;
-    return swatch && trimmed(swatchCounts(swatch.stitch, swatch.stitches, swatch.rows), 2);
-  }
+  if (item.piece === 'swatch') return swatchUse(plan);
   if (item.piece === 'counted') return trimmed(item.made, item.tails);
   return motifUse(plan, item.motifIndex, item.count);
 }
+
+/** Yarn use of the plan's swatch, or null before there is one. */
+export const swatchUse = ({ swatch }: Plan): YarnUse | null =>
+  swatch && trimmed(swatchCounts(swatch.stitch, swatch.stitches, swatch.rows), 2);
 
 /** Yarn use of `count` finished motifs, in the first colourway that uses the motif, or null. */
 export function motifUse(plan: Plan, motifIndex: number, count: number): YarnUse | null {

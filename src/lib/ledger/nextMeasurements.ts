@@ -6,7 +6,7 @@ import { normalQuantile } from '../stats/normal';
 import type { Plan, PlanEvidence, YarnReading } from '../plan/plan';
 import { lengthM, massG, QUANTITY_LIMITS } from '../units/quantities';
 import type { ColourLedger } from './colourLedger';
-import { evidenceOf, motifUse, useOfPiece } from './evidenceOf';
+import { evidenceOf, motifUse, swatchUse } from './evidenceOf';
 import type { NextMeasurement } from './ledger';
 
 /** Motifs that could be weighed together. */
@@ -78,16 +78,15 @@ function candidates(plan: Plan, hand: Hand): Candidate[] {
 }
 
 function swatchCandidates(plan: Plan, hand: Hand, resolutionG: number): Candidate[] {
-  if (!plan.swatch || plan.evidence.some(({ piece }) => piece === 'swatch')) return [];
-  const unravelled = { by: 'unravelling', lengthM: lengthM(0), errorM: lengthM(0) } as const;
-  const use = useOfPiece(plan, { piece: 'swatch', reading: unravelled });
-  if (!use) return [];
+  const use = swatchUse(plan);
+  if (!use || plan.evidence.some(({ piece }) => piece === 'swatch')) return [];
   const aboutM = expectedM(hand, use);
   // A hand learnt from readings that contradict its gauge can expect less than nothing.
   const errorM = lengthM(Math.min(Math.max(0, UNRAVELLED_ERROR * aboutM), QUANTITY_LIMITS.lengthM));
+  const unravelled = { by: 'unravelling', lengthM: lengthM(0), errorM } as const;
   return [
     candidate(plan, hand, 'weigh the swatch', use, 0, weighed(resolutionG)),
-    candidate(plan, hand, 'unravel the swatch', use, 0, { ...unravelled, errorM }),
+    candidate(plan, hand, 'unravel the swatch', use, 0, unravelled),
   ];
 }
 
