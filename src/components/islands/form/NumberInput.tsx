@@ -1,10 +1,5 @@
 import { useState } from 'react';
-import {
-  useController,
-  type Control,
-  type FieldPath,
-  type FieldValues,
-} from 'react-hook-form';
+import { useController, type Control, type FieldPath, type FieldValues } from 'react-hook-form';
 import { NumberField } from '../../ui/NumberField';
 import type { NumberLimits } from '../../ui/readNumber';
 
@@ -42,7 +37,9 @@ export function NumberInput<Values extends FieldValues>(props: NumberInputProps<
       name={name}
       // Empty is refused by the form's schema, in the words of its field.
       optional
-      value={value === null ? null : Number((value / factor).toPrecision(factor === 1 ? 12 : DIGITS))}
+      value={
+        value === null ? null : Number((value / factor).toPrecision(factor === 1 ? 12 : DIGITS))
+      }
       error={isUnreadable ? undefined : fieldState.error?.message}
       onCommit={(reading) => {
         const next = reading.ok ? reading.value && reading.value * factor : NaN;
