@@ -36,13 +36,13 @@ export class Blanket extends Model<InferAttributes<Blanket>, InferCreationAttrib
 export function init(sequelize: Sequelize): void {
   Blanket.init(
     {
-      id: idColumn,
-      ownerId: uuidColumn,
-      title: textColumn,
-      plan: jsonColumn,
-      schemaVersion: countedColumn,
+      id: idColumn(),
+      ownerId: uuidColumn(),
+      title: textColumn(),
+      plan: jsonColumn(),
+      schemaVersion: countedColumn(),
       deletedAt: DataTypes.DATE,
-      ...editedColumns,
+      ...editedColumns(),
     },
     { sequelize, tableName: 'blankets', underscored: true },
   );

@@ -23,7 +23,7 @@ export function init(sequelize: Sequelize): void {
     {
       blanketId: { type: DataTypes.UUID, primaryKey: true },
       colourKey: { type: DataTypes.TEXT, primaryKey: true },
-      ownerId: uuidColumn,
+      ownerId: uuidColumn(),
       colourwayId: DataTypes.UUID,
     },
     { sequelize, tableName: 'blanket_colour_links', underscored: true, timestamps: false },

@@ -26,9 +26,9 @@ export function init(sequelize: Sequelize): void {
     {
       blanketId: { type: DataTypes.UUID, primaryKey: true },
       version: { type: DataTypes.INTEGER, primaryKey: true },
-      title: textColumn,
-      plan: jsonColumn,
-      schemaVersion: countedColumn,
+      title: textColumn(),
+      plan: jsonColumn(),
+      schemaVersion: countedColumn(),
       savedAt: { type: DataTypes.DATE, allowNull: false },
     },
     { sequelize, tableName: 'blanket_revisions', underscored: true, timestamps: false },

@@ -30,12 +30,12 @@ export class Colourway extends Model<
 export function init(sequelize: Sequelize): void {
   Colourway.init(
     {
-      id: idColumn,
-      ownerId: uuidColumn,
-      yarnId: uuidColumn,
-      name: textColumn,
-      hex: textColumn,
-      ...editedColumns,
+      id: idColumn(),
+      ownerId: uuidColumn(),
+      yarnId: uuidColumn(),
+      name: textColumn(),
+      hex: textColumn(),
+      ...editedColumns(),
     },
     { sequelize, tableName: 'colourways', underscored: true },
   );

@@ -32,15 +32,15 @@ export class DyeLot extends Model<InferAttributes<DyeLot>, InferCreationAttribut
 export function init(sequelize: Sequelize): void {
   DyeLot.init(
     {
-      id: idColumn,
-      ownerId: uuidColumn,
-      colourwayId: uuidColumn,
-      lotCode: textColumn,
-      location: textColumn,
+      id: idColumn(),
+      ownerId: uuidColumn(),
+      colourwayId: uuidColumn(),
+      lotCode: textColumn(),
+      location: textColumn(),
       pricePaidMinor: DataTypes.INTEGER,
       currency: DataTypes.TEXT,
-      wholeSkeins: countedColumn,
-      ...editedColumns,
+      wholeSkeins: countedColumn(),
+      ...editedColumns(),
     },
     { sequelize, tableName: 'dye_lots', underscored: true },
   );

@@ -31,13 +31,13 @@ export class MotifRow extends Model<InferAttributes<MotifRow>, InferCreationAttr
 export function init(sequelize: Sequelize): void {
   MotifRow.init(
     {
-      id: idColumn,
-      ownerId: uuidColumn,
-      name: textColumn,
-      sides: countedColumn,
-      ring: jsonColumn,
-      rounds: jsonColumn,
-      ...editedColumns,
+      id: idColumn(),
+      ownerId: uuidColumn(),
+      name: textColumn(),
+      sides: countedColumn(),
+      ring: jsonColumn(),
+      rounds: jsonColumn(),
+      ...editedColumns(),
     },
     { sequelize, tableName: 'motifs', underscored: true },
   );

@@ -20,7 +20,7 @@ export class PartSkein extends Model<
 
 export function init(sequelize: Sequelize): void {
   PartSkein.init(
-    { id: idColumn, dyeLotId: uuidColumn, position: countedColumn, massG: measuredColumn },
+    { id: idColumn(), dyeLotId: uuidColumn(), position: countedColumn(), massG: measuredColumn() },
     { sequelize, tableName: 'part_skeins', underscored: true, timestamps: false },
   );
 }

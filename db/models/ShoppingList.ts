@@ -39,16 +39,16 @@ export class ShoppingList extends Model<
 export function init(sequelize: Sequelize): void {
   ShoppingList.init(
     {
-      id: idColumn,
-      ownerId: uuidColumn,
+      id: idColumn(),
+      ownerId: uuidColumn(),
       blanketId: DataTypes.UUID,
-      title: textColumn,
-      yarnName: textColumn,
+      title: textColumn(),
+      yarnName: textColumn(),
       currency: DataTypes.TEXT,
-      confidence: measuredColumn,
-      lines: jsonColumn,
-      bought: jsonColumn,
-      ...editedColumns,
+      confidence: measuredColumn(),
+      lines: jsonColumn(),
+      bought: jsonColumn(),
+      ...editedColumns(),
     },
     { sequelize, tableName: 'shopping_lists', underscored: true },
   );

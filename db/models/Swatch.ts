@@ -32,16 +32,16 @@ export class Swatch extends Model<InferAttributes<Swatch>, InferCreationAttribut
 export function init(sequelize: Sequelize): void {
   Swatch.init(
     {
-      id: idColumn,
-      ownerId: uuidColumn,
+      id: idColumn(),
+      ownerId: uuidColumn(),
       yarnId: DataTypes.UUID,
-      name: textColumn,
-      stitch: textColumn,
-      stitches: countedColumn,
-      rows: countedColumn,
+      name: textColumn(),
+      stitch: textColumn(),
+      stitches: countedColumn(),
+      rows: countedColumn(),
       hookMm: DataTypes.DOUBLE,
-      notes: textColumn,
-      ...editedColumns,
+      notes: textColumn(),
+      ...editedColumns(),
     },
     { sequelize, tableName: 'swatches', underscored: true },
   );

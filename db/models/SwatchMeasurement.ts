@@ -31,11 +31,11 @@ export class SwatchMeasurement extends Model<
 export function init(sequelize: Sequelize): void {
   SwatchMeasurement.init(
     {
-      id: idColumn,
-      swatchId: uuidColumn,
-      position: countedColumn,
+      id: idColumn(),
+      swatchId: uuidColumn(),
+      position: countedColumn(),
       measuredOn: { type: DataTypes.DATEONLY, allowNull: false },
-      kind: textColumn,
+      kind: textColumn(),
       widthMm: DataTypes.DOUBLE,
       heightMm: DataTypes.DOUBLE,
       blocked: DataTypes.BOOLEAN,

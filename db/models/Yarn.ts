@@ -38,17 +38,17 @@ export class Yarn extends Model<InferAttributes<Yarn>, InferCreationAttributes<Y
 export function init(sequelize: Sequelize): void {
   Yarn.init(
     {
-      id: idColumn,
-      ownerId: uuidColumn,
-      name: textColumn,
-      maker: textColumn,
-      fibre: textColumn,
-      weightCategory: countedColumn,
-      putUpMassG: measuredColumn,
-      putUpLengthM: measuredColumn,
+      id: idColumn(),
+      ownerId: uuidColumn(),
+      name: textColumn(),
+      maker: textColumn(),
+      fibre: textColumn(),
+      weightCategory: countedColumn(),
+      putUpMassG: measuredColumn(),
+      putUpLengthM: measuredColumn(),
       priceMinor: DataTypes.INTEGER,
       currency: DataTypes.TEXT,
-      ...editedColumns,
+      ...editedColumns(),
     },
     { sequelize, tableName: 'yarns', underscored: true },
   );

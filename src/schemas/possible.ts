@@ -4,12 +4,15 @@ interface Issues {
   addIssue(issue: { code: 'custom'; path: (string | number)[]; message: string }): void;
 }
 
+/** A number that is none or below zero has had its own message by then. */
+const isGiven = (value: number) => value > 0 && value < Infinity;
 const round = (value: number) => Number(value.toPrecision(3));
 
 /** A put-up must be of a yarn that could be spun. */
 export function checkPutUp(putUp: { massG: number; lengthM: number }, issues: Issues): void {
   const perGram = putUp.lengthM / putUp.massG;
   const { least, most } = POSSIBLE.metresPerGram;
+  if (!isGiven(perGram) || !isGiven(putUp.massG)) return;
   if (perGram >= least && perGram <= most) return;
   const message = `No yarn runs ${round(perGram)} m to the gram: check the length and the mass`;
   issues.addIssue({ code: 'custom', path: ['lengthM'], message });
@@ -24,7 +27,7 @@ export function checkStitchSize(
 ): void {
   const { least, most } = POSSIBLE.stitchSizeMm;
   const check = (field: string, what: string, eachMm: number, counted: string) => {
-    if (eachMm >= least && eachMm <= most) return;
+    if (!isGiven(eachMm) || (eachMm >= least && eachMm <= most)) return;
     const message = `${what} of ${round(eachMm)} mm cannot be: check the ${counted}`;
     issues.addIssue({ code: 'custom', path: [...path, field], message });
   };

@@ -1,0 +1,128 @@
+import { describe, expect, it } from 'vitest';
+import {
+  Blanket,
+  BlanketColourLink,
+  BlanketRevision,
+  Colourway,
+  DyeLot,
+  MotifRow,
+  PartSkein,
+  ShoppingList,
+  Swatch,
+  SwatchMeasurement,
+  Yarn,
+} from '../../../db/models';
+import { MOTIF_EXAMPLE, PLAN_EXAMPLE } from '../../../src/server/examples';
+
+const AT = new Date('2026-12-01T09:00:00Z');
+const EDITED = { version: 3, createdAt: AT, updatedAt: AT };
+const { name, sides, ring, rounds } = MOTIF_EXAMPLE;
+
+/** A value for every attribute of every model. */
+const VALUES = [
+  [
+    Yarn,
+    {
+      id: 'y',
+      ownerId: 'u',
+      name: 'Towpath DK',
+      maker: 'Ostler & Fenn',
+      fibre: 'wool',
+      weightCategory: 3,
+      putUpMassG: 100,
+      putUpLengthM: 240,
+      priceMinor: 720,
+      currency: 'EUR',
+      ...EDITED,
+    },
+  ],
+  [Colourway, { id: 'c', ownerId: 'u', yarnId: 'y', name: 'Lock Gate', hex: '#3b4a3f', ...EDITED }],
+  [
+    DyeLot,
+    {
+      id: 'd',
+      ownerId: 'u',
+      colourwayId: 'c',
+      lotCode: '2207',
+      location: 'basket',
+      pricePaidMinor: 700,
+      currency: 'EUR',
+      wholeSkeins: 2,
+      ...EDITED,
+    },
+  ],
+  [PartSkein, { id: 'p', dyeLotId: 'd', position: 0, massG: 41.5 }],
+  [
+    Swatch,
+    {
+      id: 's',
+      ownerId: 'u',
+      yarnId: 'y',
+      name: 'Sc',
+      stitch: 'sc',
+      stitches: 20,
+      rows: 24,
+      hookMm: 4.5,
+      notes: 'loose',
+      ...EDITED,
+    },
+  ],
+  [
+    SwatchMeasurement,
+    {
+      id: 'm',
+      swatchId: 's',
+      position: 0,
+      measuredOn: '2026-11-08',
+      kind: 'size',
+      widthMm: 140,
+      heightMm: 154,
+      blocked: false,
+      massG: 14,
+      resolutionG: 1,
+      lengthM: 33.5,
+      errorM: 0.3,
+    },
+  ],
+  [MotifRow, { id: 'm', ownerId: 'u', name, sides, ring, rounds, ...EDITED }],
+  [
+    Blanket,
+    {
+      id: 'b',
+      ownerId: 'u',
+      title: 'Eighty squares',
+      plan: PLAN_EXAMPLE,
+      schemaVersion: 1,
+      deletedAt: AT,
+      ...EDITED,
+    },
+  ],
+  [
+    BlanketRevision,
+    { blanketId: 'b', version: 1, title: 'T', plan: PLAN_EXAMPLE, schemaVersion: 1, savedAt: AT },
+  ],
+  [BlanketColourLink, { blanketId: 'b', colourKey: 'c1', ownerId: 'u', colourwayId: 'c' }],
+  [
+    ShoppingList,
+    {
+      id: 'l',
+      ownerId: 'u',
+      blanketId: 'b',
+      title: 'T',
+      yarnName: 'Towpath DK',
+      currency: 'EUR',
+      confidence: 0.95,
+      lines: [],
+      bought: ['c1'],
+      ...EDITED,
+    },
+  ],
+] as const;
+
+describe('models', () => {
+  it.each(VALUES)('%o lets every field be read that it was built with', (model, values) => {
+    const row = model.build(values as never) as unknown as Record<string, unknown>;
+    expect(Object.keys(model.getAttributes()).sort()).toEqual(Object.keys(values).sort());
+    for (const [field, value] of Object.entries(values)) expect(row[field]).toEqual(value);
+  });
+});
