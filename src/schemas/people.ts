@@ -7,6 +7,8 @@ export const AUDIT_ENTRIES_PER_PAGE = 50;
 const PAGE_MAX = 10_000;
 const SEARCH_MAX_LENGTH = 100;
 
+export const PEOPLE_SORTS = ['name', 'email', 'registered'] as const;
+
 /** Page numbers start at 1, and come from an address as text. */
 export const pageSchema = z
   .string()
@@ -21,6 +23,8 @@ export const peopleQuerySchema = z.object({
     .trim()
     .max(SEARCH_MAX_LENGTH, `Search for at most ${SEARCH_MAX_LENGTH} characters.`)
     .default(''),
+  sort: z.enum(PEOPLE_SORTS, { error: 'Sort by name, email or registered.' }).default('name'),
+  direction: z.enum(['up', 'down'], { error: 'A direction is up or down.' }).default('up'),
   page: pageSchema,
 });
 export type PeopleQuery = z.output<typeof peopleQuerySchema>;

@@ -10,14 +10,17 @@ import {
 } from '../../schemas/people';
 import { presentAuditEntry, presentPerson } from '../presenters/people';
 
-/** One page of the people whose name or address holds the searched text, by name. */
-export async function listPeople({ search, page }: PeopleQuery): Promise<People> {
+const COLUMN_OF_SORT = { name: 'name', email: 'email', registered: 'createdAt' } as const;
+
+/** One page of the people whose name or address holds the searched text. */
+export async function listPeople(query: PeopleQuery): Promise<People> {
+  const { search, sort, direction, page } = query;
   const where = searchCondition(search);
   const totalCount = await User.count({ where });
   const rows = await User.findAll({
     where,
     include: { association: 'roleRows', separate: true },
-    order: ['name', 'id'],
+    order: [[COLUMN_OF_SORT[sort], direction === 'up' ? 'ASC' : 'DESC'], 'id'],
     limit: PEOPLE_PER_PAGE,
     offset: (page - 1) * PEOPLE_PER_PAGE,
   });

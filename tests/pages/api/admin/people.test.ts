@@ -47,6 +47,22 @@ describe('GET /api/admin/people', () => {
     expect(names((await list('search=_')).json)).toEqual([]);
   });
 
+  it('sorts by name, address or day, up or down', async () => {
+    await buildUser({ name: 'Bram', email: 'z@wool.example' });
+    await buildUser({ name: 'Odile', email: 'a@wool.example' });
+    const sorted = async (query: string) =>
+      names((await list(`search=wool.example&${query}`)).json);
+    expect(await sorted('sort=email')).toEqual(['Odile', 'Bram']);
+    expect(await sorted('sort=name')).toEqual(['Bram', 'Odile']);
+    expect(await sorted('sort=name&direction=down')).toEqual(['Odile', 'Bram']);
+    expect(await sorted('sort=registered')).toEqual(['Bram', 'Odile']);
+    const { json } = await list('sort=password&direction=left');
+    expect(json.error.fields).toEqual({
+      sort: 'Sort by name, email or registered.',
+      direction: 'A direction is up or down.',
+    });
+  });
+
   it('pages by fifty', async () => {
     for (let person = 0; person < 50; person += 1) await buildUser({ name: `Person ${person}` });
     const first = await list('page=1');
