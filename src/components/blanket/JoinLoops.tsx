@@ -1,5 +1,6 @@
 import type { Join } from '../../lib/joins/join';
 import type { MotifSides } from '../../lib/motifs/motif';
+import { fixed, polygonPoints } from './polygonPoints';
 
 interface JoinLoopsProps {
   join: Join;
@@ -10,34 +11,32 @@ interface JoinLoopsProps {
   hex: string;
 }
 
-/** What a join adds round one motif: a closed band, or a row of loops that reach half the seam. */
+/** The fabric of a join round one motif: a closed band, or loops over what shows through them. */
 export function JoinLoops({ join, sides, acrossMm, seamMm, sideStitches, hex }: JoinLoopsProps) {
   const halfMm = acrossMm / 2;
   const corners = sides === 0 ? 4 : sides;
   const sideMm = 2 * halfMm * Math.tan(Math.PI / corners);
-  if (join.openness === 'closed') {
-    return <Band {...{ corners, hex }} apothemMm={halfMm + seamMm / 2} />;
-  }
+  const closed = join.openness === 'closed';
   const loops = Math.max(1, Math.round((sideStitches - join.fit.plus) / join.fit.multipleOf));
   const stepMm = sideMm / loops;
-  const path = Array.from({ length: loops }, (_, i) => {
-    const x = -sideMm / 2 + i * stepMm;
-    return `M${x.toFixed(2)} ${-halfMm}q${(stepMm / 2).toFixed(2)} ${(-seamMm).toFixed(2)} ${stepMm.toFixed(2)} 0`;
-  }).join('');
+  const path = Array.from(
+    { length: loops },
+    (_, i) =>
+      `M${fixed(i * stepMm - sideMm / 2)} ${fixed(-halfMm)}q${fixed(stepMm / 2)} ${fixed(-seamMm)} ${fixed(stepMm)} 0`,
+  ).join('');
   return (
-    <g className="keeps-colour" fill="none" stroke={hex} strokeWidth={Math.max(1.2, stepMm / 6)}>
-      {Array.from({ length: corners }, (_, side) => (
-        <path key={side} d={path} transform={`rotate(${(360 * side) / corners})`} />
-      ))}
+    <g className="keeps-colour">
+      <polygon
+        points={polygonPoints(corners, halfMm + seamMm / 2)}
+        fill={closed ? hex : `color-mix(in oklab, ${hex} 70%, #10181a)`}
+      />
+      {!closed && (
+        <g fill="none" stroke={hex} strokeWidth={fixed(Math.max(1.2, stepMm / 6))}>
+          {Array.from({ length: corners }, (_, side) => (
+            <path key={side} d={path} transform={`rotate(${(360 * side) / corners})`} />
+          ))}
+        </g>
+      )}
     </g>
   );
-}
-
-function Band({ corners, apothemMm, hex }: { corners: number; apothemMm: number; hex: string }) {
-  const reach = apothemMm / Math.cos(Math.PI / corners);
-  const points = Array.from({ length: corners }, (_, i) => {
-    const angle = (2 * Math.PI * (i + 0.5)) / corners;
-    return `${(reach * Math.sin(angle)).toFixed(2)},${(-reach * Math.cos(angle)).toFixed(2)}`;
-  });
-  return <polygon className="keeps-colour" points={points.join(' ')} fill={hex} />;
 }

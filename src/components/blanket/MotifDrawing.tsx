@@ -1,6 +1,7 @@
 import type { Gauge } from '../../lib/gauge/gauge';
 import type { Motif, MotifSides } from '../../lib/motifs/motif';
 import { placedRounds, type PlacedRound } from '../../lib/motifs/stitchPlaces';
+import { fixed, polygonPoints } from './polygonPoints';
 
 interface MotifDrawingProps {
   motif: Motif;
@@ -42,7 +43,7 @@ function RoundDrawing({
       <path
         d={stitches}
         stroke={hex}
-        strokeWidth={strandMm(round, sides)}
+        strokeWidth={fixed(strandMm(round, sides))}
         strokeLinecap="round"
         fill="none"
       />
@@ -53,14 +54,10 @@ function RoundDrawing({
 /** The fabric behind the stitches of a round: what shows through between them. */
 function outline({ shape, outerMm }: PlacedRound, sides: MotifSides): string {
   if (shape === 'circle' || sides === 0) {
-    return `M${-outerMm} 0a${outerMm} ${outerMm} 0 1 0 ${2 * outerMm} 0a${outerMm} ${outerMm} 0 1 0 ${-2 * outerMm} 0Z`;
+    const r = fixed(outerMm);
+    return `M-${r} 0a${r} ${r} 0 1 0 ${fixed(2 * outerMm)} 0a${r} ${r} 0 1 0 -${fixed(2 * outerMm)} 0Z`;
   }
-  const reach = outerMm / Math.cos(Math.PI / sides);
-  const corners = Array.from({ length: sides }, (_, i) => {
-    const angle = (2 * Math.PI * (i + 0.5)) / sides;
-    return `${fixed(reach * Math.sin(angle))} ${fixed(-reach * Math.cos(angle))}`;
-  });
-  return `M${corners.join('L')}Z`;
+  return `M${polygonPoints(sides, outerMm)}Z`;
 }
 
 /** As wide as the stitches stand apart, less a thread of shadow. */
@@ -74,4 +71,3 @@ function strandMm({ outerMm, innerMm, stitches, shape }: PlacedRound, sides: Mot
 type Point = readonly [number, number];
 const at = (from: Point, to: Point, share: number): string =>
   `${fixed(from[0] + share * (to[0] - from[0]))} ${fixed(from[1] + share * (to[1] - from[1]))}`;
-const fixed = (value: number): string => value.toFixed(2);

@@ -129,14 +129,14 @@ function JoinName({
     <div className="max-w-72 min-w-48">
       <b className="block">{join.name}</b>
       <span
-        className={fits ? 'block text-sm text-ink-2' : 'block text-sm font-bold text-amber-ink'}
+        className={fits ? 'block text-sm font-normal text-ink-2' : 'block text-sm text-amber-ink'}
       >
         {fits ? 'Fits' : 'Does not fit'} · {join.surface}, {join.openness}
         {join.reversible ? ', reversible' : ''} · {join.tool}
       </span>
-      {!fits && <span className="block text-sm text-ink-2">{fitWords}</span>}
+      {!fits && <span className="block text-sm font-normal text-ink-2">{fitWords}</span>}
       {inUse ? (
-        <span className="mt-1 inline-flex items-center gap-1 text-sm">
+        <span className="mt-1 inline-flex items-center gap-1 text-sm font-normal">
           <Check size={15} aria-hidden /> in this plan
         </span>
       ) : (

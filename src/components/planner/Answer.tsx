@@ -28,7 +28,12 @@ export function Answer({ plan, estimate, units, change }: AnswerProps) {
     showPrice(totals.costMinor, plan.yarn.price.currency);
   return (
     <div className="flex flex-wrap items-end justify-between gap-x-6 gap-y-4">
-      <Fact lead="Buy or set aside" answer={skeinWord(totals.skeins)} live className="max-w-2xl">
+      <Fact
+        lead="Buy or set aside"
+        answer={skeinWord(totals.skeins)}
+        live
+        className="min-w-64 flex-1"
+      >
         in {countInWords(used)} {used === 1 ? 'colour' : 'colours'},{' '}
         <b className="text-ink">{sureWord(plan.confidence)} sure</b> of each to finish.{' '}
         {showYarn(totals.meanM, units)} expected, {showYarn(inHandM, units)} in hand

@@ -80,9 +80,13 @@ function columnsFor(
           <span className="block">
             {line.part === 'tails' ? `Tails of the ${line.label}` : line.label}
           </span>
-          <span className="figures block text-sm text-ink-2">{lineFormula(line, word(line))}</span>
+          <span className="figures block text-sm font-normal text-ink-2">
+            {lineFormula(line, word(line))}
+          </span>
           {line.stitch !== null && (
-            <span className="block text-sm text-ink-2">{SOURCE_WORDS[line.source]}</span>
+            <span className="block text-sm font-normal text-ink-2">
+              {SOURCE_WORDS[line.source]}
+            </span>
           )}
         </>
       ),

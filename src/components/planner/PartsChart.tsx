@@ -1,5 +1,5 @@
 import { useId } from 'react';
-import { Bar, BarChart, ResponsiveContainer, XAxis, YAxis } from 'recharts';
+import { Bar, BarChart, LabelList, ResponsiveContainer, XAxis, YAxis } from 'recharts';
 import { PARTS, type Estimate } from '../../lib/ledger/ledger';
 import type { Plan } from '../../lib/plan/plan';
 import { showYarn, YARN_UNIT, type Units } from '../../lib/units/display';
@@ -12,14 +12,19 @@ interface PartsChartProps {
   units: Units;
 }
 
-/** Yarn by part, each bar laid of the colours' own strands, with the same figures as a list beneath. */
+/** Yarn by part, each bar laid of the colours' own strands, with its figure at the end. */
 export default function PartsChart({ plan, estimate, units }: PartsChartProps) {
   const id = useId();
   const rows = PARTS.map((part) => {
     const ofPart = estimate.parts.filter((each) => each.part === part);
     return {
       part: PART_WORDS[part],
-      totalM: ofPart.reduce((sum, { lengthM }) => sum + lengthM, 0),
+      words: showYarn(
+        ofPart.reduce((sum, { lengthM }) => sum + lengthM, 0),
+        units,
+      ),
+      // Carries the label at the end of the bar, past whichever colour is last.
+      end: 0,
       ...Object.fromEntries(
         ofPart.map(({ colour, lengthM }) => [colour, lengthM / YARN_UNIT[units].m]),
       ),
@@ -32,7 +37,7 @@ export default function PartsChart({ plan, estimate, units }: PartsChartProps) {
           <BarChart
             data={rows}
             layout="vertical"
-            margin={{ left: 0, right: 8, top: 4, bottom: 0 }}
+            margin={{ left: 0, right: 64, top: 4, bottom: 0 }}
             barCategoryGap={8}
           >
             <defs>
@@ -64,18 +69,14 @@ export default function PartsChart({ plan, estimate, units }: PartsChartProps) {
                 isAnimationActive={false}
               />
             ))}
+            <Bar dataKey="end" stackId="yarn" isAnimationActive={false}>
+              <LabelList dataKey="words" position="right" fill="var(--color-ink)" fontSize={13} />
+            </Bar>
           </BarChart>
         </ResponsiveContainer>
       </div>
-      <figcaption>
-        <dl className="grid grid-cols-[1fr_auto] gap-x-4 text-sm">
-          {rows.map(({ part, totalM }) => (
-            <div key={part} className="contents">
-              <dt className="text-ink-2">{part}</dt>
-              <dd className="figures text-end">{showYarn(totalM, units)}</dd>
-            </div>
-          ))}
-        </dl>
+      <figcaption className="sr-only">
+        {rows.map(({ part, words }) => `${part}: ${words}`).join('; ')}
       </figcaption>
     </figure>
   );

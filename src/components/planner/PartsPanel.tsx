@@ -19,7 +19,7 @@ export function PartsPanel(props: PartsPanelProps) {
   return (
     <section ref={ref}>
       <h2>Where it goes</h2>
-      <div className="mt-2 min-h-56">
+      <div className="mt-2 min-h-44">
         {seen && (
           <Suspense fallback={<Skeleton label="The chart is loading" lines={6} />}>
             <PartsChart {...props} />

@@ -1,11 +1,11 @@
 import { Redo2, Undo2 } from 'lucide-react';
-import { lazy, Suspense, useMemo, useState, type ReactNode } from 'react';
-import { estimate as estimateOf } from '../../lib/ledger/estimate';
+import { lazy, Suspense, useState, type ReactNode } from 'react';
 import type { Plan } from '../../lib/plan/plan';
 import { showFabric, showSize, type Units } from '../../lib/units/display';
 import { BlanketPicture } from '../blanket/BlanketPicture';
 import { AnswerBar } from '../ui/AnswerBar';
 import { Button } from '../ui/Button';
+import { Notice } from '../ui/Notice';
 import { useTerms, useUnits } from '../ui/useUnits';
 import { Answer, skeinWord, sureWord } from './Answer';
 import { BlanketSection } from './BlanketSection';
@@ -19,6 +19,7 @@ import { PartsPanel } from './PartsPanel';
 import { PlanNotices } from './PlanNotices';
 import type { Terms } from './stitchWord';
 import { SwatchSection } from './SwatchSection';
+import { useEstimate } from './useEstimate';
 import type { PlanEditing } from './usePlan';
 import { WeighedSection } from './WeighedSection';
 import { YarnSection } from './YarnSection';
@@ -51,11 +52,11 @@ export function Planner({ editing, preferences, heading, keeping, shoppingHref }
   const { plan, change } = editing;
   const units = useUnits(preferences.units);
   const terms = useTerms(preferences.terms);
-  const estimate = useMemo(() => estimateOf(plan), [plan]);
+  const { estimate, impossible } = useEstimate(plan);
   const [sheet, setSheet] = useState<OpenSheet>('none');
   const [ledgerColour, setLedgerColour] = useState('all');
   const [picked, setPicked] = useState<string | null>(null);
-  const chosen = picked ?? hungriest(plan, estimate.colours);
+  const chosen = picked ?? leastCertain(plan, estimate.colours);
   const close = () => setSheet('none');
   const openLedger = (colour: string) => {
     setLedgerColour(colour);
@@ -67,7 +68,7 @@ export function Planner({ editing, preferences, heading, keeping, shoppingHref }
     <>
       <div className="lg:grid lg:grid-cols-[minmax(22rem,25rem)_1fr]">
         <form
-          className="grid content-start gap-5 px-4 pt-6 pb-8 lg:border-e lg:border-line lg:px-8"
+          className="grid content-start gap-5 px-4 pt-6 pb-8 lg:sticky lg:top-0 lg:h-dvh lg:overflow-y-auto lg:border-e lg:border-line lg:px-8"
           onSubmit={(event) => event.preventDefault()}
           aria-label="The plan"
         >
@@ -80,10 +81,24 @@ export function Planner({ editing, preferences, heading, keeping, shoppingHref }
           <BlanketSection {...shared} terms={terms} />
         </form>
         <div className="grid content-start gap-8 px-4 pt-6 pb-10 lg:px-9" data-answer>
+          {impossible && (
+            <Notice kind="problem" title="These figures cannot be worked out" live>
+              The last ones that could are shown. Undo, or look for a number that is out of all
+              proportion.
+            </Notice>
+          )}
           <Answer {...shared} />
           <ColourRows {...shared} chosen={chosen} onChoose={setPicked} onLedger={openLedger} />
           <div className="grid gap-8 xl:grid-cols-[minmax(0,1.35fr)_minmax(17rem,1fr)]">
-            <FinishedSize {...shared} />
+            <div className="grid min-w-0 content-start gap-6">
+              <FinishedSize {...shared} />
+              <div className="flex flex-wrap gap-3" data-chrome>
+                <ShoppingButton href={shoppingHref} onOpen={() => setSheet('shopping')} />
+                <Button onClick={() => setSheet('compare')}>Compare joins</Button>
+                <Button onClick={() => openLedger('all')}>Open the ledger</Button>
+              </div>
+              <PlanNotices notices={estimate.notices} />
+            </div>
             <div className="grid content-start gap-7">
               <ChancePanel {...shared} chosen={chosen} />
               <NextPanel {...shared} />
@@ -91,12 +106,6 @@ export function Planner({ editing, preferences, heading, keeping, shoppingHref }
               <PartsPanel {...shared} />
             </div>
           </div>
-          <div className="flex flex-wrap gap-3">
-            <ShoppingButton href={shoppingHref} onOpen={() => setSheet('shopping')} />
-            <Button onClick={() => setSheet('compare')}>Compare joins</Button>
-            <Button onClick={() => openLedger('all')}>Open the ledger</Button>
-          </div>
-          <PlanNotices notices={estimate.notices} />
         </div>
       </div>
       <AnswerBar
@@ -122,9 +131,9 @@ export function Planner({ editing, preferences, heading, keeping, shoppingHref }
   );
 }
 
-/** The colour that takes the most yarn: the first one worth looking at. */
-function hungriest(plan: Plan, colours: readonly { colour: string; meanM: number }[]): string {
-  const [first] = colours.toSorted((left, right) => right.meanM - left.meanM);
+/** The colour whose need is least certain: the first one worth looking at. */
+function leastCertain(plan: Plan, colours: readonly { colour: string; sdM: number }[]): string {
+  const [first] = colours.toSorted((left, right) => right.sdM - left.sdM);
   return first?.colour ?? plan.colours[0]?.key ?? '';
 }
 

@@ -69,13 +69,15 @@ export function SwatchSection({ plan, units, terms, change }: SwatchSectionProps
       </div>
       {count('Stitches', 'stitches', PLAN_LIMITS.swatchStitches)}
       {side('measure across', 'widthMm')}
-      <div className="col-span-2 self-end">
-        <Button kind="quiet" onClick={() => change((old) => ({ ...old, swatch: null }))}>
-          No swatch
-        </Button>
-      </div>
       {count('Rows', 'rows', PLAN_LIMITS.swatchRows)}
       {side('measure tall', 'heightMm')}
+      <Button
+        kind="quiet"
+        className="col-span-2 self-end justify-self-start"
+        onClick={() => change((old) => ({ ...old, swatch: null }))}
+      >
+        No swatch
+      </Button>
     </Section>
   );
 }

@@ -34,13 +34,22 @@ export function WeighedSection({ plan, units, change }: WeighedSectionProps) {
       {plan.evidence.map((item, i) => (
         <EvidenceRow key={i} {...{ plan, units, change, item }} index={i} />
       ))}
-      {plan.evidence.length < PLAN_LIMITS.evidence && (
-        <div className="col-span-6">
-          <Button kind="quiet" icon={Plus} onClick={add} className="-ms-2">
+      <div className="col-span-6 -ms-2 -mt-1 flex flex-wrap">
+        {plan.evidence.length < PLAN_LIMITS.evidence && (
+          <Button kind="quiet" icon={Plus} onClick={add}>
             {plan.evidence.length === 0 ? 'Enter a weight' : 'Another piece'}
           </Button>
-        </div>
-      )}
+        )}
+        {plan.evidence.length > 0 && (
+          <Button
+            kind="quiet"
+            icon={Trash2}
+            onClick={() => change((old) => withEvidence(old, old.evidence.length - 1, null))}
+          >
+            Remove {plan.evidence.length > 1 ? 'the last' : ''}
+          </Button>
+        )}
+      </div>
     </Section>
   );
 }
@@ -67,17 +76,6 @@ function EvidenceRow({ plan, units, change, item, index }: EvidenceRowProps) {
         <PieceSelect {...{ plan, item }} onChange={(next) => set(next)} />
       </div>
       <ReadingFields {...{ item, units, set }} />
-      <div className="col-span-6 -mt-2 flex justify-end">
-        <Button
-          kind="quiet"
-          small
-          icon={Trash2}
-          onClick={() => change((old) => withEvidence(old, index, null))}
-          aria-label={`Remove weighed piece ${index + 1}`}
-        >
-          Remove
-        </Button>
-      </div>
     </>
   );
 }

@@ -69,17 +69,15 @@ function alongSides(
   fromCircle: boolean,
 ): StitchPlace[] {
   const corner = cornerStitches(motif, round);
-  const offsets = sideOffsets(motif, round);
   const halfTurn = Math.tan(Math.PI / motif.sides);
+  const innerHalfMm = innerMm * halfTurn;
+  const places = sidePlaces(motif, round, outerMm * halfTurn, innerHalfMm);
   return Array.from({ length: motif.sides }, (_, side) => {
     const turn = (2 * Math.PI * side) / motif.sides;
-    const onSide = offsets.map((offset): StitchPlace => {
-      const headX = offset * outerMm * halfTurn;
-      const spread = Math.atan2(headX, outerMm);
-      const foot: [number, number] = fromCircle
-        ? [innerMm * Math.sin(spread), -innerMm * Math.cos(spread)]
-        : [offset * innerMm * halfTurn, -innerMm];
-      return { foot: rotated(foot, turn), head: rotated([headX, -outerMm], turn) };
+    const onSide = places.map(({ headMm, footMm }): StitchPlace => {
+      const spread = Math.atan2(headMm, outerMm);
+      const foot = fromCircle ? polar(innerMm, spread) : ([footMm, -innerMm] as const);
+      return { foot: rotated(foot, turn), head: rotated([headMm, -outerMm], turn) };
     });
     const atCorner = Array.from({ length: corner }, (): StitchPlace => {
       const angle = turn + Math.PI / motif.sides;
@@ -90,19 +88,41 @@ function alongSides(
   }).flat();
 }
 
-/** Positions of the stitches of one side, -1 to 1 between its corners, leaving out its chain spaces. */
-function sideOffsets(motif: Motif, round: MotifRound): number[] {
+/** How far the feet of one group stand apart, next to its heads: they share one space. */
+const GROUP_FEET = 0.4;
+
+/**
+ * Heads and feet along one side, in mm from its middle. Where the side has chain spaces its stitches
+ * stand in groups, each gathered in one space below, the outermost in the corner; elsewhere each
+ * stands on the stitch below, and only those at the corners lean.
+ */
+function sidePlaces(
+  motif: Motif,
+  round: MotifRound,
+  outerHalfMm: number,
+  innerHalfMm: number,
+): { headMm: number; footMm: number }[] {
   const spaces = Object.entries(round.spaces)
     .filter(([kind]) => kind !== round.cornerSpace)
     .reduce((sum, [, count]) => sum + count / motif.sides, 0);
-  const stitches = round.perSide - spaces;
-  const perGroup = stitches / (spaces + 1);
+  const perGroup = (round.perSide - spaces) / (spaces + 1);
   const cornerGap = round.cornerSpace === null ? 0.5 : 0.9;
-  const places = round.perSide + 2 * cornerGap;
+  const head = (j: number): number =>
+    outerHalfMm * ((2 * (j + cornerGap + 0.5)) / (round.perSide + 2 * cornerGap) - 1);
+  const grouped = spaces > 0 && Number.isInteger(perGroup);
   return Array.from({ length: round.perSide }, (_, j) => j)
-    .filter((j) => spaces === 0 || j % (perGroup + 1) !== perGroup)
-    .map((j) => (2 * (j + cornerGap + 0.5)) / places - 1);
+    .filter((j) => !grouped || j % (perGroup + 1) !== perGroup)
+    .map((j) => {
+      const headMm = head(j);
+      if (!grouped) return { headMm, footMm: within(headMm, innerHalfMm) };
+      const group = Math.floor(j / (perGroup + 1));
+      const middle = group * (perGroup + 1) + (perGroup - 1) / 2;
+      const below = group === 0 ? -innerHalfMm : group === spaces ? innerHalfMm : head(middle);
+      return { headMm, footMm: within(below + GROUP_FEET * (headMm - head(middle)), innerHalfMm) };
+    });
 }
+
+const within = (value: number, most: number): number => Math.max(-most, Math.min(most, value));
 
 const polar = (radiusMm: number, angle: number): [number, number] => [
   radiusMm * Math.sin(angle),

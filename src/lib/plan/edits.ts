@@ -6,15 +6,15 @@ import type { Colourway, Plan, PlanColour, PlanEvidence } from './plan';
 
 /**
  * The plan with its first motif replaced. Colours of rounds stay where there is such a round; new
- * rounds take the colour of the last. Motifs already weighed stay as evidence of what they were.
+ * rounds begin the colours again. Motifs already weighed stay as evidence of what they were.
  */
 export function withMotif(plan: Plan, motif: Motif): Plan {
   const colourways = plan.colourways.map((colourway): Colourway => {
     if (colourway.motifIndex !== 0) return colourway;
-    const last = colourway.roundColours.at(-1) as string;
+    const old = colourway.roundColours;
     return {
       ...colourway,
-      roundColours: motif.rounds.map((_, i) => colourway.roundColours[i] ?? last),
+      roundColours: motif.rounds.map((_, i) => old[i % old.length] as string),
     };
   });
   return {
