@@ -77,9 +77,9 @@ export function ruleTicks(
   });
 }
 
-/** The size at the end of the rule: to 0.1 below half a metre (or 20 in), whole above. */
+/** The size at the end of the rule: to 0.1 below half a metre or 20 in; above, whole cm or half inches. */
 export function ruleEnd(lengthMm: number, units: RuleUnits): string {
   const value = lengthMm / mmPerNumber[units];
-  const small = value < (units === 'metric' ? 50 : 20);
-  return String(Number(value.toFixed(small ? 1 : 0)));
+  if (units === 'metric') return String(Number(value.toFixed(value < 50 ? 1 : 0)));
+  return String(value < 20 ? Number(value.toFixed(1)) : Math.round(2 * value) / 2);
 }

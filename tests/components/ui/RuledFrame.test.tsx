@@ -39,6 +39,6 @@ describe('RuledFrame', () => {
   it('ends both rules with the size in the units of the person', () => {
     expect(draw().frame.textContent).toContain('118');
     cleanup();
-    expect(draw({ units: 'imperial' }).frame.textContent).toMatch(/^in.*46.*58$/);
+    expect(draw({ units: 'imperial' }).frame.textContent).toMatch(/^in.*46\.5.*58$/);
   });
 });

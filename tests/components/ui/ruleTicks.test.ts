@@ -31,6 +31,11 @@ describe('ruleTicks', () => {
     expect(numbers(ticks)).toEqual([0, 20, 40, 60, 80]);
   });
 
+  it('drops a number that the size at the end would run into', () => {
+    // 100 stands 6.4 px before the end of 102 cm
+    expect(numbers(ruleTicks(1020, 'metric', 0.32, 40))).toEqual([0, 20, 40, 60, 80]);
+  });
+
   it('keeps ticks 3 px and numbers 27 px apart at any scale', () => {
     for (const units of ['metric', 'imperial'] as const) {
       for (const pxPerMm of [0.005, 0.02, 0.1, 0.28, 0.5, 1, 3, 8]) {
@@ -55,7 +60,8 @@ describe('ruleEnd', () => {
     [1184, 'metric', '118'],
     [142, 'metric', '14.2'],
     [140, 'metric', '14'],
-    [1180, 'imperial', '46'],
+    [1180, 'imperial', '46.5'],
+    [1470, 'imperial', '58'],
     [142, 'imperial', '5.6'],
   ] as const)('says %d mm in %s as %s', (lengthMm, units, shown) => {
     expect(ruleEnd(lengthMm, units)).toBe(shown);
