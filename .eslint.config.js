@@ -115,6 +115,7 @@ export default tseslint.config(
 );
 
 function nodeGlobals() {
-  const names = ['AbortSignal', 'Buffer', 'URL', 'clearTimeout', 'console', 'fetch', 'process'];
-  return Object.fromEntries([...names, 'setTimeout'].map((name) => [name, 'readonly']));
+  const timers = ['setTimeout', 'clearTimeout', 'setInterval', 'clearInterval'];
+  const names = [...timers, 'AbortSignal', 'Buffer', 'URL', 'console', 'fetch', 'process'];
+  return Object.fromEntries(names.map((name) => [name, 'readonly']));
 }

@@ -18,6 +18,11 @@ export const runTypeScript = (file, { args = [], env, show }) =>
  */
 export const runTool = (script, { args = [], env, show }) =>
   run(process.execPath, [join(root, 'node_modules', script), ...args], {
-    env: { ...process.env, ASTRO_TELEMETRY_DISABLED: '1', ...env },
+    env: { ...process.env, ...colour, ASTRO_TELEMETRY_DISABLED: '1', ...env },
     show,
   });
+
+/** What a tool prints passes through a pipe, so it cannot see whether it ends on a screen. */
+const colour = process.stdout.isTTY
+  ? { FORCE_COLOR: '1' }
+  : { NO_COLOR: '1', FORCE_COLOR: undefined };

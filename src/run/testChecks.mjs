@@ -1,5 +1,6 @@
 import { ensureBuild } from './build.mjs';
 import { withClient } from './databases.mjs';
+import { statePath } from './paths.mjs';
 import { RunError } from './say.mjs';
 import { runTool } from './scripts.mjs';
 import { makeTestDatabase, migrate } from './testDatabases.mjs';
@@ -15,7 +16,12 @@ const PASSED = { passed: 1, failed: 0 };
 export const checks = {
   migrations: checkMigrations,
   lint: () => runCheck('eslint/bin/eslint.js', '--config', '.eslint.config.js', '.'),
-  format: () => runCheck('prettier/bin/prettier.cjs', '--check', '--log-level', 'warn', '.'),
+  format: () =>
+    runCheck(
+      'prettier/bin/prettier.cjs',
+      ...['--check', '--log-level', 'warn', '--cache', '--cache-strategy', 'content'],
+      ...['--cache-location', statePath('test', 'prettier'), '.'],
+    ),
   unused: () => runCheck('knip/bin/knip.js', '--config', '.knip.json'),
   check: () => runCheck('astro/astro.js', 'check'),
   async build() {
