@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { ROLES } from '../../../src/schemas/roles';
+import type { ROLES } from '../../../src/schemas/roles';
 import { mayLeaveAdministration, mayLookAfterPeople } from '../../../src/server/policies/people';
 
 const holding = (...roles: (typeof ROLES)[number][]) => ({
