@@ -30,7 +30,7 @@ interface CompareJoinsProps {
 export default function CompareJoins({ plan, units, onUse }: CompareJoinsProps) {
   const rows = useMemo(() => compareJoins(plan, READY_JOINS), [plan]);
   return (
-    <div className="grid gap-6 pb-4">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-6 pb-4">
       <JoinsChart {...{ rows, plan, units }} />
       <DataTable
         caption="Joins on this blanket"

@@ -17,7 +17,7 @@ interface JoinsPageProps {
 export default function JoinsPage({ plan, units: initial, chosen, blankets }: JoinsPageProps) {
   const units = useUnits(initial);
   return (
-    <div className="grid gap-8 pb-10">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-8 pb-10">
       <header className="flex flex-wrap items-end justify-between gap-4">
         <div>
           <h1>Joins</h1>

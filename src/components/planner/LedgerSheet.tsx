@@ -36,7 +36,7 @@ export default function LedgerSheet(props: LedgerSheetProps) {
       title="How this is worked out"
       description="Yarn of a line = stitches × loops in one stitch × length of one loop. The allowance is what being as sure as you chose takes on top."
     >
-      <div className="grid gap-4 pb-4">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-4 pb-4">
         <Select
           label="Colour"
           value={colour}

@@ -1,5 +1,5 @@
 import { useId } from 'react';
-import { Bar, BarChart, LabelList, ResponsiveContainer, XAxis, YAxis } from 'recharts';
+import { Bar, BarChart, ResponsiveContainer, XAxis, YAxis } from 'recharts';
 import { PARTS, type Estimate } from '../../lib/ledger/ledger';
 import type { Plan } from '../../lib/plan/plan';
 import { showYarn, YARN_UNIT, type Units } from '../../lib/units/display';
@@ -23,8 +23,6 @@ export default function PartsChart({ plan, estimate, units }: PartsChartProps) {
         ofPart.reduce((sum, { lengthM }) => sum + lengthM, 0),
         units,
       ),
-      // Carries the label at the end of the bar, past whichever colour is last.
-      end: 0,
       ...Object.fromEntries(
         ofPart.map(({ colour, lengthM }) => [colour, lengthM / YARN_UNIT[units].m]),
       ),
@@ -37,7 +35,7 @@ export default function PartsChart({ plan, estimate, units }: PartsChartProps) {
           <BarChart
             data={rows}
             layout="vertical"
-            margin={{ left: 0, right: 64, top: 4, bottom: 0 }}
+            margin={{ left: 0, right: 0, top: 4, bottom: 0 }}
             barCategoryGap={8}
           >
             <defs>
@@ -69,9 +67,18 @@ export default function PartsChart({ plan, estimate, units }: PartsChartProps) {
                 isAnimationActive={false}
               />
             ))}
-            <Bar dataKey="end" stackId="yarn" isAnimationActive={false}>
-              <LabelList dataKey="words" position="right" fill="var(--color-ink)" fontSize={13} />
-            </Bar>
+            {/* The figures stand on an axis of their own, which needs a bar to belong to. */}
+            <YAxis
+              yAxisId="figures"
+              orientation="right"
+              type="category"
+              dataKey="words"
+              width={72}
+              tickLine={false}
+              axisLine={false}
+              tick={{ fill: 'var(--color-ink)', fontSize: 13 }}
+            />
+            <Bar yAxisId="figures" dataKey="none" isAnimationActive={false} />
           </BarChart>
         </ResponsiveContainer>
       </div>

@@ -76,7 +76,8 @@ interface PriceFieldProps {
 
 function PriceField({ yarn, currency, set }: PriceFieldProps) {
   const code = yarn.price?.currency ?? currency;
-  const minor = 10 ** currencyDecimals(code);
+  const decimals = currencyDecimals(code);
+  const minor = 10 ** decimals;
   return (
     <NumberField
       label="costs"
@@ -85,6 +86,7 @@ function PriceField({ yarn, currency, set }: PriceFieldProps) {
       min={0}
       max={PLAN_LIMITS.priceMinor / minor}
       step={0.5}
+      decimals={decimals}
       value={yarn.price && yarn.price.priceMinor / minor}
       onCommit={(reading) =>
         reading.ok &&

@@ -8,13 +8,17 @@ interface NumberFieldProps extends FieldFrame, NumberLimits {
   /** Every keystroke that can be read, and every one that cannot. */
   onCommit: (reading: NumberReading) => void;
   step?: number;
+  /** Decimals always shown, as for money, until the person types. */
+  decimals?: number;
   id?: string;
   name?: string;
   disabled?: boolean;
 }
 
-const show = (value: number | null) =>
-  value === null ? '' : String(Number(value.toPrecision(12)));
+const show = (value: number | null, decimals?: number) => {
+  if (value === null) return '';
+  return decimals === undefined ? String(Number(value.toPrecision(12))) : value.toFixed(decimals);
+};
 
 /**
  * A number as a person types it. Keeps every character until the number changes from outside
@@ -22,17 +26,18 @@ const show = (value: number | null) =>
  */
 export function NumberField(props: NumberFieldProps) {
   const { label, hint, error, labelHidden, className, value, onCommit, step = 1, ...rest } = props;
+  const { decimals } = rest;
   const { min, max, whole, optional, unit, id: givenId, name, disabled } = rest;
   const limits: NumberLimits = { min, max, whole, optional, unit };
   const ownId = useId();
   const id = givenId ?? ownId;
 
-  const [typed, setTyped] = useState(show(value));
+  const [typed, setTyped] = useState(show(value, decimals));
   const [committed, setCommitted] = useState(value);
   const [touched, setTouched] = useState(false);
   if (value !== committed) {
     setCommitted(value);
-    setTyped(show(value));
+    setTyped(show(value, decimals));
   }
 
   const reading = readNumber(typed, limits);
