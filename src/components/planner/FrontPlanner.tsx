@@ -1,8 +1,9 @@
 import { RotateCcw } from 'lucide-react';
-import { lazy, Suspense, useState } from 'react';
+import { lazy, useState } from 'react';
 import { EXAMPLE_PLAN } from '../../lib/plan/examplePlan';
 import type { Plan } from '../../lib/plan/plan';
 import { Button } from '../ui/Button';
+import { LoadedLater } from '../ui/LoadedLater';
 import { Planner, type PlannerPreferences } from './Planner';
 import { usePlan } from './usePlan';
 import { useStoredPlan } from './useStoredPlan';
@@ -58,9 +59,9 @@ export default function FrontPlanner({ initial, asked, signedIn, preferences }: 
               Sign up to keep it
             </a>
           )}
-          <Suspense>
+          <LoadedLater what="The form to keep it">
             {keeping && <KeepBlanket plan={editing.plan} onClose={() => setKeeping(false)} />}
-          </Suspense>
+          </LoadedLater>
         </>
       }
     />

@@ -1,7 +1,8 @@
-import { lazy, Suspense } from 'react';
+import { lazy } from 'react';
 import type { Estimate } from '../../lib/ledger/ledger';
 import type { Plan } from '../../lib/plan/plan';
 import type { Units } from '../../lib/units/display';
+import { LoadedLater } from '../ui/LoadedLater';
 import { Skeleton } from '../ui/Skeleton';
 import { useInView } from '../ui/useInView';
 
@@ -21,9 +22,12 @@ export function PartsPanel(props: PartsPanelProps) {
       <h2>Where it goes</h2>
       <div className="mt-2 min-h-44">
         {seen && (
-          <Suspense fallback={<Skeleton label="The chart is loading" lines={6} />}>
+          <LoadedLater
+            what="The chart"
+            fallback={<Skeleton label="The chart is loading" lines={6} />}
+          >
             <PartsChart {...props} />
-          </Suspense>
+          </LoadedLater>
         )}
       </div>
     </section>

@@ -1,10 +1,11 @@
 import { Redo2, Undo2 } from 'lucide-react';
-import { lazy, Suspense, useState, type ReactNode } from 'react';
+import { lazy, useState, type ReactNode } from 'react';
 import type { Plan } from '../../lib/plan/plan';
 import { showFabric, showSize, type Units } from '../../lib/units/display';
 import { BlanketPicture } from '../blanket/BlanketPicture';
 import { AnswerBar } from '../ui/AnswerBar';
 import { Button } from '../ui/Button';
+import { LoadedLater } from '../ui/LoadedLater';
 import { Notice } from '../ui/Notice';
 import { useTerms, useUnits } from '../ui/useUnits';
 import { Answer, skeinWord, sureWord } from './Answer';
@@ -114,7 +115,7 @@ export function Planner({ editing, preferences, heading, keeping, shoppingHref }
         action={<ShoppingButton href={shoppingHref} onOpen={() => setSheet('shopping')} />}
       />
       <ColourSheet open={sheet === 'colours'} onOpenChange={close} {...{ plan, change }} />
-      <Suspense>
+      <LoadedLater what="This part">
         {sheet === 'ledger' && (
           <LedgerSheet
             {...shared}
@@ -126,7 +127,7 @@ export function Planner({ editing, preferences, heading, keeping, shoppingHref }
         )}
         {sheet === 'compare' && <CompareSheet {...shared} onClose={close} />}
         {sheet === 'shopping' && <ShoppingSheet {...shared} onClose={close} />}
-      </Suspense>
+      </LoadedLater>
     </>
   );
 }
