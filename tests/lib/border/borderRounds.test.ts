@@ -44,6 +44,9 @@ describe('borderRounds', () => {
     const { outerSides, edgeJunctions, outerCorners } = hexagons;
     const all = outerSides * 10 + edgeJunctions * 2 + outerCorners;
     expect(outerCorners).toBeGreaterThan(4);
-    expect(borderRounds(['sc', 'sc'], hexagons, 10).map(({ sc }) => sc)).toEqual([all + 8, all + 16]);
+    expect(borderRounds(['sc', 'sc'], hexagons, 10).map(({ sc }) => sc)).toEqual([
+      all + 8,
+      all + 16,
+    ]);
   });
 });

@@ -108,11 +108,16 @@ describe('learnHand', () => {
 describe('handVarianceM2', () => {
   it('never grows with more evidence', () => {
     fc.assert(
-      fc.property(fc.array(anyEvidence, { maxLength: 4 }), anyEvidence, anyUse, (known, next, use) => {
-        const before = handVarianceM2(learnHand(8, stitches, known), use);
-        const after = handVarianceM2(learnHand(8, stitches, [...known, next]), use);
-        expect(after).toBeLessThanOrEqual(before * (1 + 1e-9) + 1e-12);
-      }),
+      fc.property(
+        fc.array(anyEvidence, { maxLength: 4 }),
+        anyEvidence,
+        anyUse,
+        (known, next, use) => {
+          const before = handVarianceM2(learnHand(8, stitches, known), use);
+          const after = handVarianceM2(learnHand(8, stitches, [...known, next]), use);
+          expect(after).toBeLessThanOrEqual(before * (1 + 1e-9) + 1e-12);
+        },
+      ),
       FIXED_SEED,
     );
   });
@@ -127,11 +132,16 @@ describe('handVarianceM2', () => {
 describe('handVarianceAfterM2', () => {
   it('foresees what the same piece would leave once it is measured', () => {
     fc.assert(
-      fc.property(fc.array(anyEvidence, { maxLength: 3 }), anyEvidence, anyUse, (known, next, use) => {
-        const foreseen = handVarianceAfterM2(learnHand(8, stitches, known), use, next);
-        const left = handVarianceM2(learnHand(8, stitches, [...known, next]), use);
-        expect(Math.abs(foreseen - left)).toBeLessThanOrEqual(1e-8 * Math.max(1, left));
-      }),
+      fc.property(
+        fc.array(anyEvidence, { maxLength: 3 }),
+        anyEvidence,
+        anyUse,
+        (known, next, use) => {
+          const foreseen = handVarianceAfterM2(learnHand(8, stitches, known), use, next);
+          const left = handVarianceM2(learnHand(8, stitches, [...known, next]), use);
+          expect(Math.abs(foreseen - left)).toBeLessThanOrEqual(1e-8 * Math.max(1, left));
+        },
+      ),
       FIXED_SEED,
     );
   });

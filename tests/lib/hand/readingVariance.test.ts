@@ -18,12 +18,17 @@ describe('readingLengthM', () => {
 describe('readingVarianceM2', () => {
   it('gives its worked example', () => {
     // weighing 2 × 1²/12 g² × (2 m/g)² = 0.667; piece (0.02 × 88)² = 3.098; motifs (0.03 × 88)²/4 = 1.742
-    expect(readingVarianceM2(weighed(44, 1), putUp, 88, 4)).toBeCloseTo(2 / 3 + 3.0976 + 1.7424, 12);
+    expect(readingVarianceM2(weighed(44, 1), putUp, 88, 4)).toBeCloseTo(
+      2 / 3 + 3.0976 + 1.7424,
+      12,
+    );
   });
 
   it('is that of rounding two readings evenly: a sixth of the step squared', () => {
     // A value rounded to a step r is off by a uniform amount of variance r²/12.
-    expect(readingVarianceM2(weighed(0, 6), { massG: massG(1), lengthM: lengthM(1) }, 0, 0)).toBe(6);
+    expect(readingVarianceM2(weighed(0, 6), { massG: massG(1), lengthM: lengthM(1) }, 0, 0)).toBe(
+      6,
+    );
   });
 
   it('squares the stated error of an unravelled piece, which has no motifs to differ', () => {

@@ -55,7 +55,10 @@ describe('compareJoins', () => {
 
   it('says which joins fit the side, in words', () => {
     expect(compared.every(({ fits }) => fits)).toBe(true); // 15 = 4 × 3 + 3 = 2 × 7 + 1
-    const even = { ...plan.motifs[0]!, rounds: plan.motifs[0]!.rounds.map((r) => ({ ...r, perSide: 16 })) };
+    const even = {
+      ...plan.motifs[0]!,
+      rounds: plan.motifs[0]!.rounds.map((r) => ({ ...r, perSide: 16 })),
+    };
     const uneven = compareJoins({ ...plan, motifs: [even] }, READY_JOINS);
     expect(uneven.filter(({ fits }) => !fits).map(({ join }) => join.key)).toEqual([
       'zigzag-chain',

@@ -1,10 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { Join } from '../../../src/lib/joins/join';
-import {
-  countsOnSide,
-  outerSideStitches,
-  sideCount,
-} from '../../../src/lib/joins/joinCounts';
+import { countsOnSide, outerSideStitches, sideCount } from '../../../src/lib/joins/joinCounts';
 import { readyJoin } from '../../../src/lib/joins/readyJoins';
 
 const join = (key: string): Join => readyJoin(key) as Join;

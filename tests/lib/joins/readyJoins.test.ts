@@ -93,10 +93,13 @@ describe('the ready joins on a side of 15', () => {
     expect(lantern.ch).toBe(5 * loops + 2 * (groups - 1) + 1);
   });
 
-  it.each(['reed-lace', 'lantern-lace'])('%s gains a group, a loop and a link with 4 stitches', (key) => {
-    const before = onSide(key, 15);
-    const after = onSide(key, 19);
-    expect((after.sc as number) - (before.sc as number)).toBe(key === 'reed-lace' ? 1 : 5);
-    expect(onSeam(key, 19)['sl st']).toBe(4);
-  });
+  it.each(['reed-lace', 'lantern-lace'])(
+    '%s gains a group, a loop and a link with 4 stitches',
+    (key) => {
+      const before = onSide(key, 15);
+      const after = onSide(key, 19);
+      expect((after.sc as number) - (before.sc as number)).toBe(key === 'reed-lace' ? 1 : 5);
+      expect(onSeam(key, 19)['sl st']).toBe(4);
+    },
+  );
 });

@@ -25,17 +25,20 @@ describe('gridCounts', () => {
     expect(gridCounts('square', 14, 16).joinedSides).toBe(418); // CALC: R(C-1) + C(R-1)
   });
 
-  it.each(layouts)('counts %s by the corners they share, for every size up to 13 × 13', (layout) => {
-    for (const rows of upTo(13)) {
-      for (const columns of upTo(13)) {
-        expect({ rows, columns, ...gridCounts(layout, rows, columns) }).toEqual({
-          rows,
-          columns,
-          ...bruteCounts(layout, rows, columns),
-        });
+  it.each(layouts)(
+    'counts %s by the corners they share, for every size up to 13 × 13',
+    (layout) => {
+      for (const rows of upTo(13)) {
+        for (const columns of upTo(13)) {
+          expect({ rows, columns, ...gridCounts(layout, rows, columns) }).toEqual({
+            rows,
+            columns,
+            ...bruteCounts(layout, rows, columns),
+          });
+        }
       }
-    }
-  });
+    },
+  );
 
   it.each(layouts)('counts %s as large as they may be', (layout) => {
     expect(gridCounts(layout, MOST_ROWS, 3)).toEqual(bruteCounts(layout, MOST_ROWS, 3));

@@ -69,7 +69,10 @@ describe('gridFor', () => {
   it('is the published grid for 10 in squares on 50 × 60 in', () => {
     // published: 5 × 6 = 30 squares
     const bare = { acrossMm: 254, seamMm: 0, edgeMm: 0, borderMm: 0 };
-    expect(gridFor('square', target(1270, 1524, 'at-least'), bare)).toEqual({ rows: 6, columns: 5 });
+    expect(gridFor('square', target(1270, 1524, 'at-least'), bare)).toEqual({
+      rows: 6,
+      columns: 5,
+    });
   });
 
   it('is one motif where even one is too large, and never more than the most', () => {

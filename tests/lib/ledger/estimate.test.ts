@@ -6,7 +6,9 @@ import { normalQuantile } from '../../../src/lib/stats/normal';
 import { anyPlan, buildPlan, FIXED_SEED, plainPlan, weighed } from '../../support/plans';
 
 const close = (actual: number, expected: number, relative = 1e-9): void => {
-  expect(Math.abs(actual - expected)).toBeLessThanOrEqual(relative * Math.max(1, Math.abs(expected)));
+  expect(Math.abs(actual - expected)).toBeLessThanOrEqual(
+    relative * Math.max(1, Math.abs(expected)),
+  );
 };
 
 /** Loops of one stitch each, worked by hand for the front page's plan. */
@@ -82,15 +84,16 @@ describe("estimate of the front page's plan", () => {
   const spread = covariance(weighedPiece, weighedPiece) + noise;
   const priorM = (loops: Loops) => (39 * (loops.ch + loops.dc + loops.sc + loops.slst)) / 1000;
   const meanOf = (loops: Loops) =>
-    priorM(loops) +
-    (covariance(loops, weighedPiece) * (readingM - priorM(weighedPiece))) / spread;
+    priorM(loops) + (covariance(loops, weighedPiece) * (readingM - priorM(weighedPiece))) / spread;
   const varianceOf = (loops: Loops) =>
     covariance(loops, loops) - covariance(loops, weighedPiece) ** 2 / spread;
 
   const result = estimate(buildPlan());
 
   it.each(Object.entries(BY_HAND))('needs for %s what is worked by hand', (key, byHand) => {
-    const colour = result.colours.find((each) => each.colour === key) as Estimate['colours'][number];
+    const colour = result.colours.find(
+      (each) => each.colour === key,
+    ) as Estimate['colours'][number];
     const pieces = byHand.pieces.reduce(
       (sum, [count, loops]) => sum + count * (0.03 * meanOf(loops)) ** 2,
       0,
@@ -142,10 +145,7 @@ describe("estimate of the front page's plan", () => {
       0,
     );
     close(result.totals.durationS, moves * 0.9 + 806 * 45);
-    close(
-      result.totals.joinDurationS,
-      (80 * (168 + 64) + 142 * 7 + 158) * 0.9 + 160 * 45,
-    );
+    close(result.totals.joinDurationS, (80 * (168 + 64) + 142 * 7 + 158) * 0.9 + 160 * 45);
   });
 
   it('fits its join with seven repeats', () => {
@@ -164,9 +164,19 @@ describe('estimate', () => {
         for (const colour of result.colours) {
           const lines = result.ledger.filter((line) => line.colour === colour.colour);
           const worked = lines.filter(({ part }) => part !== 'allowance');
-          close(sum(worked, ({ lengthM }) => lengthM), colour.meanM);
-          close(sum(worked, ({ varianceM2 }) => varianceM2), colour.sdM ** 2, 1e-7);
-          close(sum(lines, ({ lengthM }) => lengthM), Math.max(0, colour.neededM));
+          close(
+            sum(worked, ({ lengthM }) => lengthM),
+            colour.meanM,
+          );
+          close(
+            sum(worked, ({ varianceM2 }) => varianceM2),
+            colour.sdM ** 2,
+            1e-7,
+          );
+          close(
+            sum(lines, ({ lengthM }) => lengthM),
+            Math.max(0, colour.neededM),
+          );
           for (const line of worked) {
             const times = line.stitch === null ? line.count : line.loops;
             close(line.lengthM, (times * line.eachMm) / 1000);
@@ -176,13 +186,22 @@ describe('estimate', () => {
           const lines = result.ledger.filter(
             (line) => line.part === part.part && line.colour === part.colour,
           );
-          close(part.lengthM, sum(lines, ({ lengthM }) => lengthM));
+          close(
+            part.lengthM,
+            sum(lines, ({ lengthM }) => lengthM),
+          );
         }
-        close(sum(result.uncertainty, ({ share }) => share), result.totals.meanM > 0 ? 1 : 0);
+        close(
+          sum(result.uncertainty, ({ share }) => share),
+          result.totals.meanM > 0 ? 1 : 0,
+        );
         const skeins = result.uncertainty.find(({ cause }) => cause === 'skeins');
         const causes = sum(result.uncertainty, ({ varianceM2 }) => varianceM2);
         close(causes - (skeins?.varianceM2 ?? 0), result.totals.sdM ** 2, 1e-6);
-        close(result.totals.meanM, sum(result.colours, ({ meanM }) => meanM));
+        close(
+          result.totals.meanM,
+          sum(result.colours, ({ meanM }) => meanM),
+        );
         expect(result.totals.skeins).toBe(sum(result.colours, ({ skeins: each }) => each));
       }),
       FIXED_SEED,
@@ -194,7 +213,9 @@ describe('estimate', () => {
       expect(chances.map((chance) => chance.skeins)).toEqual(
         [skeins - 1, skeins, skeins + 1].filter((n) => n > 0),
       );
-      expect(chances.find((chance) => chance.skeins === skeins)?.probabilityShort).toBeLessThan(0.05);
+      expect(chances.find((chance) => chance.skeins === skeins)?.probabilityShort).toBeLessThan(
+        0.05,
+      );
     }
   });
 

@@ -5,7 +5,14 @@ import { estimate } from '../../../src/lib/ledger/estimate';
 import { evidenceOf, motifUse, swatchUse } from '../../../src/lib/ledger/evidenceOf';
 import type { NextMeasurement } from '../../../src/lib/ledger/ledger';
 import type { Plan, PlanEvidence } from '../../../src/lib/plan/plan';
-import { anyPlan, buildPlan, FIXED_SEED, plainPlan, unravelled, weighed } from '../../support/plans';
+import {
+  anyPlan,
+  buildPlan,
+  FIXED_SEED,
+  plainPlan,
+  unravelled,
+  weighed,
+} from '../../support/plans';
 
 const next = (plan: Plan): readonly NextMeasurement[] => estimate(plan).next;
 const find = (plan: Plan, kind: NextMeasurement['kind'], motifs = 0) =>

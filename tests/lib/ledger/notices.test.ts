@@ -53,7 +53,8 @@ describe('noticesOf', () => {
     const evidence = (pieceG: number): Plan['evidence'] => [
       { piece: 'motifs', count: 4, motifIndex: 0, reading: weighed(pieceG, 1) },
     ];
-    const asked = (pieceG: number) => codes(buildPlan({ join: closed, evidence: evidence(pieceG) }));
+    const asked = (pieceG: number) =>
+      codes(buildPlan({ join: closed, evidence: evidence(pieceG) }));
     expect(asked(44)).not.toContain('reading-contradicts-gauge');
     expect(asked(60)).not.toContain('reading-contradicts-gauge');
     expect(asked(10)).toContain('reading-contradicts-gauge');

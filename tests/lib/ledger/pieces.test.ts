@@ -1,6 +1,11 @@
 import { describe, expect, it } from 'vitest';
 import { blanketOf } from '../../../src/lib/ledger/blanketOf';
-import { joinSidesOf, motifPieces, piecesOf, type PieceGroup } from '../../../src/lib/ledger/pieces';
+import {
+  joinSidesOf,
+  motifPieces,
+  piecesOf,
+  type PieceGroup,
+} from '../../../src/lib/ledger/pieces';
 import type { Motif } from '../../../src/lib/motifs/motif';
 import { readyMotif } from '../../../src/lib/motifs/readyMotifs';
 import type { Plan } from '../../../src/lib/plan/plan';

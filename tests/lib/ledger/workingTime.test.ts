@@ -4,7 +4,12 @@ import type { LedgerLine } from '../../../src/lib/ledger/ledger';
 import { SECONDS_PER_MOVE, workingTimeS } from '../../../src/lib/ledger/workingTime';
 import { plainPlan } from '../../support/plans';
 
-const line = (part: LedgerLine['part'], label: string, count: number, loops: number): LedgerLine => ({
+const line = (
+  part: LedgerLine['part'],
+  label: string,
+  count: number,
+  loops: number,
+): LedgerLine => ({
   colour: 'c1',
   part,
   label,

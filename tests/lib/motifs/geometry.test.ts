@@ -77,7 +77,10 @@ describe('motifGeometry', () => {
   it('lets rounds of different stitches err apart', () => {
     const motif = { ...buildMotif(4, []), rounds: [buildRound(3, 'sc'), buildRound(7, 'dc', 2)] };
     // 2 × hypot(0.207, 0.414)
-    expect(motifGeometry(motif, gauge, null).acrossSdMm).toBeCloseTo(2 * Math.hypot(0.207, 0.414), 12);
+    expect(motifGeometry(motif, gauge, null).acrossSdMm).toBeCloseTo(
+      2 * Math.hypot(0.207, 0.414),
+      12,
+    );
   });
 
   it('finds the round at which too few stitches make it cup', () => {

@@ -2,7 +2,12 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { DomainError } from '../../../src/lib/errors';
 import { CONFIDENCES } from '../../../src/lib/plan/plan';
-import { probabilityShort, quantileM, skeinsFor, SKEIN_SPREAD } from '../../../src/lib/skeins/skeins';
+import {
+  probabilityShort,
+  quantileM,
+  skeinsFor,
+  SKEIN_SPREAD,
+} from '../../../src/lib/skeins/skeins';
 import { normalQuantile } from '../../../src/lib/stats/normal';
 import { FIXED_SEED } from '../../support/plans';
 
@@ -38,15 +43,25 @@ describe('skeinsFor', () => {
   });
 
   it('is the least number that suffices', () => {
-    const meets = (need: { meanM: number; varianceM2: number }, n: number, putUpM: number, z: number) =>
+    const meets = (
+      need: { meanM: number; varianceM2: number },
+      n: number,
+      putUpM: number,
+      z: number,
+    ) =>
       need.meanM + z * Math.sqrt(need.varianceM2 + n * (SKEIN_SPREAD * putUpM) ** 2) <= n * putUpM;
     fc.assert(
-      fc.property(anyNeed, anyPutUp, fc.constantFrom(...CONFIDENCES), (need, putUpM, confidence) => {
-        const z = normalQuantile(confidence);
-        const n = skeinsFor(need, putUpM, confidence);
-        expect(meets(need, n, putUpM, z)).toBe(true);
-        if (n > 0) expect(meets(need, n - 1, putUpM, z)).toBe(false);
-      }),
+      fc.property(
+        anyNeed,
+        anyPutUp,
+        fc.constantFrom(...CONFIDENCES),
+        (need, putUpM, confidence) => {
+          const z = normalQuantile(confidence);
+          const n = skeinsFor(need, putUpM, confidence);
+          expect(meets(need, n, putUpM, z)).toBe(true);
+          if (n > 0) expect(meets(need, n - 1, putUpM, z)).toBe(false);
+        },
+      ),
       FIXED_SEED,
     );
   });
@@ -104,11 +119,16 @@ describe('probabilityShort', () => {
 
   it('is at most what the confidence allows, with the skeins for it', () => {
     fc.assert(
-      fc.property(anyNeed, anyPutUp, fc.constantFrom(...CONFIDENCES), (need, putUpM, confidence) => {
-        const n = skeinsFor(need, putUpM, confidence);
-        fc.pre(n > 0);
-        expect(probabilityShort(need, n, putUpM)).toBeLessThanOrEqual(1 - confidence + 1e-12);
-      }),
+      fc.property(
+        anyNeed,
+        anyPutUp,
+        fc.constantFrom(...CONFIDENCES),
+        (need, putUpM, confidence) => {
+          const n = skeinsFor(need, putUpM, confidence);
+          fc.pre(n > 0);
+          expect(probabilityShort(need, n, putUpM)).toBeLessThanOrEqual(1 - confidence + 1e-12);
+        },
+      ),
       FIXED_SEED,
     );
   });

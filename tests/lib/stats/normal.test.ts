@@ -8,7 +8,8 @@ describe('normalQuantile', () => {
   });
 
   it('is odd about one half', () => {
-    for (const p of [0.6, 0.8, 0.99]) expect(normalQuantile(1 - p)).toBeCloseTo(-normalQuantile(p), 12);
+    for (const p of [0.6, 0.8, 0.99])
+      expect(normalQuantile(1 - p)).toBeCloseTo(-normalQuantile(p), 12);
   });
 });
 

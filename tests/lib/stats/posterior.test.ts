@@ -29,9 +29,7 @@ describe('posterior', () => {
     const { mean, covariance } = posterior(prior, []);
     expect(mean).toEqual([10, -2, 3]);
     [4, 0.25, 1].forEach((variance, i) =>
-      [0, 1, 2].forEach((j) =>
-        expect(covariance[i]?.[j]).toBeCloseTo(i === j ? variance : 0, 14),
-      ),
+      [0, 1, 2].forEach((j) => expect(covariance[i]?.[j]).toBeCloseTo(i === j ? variance : 0, 14)),
     );
   });
 
@@ -92,11 +90,16 @@ describe('posterior', () => {
 
   it('never becomes less sure of anything by one more observation', () => {
     fc.assert(
-      fc.property(observations, observation, fc.array(value, { minLength: 3, maxLength: 3 }), (all, next, row) => {
-        const before = varianceOf(posterior(prior, all), row);
-        const after = varianceOf(posterior(prior, [...all, next]), row);
-        expect(after).toBeLessThanOrEqual(before * (1 + 1e-9) + 1e-9);
-      }),
+      fc.property(
+        observations,
+        observation,
+        fc.array(value, { minLength: 3, maxLength: 3 }),
+        (all, next, row) => {
+          const before = varianceOf(posterior(prior, all), row);
+          const after = varianceOf(posterior(prior, [...all, next]), row);
+          expect(after).toBeLessThanOrEqual(before * (1 + 1e-9) + 1e-9);
+        },
+      ),
       FIXED_SEED,
     );
   });
@@ -112,16 +115,24 @@ describe('varianceOf', () => {
 describe('varianceAfter', () => {
   it('is what the belief has after such an observation, whatever it reads', () => {
     fc.assert(
-      fc.property(observations, observation, fc.array(value, { minLength: 3, maxLength: 3 }), (all, next, row) => {
-        const foreseen = varianceAfter(posterior(prior, all), row, next);
-        expect(foreseen).toBeCloseTo(varianceOf(posterior(prior, [...all, next]), row), 7);
-      }),
+      fc.property(
+        observations,
+        observation,
+        fc.array(value, { minLength: 3, maxLength: 3 }),
+        (all, next, row) => {
+          const foreseen = varianceAfter(posterior(prior, all), row, next);
+          expect(foreseen).toBeCloseTo(varianceOf(posterior(prior, [...all, next]), row), 7);
+        },
+      ),
       FIXED_SEED,
     );
   });
 
   it('leaves alone what the observation does not touch', () => {
     const belief = posterior(prior, []);
-    expect(varianceAfter(belief, [0, 1, 0], { row: [1, 0, 0], variance: 0.1 })).toBeCloseTo(0.25, 14);
+    expect(varianceAfter(belief, [0, 1, 0], { row: [1, 0, 0], variance: 0.1 })).toBeCloseTo(
+      0.25,
+      14,
+    );
   });
 });
