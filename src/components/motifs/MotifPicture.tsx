@@ -1,0 +1,44 @@
+import type { Gauge } from '../../lib/gauge/gauge';
+import { motifGeometry } from '../../lib/motifs/geometry';
+import type { Motif } from '../../lib/motifs/motif';
+import { showFabric, type Units } from '../../lib/units/display';
+import { MotifDrawing } from '../blanket/MotifDrawing';
+import { RuledFrame } from '../ui/RuledFrame';
+import { acrossWord, roundHexes, SHAPE_WORDS } from './motifWords';
+
+interface MotifPictureProps {
+  motif: Motif;
+  gauge: Gauge;
+  units: Units;
+  maxHeightPx?: number;
+  className?: string;
+}
+
+/** A motif to scale under the rule. */
+export function MotifPicture({ motif, gauge, units, maxHeightPx, className }: MotifPictureProps) {
+  const { acrossMm } = motifGeometry(motif, gauge, null);
+  const { widthMm, heightMm, topMm } = boxOf(motif.sides, acrossMm);
+  return (
+    <RuledFrame
+      {...{ widthMm, heightMm, units, maxHeightPx, className }}
+      label={`${motif.name}, a ${SHAPE_WORDS[motif.sides]} of ${motif.rounds.length} rounds, drawn to scale: ${showFabric(acrossMm, units)} ${acrossWord(motif.sides)}.`}
+    >
+      <g transform={`translate(${widthMm / 2} ${topMm})`}>
+        <MotifDrawing {...{ motif, gauge, acrossMm }} roundHexes={roundHexes(motif)} />
+      </g>
+    </RuledFrame>
+  );
+}
+
+/** The box round a motif that stands on a side, and how far down its middle lies, in mm. */
+export function boxOf(sides: number, acrossMm: number) {
+  if (sides === 0 || sides % 4 === 0) {
+    return { widthMm: acrossMm, heightMm: acrossMm, topMm: acrossMm / 2 };
+  }
+  const reachMm = acrossMm / 2 / Math.cos(Math.PI / sides);
+  if (sides === 3) {
+    const widthMm = acrossMm * Math.tan(Math.PI / 3);
+    return { widthMm, heightMm: acrossMm / 2 + reachMm, topMm: acrossMm / 2 };
+  }
+  return { widthMm: 2 * reachMm, heightMm: acrossMm, topMm: acrossMm / 2 };
+}
