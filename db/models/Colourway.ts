@@ -1,5 +1,4 @@
 import {
-  DataTypes,
   Model,
   type CreationOptional,
   type InferAttributes,

@@ -11,7 +11,7 @@ export const POST = handle({
     'Anyone may ask; nothing is kept. The same figures as in the browser, to the last digit.',
   who: 'anyone',
   stateless: true,
-  limit: 'read',
+  limit: 'heavy',
   body: planSchema,
   response: estimateSchema,
   example: { body: PLAN_EXAMPLE },

@@ -1,3 +1,4 @@
+import type { Model, ModelStatic } from 'sequelize';
 import { describe, expect, it } from 'vitest';
 import {
   Blanket,
@@ -120,7 +121,8 @@ const VALUES = [
 ] as const;
 
 describe('models', () => {
-  it.each(VALUES)('%o lets every field be read that it was built with', (model, values) => {
+  it.each(VALUES)('%o lets every field be read that it was built with', (each, values) => {
+    const model = each as unknown as ModelStatic<Model>;
     const row = model.build(values as never) as unknown as Record<string, unknown>;
     expect(Object.keys(model.getAttributes()).sort()).toEqual(Object.keys(values).sort());
     for (const [field, value] of Object.entries(values)) expect(row[field]).toEqual(value);
