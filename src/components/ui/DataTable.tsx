@@ -1,5 +1,4 @@
 import {
-  flexRender,
   getCoreRowModel,
   getFilteredRowModel,
   getPaginationRowModel,
@@ -12,7 +11,7 @@ import {
 } from '@tanstack/react-table';
 import { useState, type ReactNode } from 'react';
 import { Button } from './Button';
-import { classNames } from './classNames';
+import { DataTableBody } from './DataTableBody';
 import { DataTableHead } from './DataTableHead';
 import { DataTablePager } from './DataTablePager';
 import { DataTableToolbar } from './DataTableToolbar';
@@ -115,32 +114,7 @@ export function DataTable<Row>(props: DataTableProps<Row>) {
             {caption}
           </caption>
           <DataTableHead table={table} />
-          <tbody>
-            {shown.map((row) => (
-              <tr
-                key={row.id}
-                className={classNames(
-                  'border-t border-line',
-                  row.getIsSelected() ? 'bg-teal-soft' : 'hover:bg-sunk',
-                )}
-              >
-                {row.getVisibleCells().map((cell) => {
-                  const { meta } = cell.column.columnDef;
-                  const content = flexRender(cell.column.columnDef.cell, cell.getContext());
-                  const look = classNames('px-2.5 py-2', meta?.figures && 'figures text-end');
-                  return meta?.rowHeader ? (
-                    <th key={cell.id} scope="row" className={classNames(look, 'text-start')}>
-                      {content}
-                    </th>
-                  ) : (
-                    <td key={cell.id} className={look}>
-                      {content}
-                    </td>
-                  );
-                })}
-              </tr>
-            ))}
-          </tbody>
+          <DataTableBody rows={shown} />
         </table>
         {shown.length === 0 && (
           <p className="border-t border-line px-2.5 py-4 text-ink-2">
