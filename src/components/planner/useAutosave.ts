@@ -61,8 +61,12 @@ export function useAutosave(blanket: KeptVersion & { id: string }, now: Kept): A
     return () => clearTimeout(timer);
   }, [isSaved, isPending, conflict, error, mutate, now]);
 
-  // A failed save is tried again with the next change.
-  useEffect(() => reset(), [now.plan, now.title, reset]);
+  // A failed save is tried again with the next change; one under way is left to end.
+  const failed = useRef(false);
+  failed.current = error !== null;
+  useEffect(() => {
+    if (failed.current) reset();
+  }, [now.plan, now.title, reset]);
 
   useEffect(() => {
     if (isSaved) return;
