@@ -64,11 +64,17 @@ const layers = [
     noZod,
   ),
   layer(
-    ['db/**'],
+    ['db/{models,migrations}/**', 'db/*.ts'],
     [
       folders('server', 'client', 'components', 'layouts', 'pages', 'run'),
       'The database imports only from src/lib and src/schemas.',
     ],
+    noZod,
+  ),
+  // A seeder fills the tables as the site does: through the commands of src/server.
+  layer(
+    ['db/seeders/**'],
+    [folders('client', 'components', 'layouts', 'pages', 'run'), 'Seeders use src/server.'],
     noZod,
   ),
 ];

@@ -69,7 +69,6 @@ export const measurementSchema = z.discriminatedUnion(
   { error: 'Measurement must be of a kind: size, weight or length' },
 );
 export type Measurement = z.output<typeof measurementSchema>;
-export const MEASUREMENT_KINDS = ['size', 'weight', 'length'] as const;
 
 const swatchFields = {
   name: name('Swatch name'),

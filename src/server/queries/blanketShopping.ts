@@ -76,14 +76,25 @@ async function stashColourways(
     order: ['name', 'id'],
     transaction,
   });
+  const byColourway = lotsByColourway(lots);
   return rows.map((row) => ({
     id: row.id,
     name: row.name,
     hex: row.hex,
     yarnName: row.yarn?.name ?? '',
     weightCategory: row.yarn?.weightCategory ?? -1,
-    lots: lots.filter(({ colourway }) => colourway.id === row.id),
+    lots: byColourway.get(row.id) ?? [],
   }));
+}
+
+function lotsByColourway(lots: readonly PresentedLot[]): Map<string, PresentedLot[]> {
+  const byColourway = new Map<string, PresentedLot[]>();
+  for (const lot of lots) {
+    const found = byColourway.get(lot.colourway.id);
+    if (found) found.push(lot);
+    else byColourway.set(lot.colourway.id, [lot]);
+  }
+  return byColourway;
 }
 
 /** The lots that serve a colour, as the library counts them. */
@@ -91,16 +102,17 @@ function lotsOf(
   stash: ReadonlyMap<string, StashOfColour>,
   lots: readonly PresentedLot[],
 ): StashLot[] {
+  const byColourway = lotsByColourway(lots);
   return [...stash].flatMap(([colour, { colourway }]) =>
-    lots
-      .filter((lot) => lot.colourway.id === colourway?.id)
-      .map(({ lotCode, wholeSkeins, partSkeins, yarn }) => ({
+    (byColourway.get(colourway?.id ?? '') ?? []).map(
+      ({ lotCode, wholeSkeins, partSkeins, yarn }) => ({
         colour,
         lotCode,
         wholeSkeins,
         partMassesG: partSkeins.map(({ massG }) => massG),
         putUpMassG: yarn.putUp.massG,
         putUpLengthM: yarn.putUp.lengthM,
-      })),
+      }),
+    ),
   );
 }
