@@ -31,7 +31,10 @@ const noDatabase = [DATABASE, 'Only src/server and db talk to the database.'];
 const layers = [
   layer(
     ['src/lib/**'],
-    [packagesBut('mathjs', '@stdlib', 'papaparse'), 'The library is pure: mathjs, @stdlib and papaparse only.'],
+    [
+      packagesBut('mathjs', '@stdlib', 'papaparse'),
+      'The library is pure: mathjs, @stdlib and papaparse only.',
+    ],
     [
       folders('schemas', 'server', 'client', 'components', 'layouts', 'pages', 'run', 'db'),
       'The library imports nothing outside src/lib.',
