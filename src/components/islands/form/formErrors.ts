@@ -17,16 +17,18 @@ export function listErrors(errors: object, path = ''): FieldError[] {
 
 /**
  * Puts the errors of a refused save beside their fields. True when every part of the answer found
- * a place; false when it has to be said some other way.
+ * a place; false when it has to be said some other way. `prefix` is where the route's own fields
+ * stand in the form.
  */
 export function placeApiErrors<Values extends FieldValues>(
   error: unknown,
   setError: UseFormSetError<Values>,
+  prefix = '',
 ): boolean {
   if (!(error instanceof ApiError) || error.code !== 'invalid') return false;
   const fields = Object.entries(error.fields);
   for (const [path, message] of fields) {
-    setError(path as FieldPath<Values>, { type: 'server', message });
+    setError(`${prefix && `${prefix}.`}${path}` as FieldPath<Values>, { type: 'server', message });
   }
   return fields.length > 0;
 }
