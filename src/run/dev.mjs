@@ -41,6 +41,7 @@ async function launch(resources) {
       env: {
         ...process.env,
         ASTRO_TELEMETRY_DISABLED: '1',
+        ASTRO_DISABLE_UPDATE_CHECK: 'true',
         DATABASE_URL: database.url,
         ...sessionEnvironment(),
         ...mail,

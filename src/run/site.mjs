@@ -1,3 +1,4 @@
+import { rmSync } from 'node:fs';
 import { ensureBuild } from './build.mjs';
 import { openDatabaseServer } from './databaseServer.mjs';
 import { startMailSink } from './mailSink.mjs';
@@ -76,11 +77,13 @@ export async function openDisposableSite(resources, server, use) {
   const database = await makeTestDatabase(server.url, use, { template });
   resources.add(database.drop);
   await loadDemo(database.url);
+  const letters = stateSubfolder('test', `${use}-mail`);
+  rmSync(letters, { recursive: true });
   const env = {
     DATABASE_URL: database.url,
     AUTH_SECRET: newSecret(),
     RATE_LIMITS: 'off',
-    ...(await openMailSink(resources, stateSubfolder('test', `${use}-mail`))),
+    ...(await openMailSink(resources, letters)),
   };
   const web = await startWeb({ build, port: await nextFreePort(FIRST_TEST_PORT), env });
   resources.add(web.stop);
