@@ -53,7 +53,6 @@ const withBody =
 
 export const post = withBody('POST');
 export const put = withBody('PUT');
-export const patch = withBody('PATCH');
 
 /** DELETE, which carries no body; `remove` because `delete` is a word of the language. */
 export function remove<R extends Schema>(
