@@ -19,7 +19,7 @@ import {
   type Evidence,
 } from '../../src/lib/hand/hand';
 import { PIECE_SPREAD, readingVarianceM2 } from '../../src/lib/hand/readingVariance';
-import { useOfStitches } from '../../src/lib/hand/yarnUse';
+import { useOfStitches, type YarnUse } from '../../src/lib/hand/yarnUse';
 import { motifUse } from '../../src/lib/ledger/evidenceOf';
 import { TAIL_KEPT, TAIL_M } from '../../src/lib/ledger/tails';
 import { SKEIN_SPREAD } from '../../src/lib/skeins/skeins';
@@ -137,7 +137,7 @@ describe('finished pieces', () => {
     expect(acrossMm).toBeLessThan(inchesToMm(sideMostIn));
     const plan = plainPlan('group-square', {}, 6);
     const hand = learnHand(expectedStitchWidthMm(4), ['ch', 'dc', 'sl st'], []);
-    const grams = expectedM(hand, motifUse(plan, 0, 1) as never) / 2;
+    const grams = expectedM(hand, motifUse(plan, 0, 1) as YarnUse) / 2;
     const perArea = grams / acrossMm ** 2;
     const between = [sideMostIn, sideLeastIn].map((side) => published / inchesToMm(side) ** 2);
     expect(perArea).toBeGreaterThan((between[0] as number) * (1 - 2 * MAKER_SPREAD));

@@ -5,7 +5,7 @@ import type { PieceGroup } from '../../../src/lib/ledger/pieces';
 import { frozen } from '../../support/plans';
 
 const hand = learnHand(10, ['ch', 'sc'], []); // 52 mm a loop
-const group: PieceGroup = frozen({
+const group = frozen<PieceGroup>({
   colour: 'c1',
   count: 10,
   lines: [

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { expectedM, learnHand } from '../../../src/lib/hand/hand';
+import { NO_YARN, type YarnUse } from '../../../src/lib/hand/yarnUse';
 import { estimate } from '../../../src/lib/ledger/estimate';
 import { evidenceOf, motifUse, swatchUse } from '../../../src/lib/ledger/evidenceOf';
 import type { NextMeasurement } from '../../../src/lib/ledger/ledger';
@@ -19,11 +20,11 @@ const find = (plan: Plan, kind: NextMeasurement['kind'], motifs = 0) =>
   next(plan).find((each) => each.kind === kind && each.motifs === motifs) as NextMeasurement;
 
 /** What the plan's own hand expects of a piece, so that measuring it changes no mean. */
-function expectedOf(plan: Plan, use: ReturnType<typeof swatchUse>): number {
+function expectedOf(plan: Plan, use: YarnUse | null): number {
   const width = estimate(plan).stitchWidthMm;
   const stitches = new Set(evidenceOf(plan).flatMap((each) => [...each.use.loops.keys()]));
   for (const code of use?.loops.keys() ?? []) stitches.add(code);
-  return expectedM(learnHand(width, [...stitches], evidenceOf(plan)), use as never);
+  return expectedM(learnHand(width, [...stitches], evidenceOf(plan)), use ?? NO_YARN);
 }
 
 /** The margin of the plan once it has this piece of evidence as well. */
