@@ -18,13 +18,18 @@ export function Checkbox({
   ref,
   ...input
 }: CheckboxProps) {
-  const ownId = useId();
-  const id = input.id ?? ownId;
+  const id = useId();
   return (
-    <div className={classNames('flex min-h-6 items-center gap-2.5 coarse:min-h-11', className)}>
+    // The label is the whole box, so that the finger need not find the square.
+    <label
+      className={classNames(
+        'flex min-h-6 items-center gap-2.5 coarse:min-h-11',
+        labelHidden && 'min-w-6 justify-center coarse:min-w-11',
+        className,
+      )}
+    >
       <input
         {...input}
-        id={id}
         type="checkbox"
         ref={(element) => {
           // Only a property says "mixed"; there is no attribute for it.
@@ -33,16 +38,17 @@ export function Checkbox({
           else if (ref) ref.current = element;
         }}
         className="size-5 shrink-0"
+        aria-labelledby={`${id}-label`}
         aria-describedby={hint ? `${id}-hint` : undefined}
       />
       <span className={labelHidden ? 'sr-only' : ''}>
-        <label htmlFor={id}>{label}</label>
+        <span id={`${id}-label`}>{label}</span>
         {hint && (
           <span id={`${id}-hint`} className="block text-sm text-ink-2">
             {hint}
           </span>
         )}
       </span>
-    </div>
+    </label>
   );
 }

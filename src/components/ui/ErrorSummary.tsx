@@ -30,7 +30,7 @@ export function ErrorSummary({ errors, attempt }: ErrorSummaryProps) {
         {errors.map(({ field, message }) => (
           <li key={field}>
             <a
-              className="link text-madder"
+              className="link inline-flex items-center text-madder coarse:min-h-11"
               href={`#${field}`}
               onClick={(event) => {
                 event.preventDefault();
