@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 import { workingRoleSchema, WORKING_ROLES } from './roles';
 import {
   EMAIL_MAX_LENGTH,

@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 
 const PATH_MAX_LENGTH = 2000;
 

@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 
 export const UNIT_SYSTEMS = ['metric', 'imperial'] as const;
 export const TERM_SYSTEMS = ['us', 'uk'] as const;

@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 
 /** The roles a person may say they work as. */
 export const WORKING_ROLES = ['maker', 'designer', 'seller', 'teacher', 'student'] as const;

@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 
 /** The one zod type other layers need: they pass schemas on, they do not make them. */
 export type Schema = z.ZodType;

@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 import { preferencesSchema } from './preferences';
 import { roleSchema } from './roles';
 

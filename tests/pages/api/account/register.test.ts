@@ -151,7 +151,7 @@ describe('POST /api/account/register', () => {
     for (let call = 0; call < 5; call += 1) await register({ ...odile, email });
     const { status, headers } = await register({ ...odile, email });
     expect(status).toBe(429);
-    expect(headers.get('retry-after')).toBe('3600');
+    expect(Number(headers.get('retry-after'))).toBeGreaterThan(0);
     expect(mailbox.lettersTo(email)).toHaveLength(5);
   });
 });
