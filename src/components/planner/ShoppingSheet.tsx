@@ -31,7 +31,13 @@ export default function ShoppingSheet({ plan, estimate, units, onClose }: Shoppi
           <Button
             kind="primary"
             icon={Download}
-            onClick={() => download('shopping-list.csv', 'text/csv', shoppingCsv(list))}
+            onClick={() =>
+              download(
+                'shopping-list.csv',
+                'text/csv',
+                shoppingCsv({ ...list, yarnName: plan.yarn.name }, units),
+              )
+            }
           >
             Download CSV
           </Button>

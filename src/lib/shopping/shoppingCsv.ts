@@ -1,28 +1,59 @@
 import { toCsv } from '../csv/toCsv';
-import { currencyDecimals } from '../units/display';
-import type { ShoppingList } from './shoppingList';
+import { gramsToOunces, metresToYards } from '../units/conversion';
+import { currencyDecimals, type Units } from '../units/display';
+import type { ShoppingLine } from './shoppingList';
 
-/** A shopping list as CSV: metres and grams to one decimal, prices in the currency's own decimals. */
-export function shoppingCsv({ currency, lines }: ShoppingList): string {
+/** What the stash gives to a line, where there is a stash. */
+interface FromStash {
+  readonly colourway: { readonly name: string; readonly yarnName: string } | null;
+  readonly lots: readonly { readonly lotCode: string }[];
+}
+
+/** A shopping list of one yarn, with or without a stash. */
+export interface ShoppingRecord {
+  readonly yarnName: string;
+  readonly currency: string | null;
+  readonly lines: readonly (Omit<ShoppingLine, 'mixesLots'> & { readonly stash?: FromStash })[];
+}
+
+/**
+ * A shopping list as CSV, a line for each colour: lengths and masses to a tenth in the person's
+ * units, money in the decimals of its currency.
+ */
+export function shoppingCsv({ yarnName, currency, lines }: ShoppingRecord, units: Units): string {
+  const isMetric = units === 'metric';
+  const length = (valueM: number): number => tenth(isMetric ? valueM : metresToYards(valueM));
+  const mass = (valueG: number): number => tenth(isMetric ? valueG : gramsToOunces(valueG));
+  const [lengthUnit, massUnit] = isMetric ? ['m', 'g'] : ['yd', 'oz'];
   const decimals = currency === null ? 0 : currencyDecimals(currency);
   return toCsv(
     [
-      'colour',
-      'needed_m',
-      'needed_g',
-      'have_m',
-      'have_g',
-      'to_buy_skeins',
-      currency === null ? 'cost' : `cost_${currency.toLowerCase()}`,
+      'Yarn',
+      'Colour',
+      `Needed (${lengthUnit})`,
+      `Needed (${massUnit})`,
+      `Have (${lengthUnit})`,
+      `Have (${massUnit})`,
+      'To buy (skeins)',
+      'Price',
+      'Currency',
+      'From the stash',
+      'Dye lots',
     ],
     lines.map((line) => [
+      yarnName,
       line.name,
-      tenth(line.neededM),
-      tenth(line.neededG),
-      tenth(line.haveM),
-      tenth(line.haveG),
+      length(line.neededM),
+      mass(line.neededG),
+      length(line.haveM),
+      mass(line.haveG),
       line.toBuySkeins,
       line.costMinor === null ? null : (line.costMinor / 10 ** decimals).toFixed(decimals),
+      line.costMinor === null ? null : currency,
+      line.stash?.colourway
+        ? `${line.stash.colourway.yarnName}, ${line.stash.colourway.name}`
+        : null,
+      line.stash ? line.stash.lots.map(({ lotCode }) => lotCode || 'not known').join('; ') : null,
     ]),
   );
 }

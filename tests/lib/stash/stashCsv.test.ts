@@ -12,7 +12,7 @@ const lot: StashRecord = {
   totalG: 379.5,
   totalM: 759,
 };
-const linesOf = (lots: StashRecord[]) => stashCsv(lots).split('\r\n');
+const linesOf = (lots: StashRecord[]) => stashCsv(lots).trimEnd().split('\r\n');
 
 describe('stashCsv', () => {
   it('has a line for each dye lot under one header', () => {

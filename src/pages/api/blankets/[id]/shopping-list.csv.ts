@@ -1,8 +1,8 @@
+import { shoppingCsv } from '../../../../lib/shopping/shoppingCsv';
 import { csvText, idParams } from '../../../../schemas/fields';
 import { EXAMPLE_ID } from '../../../../server/examples';
 import { handle } from '../../../../server/handle';
-import { csvResponse } from '../../../../server/presenters/csv';
-import { shoppingCsv } from '../../../../server/presenters/shoppingCsv';
+import { csvResponse } from '../../../../server/presenters/csvResponse';
 import { getBlanketShopping } from '../../../../server/queries/blanketShopping';
 
 export const GET = handle({
