@@ -37,7 +37,7 @@ export function Checkbox({
           if (typeof ref === 'function') ref(element);
           else if (ref) ref.current = element;
         }}
-        className="size-5 shrink-0"
+        className="checkbox"
         aria-labelledby={`${id}-label`}
         aria-describedby={hint ? `${id}-hint` : undefined}
       />
