@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 import { choice, listQuery, moment, name, strict, uuid, version } from './fields';
 import { KEPT_LIMITS } from './limits';
 import { planSchema } from './plan';

@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 import { CAUSES, PARTS, type Estimate } from '../lib/ledger/ledger';
 
 const figure = z.number();

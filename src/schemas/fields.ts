@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 import { LIST_LIMITS, PLAN_LIMITS } from './limits';
 
 const inWords = new Intl.NumberFormat('en', { maximumFractionDigits: 6 });

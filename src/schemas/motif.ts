@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 import { MOTIF_SIDES } from '../lib/motifs/motif';
 import { choice, counted, list, moment, name, strict, version } from './fields';
 import { PLAN_LIMITS } from './limits';

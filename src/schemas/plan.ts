@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 import { CONFIDENCES } from '../lib/plan/plan';
 import { lengthM, massG, priceMinor, widthMm } from '../lib/units/quantities';
 import { choice, counted, hex, list, measured, name, strict } from './fields';

@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 import { CONFIDENCES } from '../lib/plan/plan';
 import { list, moment, name, strict, uuid, version } from './fields';
 import { PLAN_LIMITS } from './limits';

@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 import { counted, line, list, measured, moment, strict, uuid, version } from './fields';
 import { KEPT_LIMITS, PLAN_LIMITS } from './limits';
 import { moneySchema, putUpSchema, weightCategory } from './yarn';

@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 import { strict, uuid } from './fields';
 import { lotInput } from './stash';
 import { colourwayInput, yarnInput } from './yarn';

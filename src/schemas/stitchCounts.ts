@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from './zod';
 import { stitch } from '../lib/stitches/stitchTable';
 import { counted } from './fields';
 import { PLAN_LIMITS } from './limits';

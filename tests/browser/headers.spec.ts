@@ -39,7 +39,7 @@ test('everything the front page opens keeps to the policy', async ({ page }) => 
     });
   });
   await open(page, '/');
-  for (const name of ['Colours', 'Open the ledger', 'Compare joins', 'Shopping list']) {
+  for (const name of ['Change colours', 'Open the ledger', 'Compare joins', 'Shopping list']) {
     await page.getByRole('button', { name, exact: true }).first().click();
     await expect(page.getByRole('dialog')).toBeVisible();
     await page.keyboard.press('Escape');

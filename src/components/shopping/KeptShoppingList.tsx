@@ -1,6 +1,6 @@
 import { useMutation } from '@tanstack/react-query';
 import { Printer } from 'lucide-react';
-import { useState } from 'react';
+import { useRef, useState } from 'react';
 import { ApiError } from '../../client/api';
 import { tickLines } from '../../client/queries/shopping';
 import { showPrice, showYarn, type Units } from '../../lib/units/display';
@@ -31,21 +31,33 @@ export default function KeptShoppingList(props: KeptShoppingListProps) {
 function TickList({ initial, units: shown }: KeptShoppingListProps) {
   const units = useUnits(shown);
   const [list, setList] = useState(initial);
+  const latest = useRef(list);
+  /** Colours ticked here: shown at once, saved one after the other. */
+  const [bought, setBought] = useState(() => boughtOf(initial));
+  const take = (saved: KeptList) => {
+    latest.current = saved;
+    setList(saved);
+  };
   const tick = useMutation({
-    mutationFn: (bought: readonly string[]) => tickLines(list, bought),
-    onSuccess: setList,
+    scope: { id: 'ticks' },
+    mutationFn: (colours: readonly string[]) => tickLines(latest.current, colours),
+    onSuccess: take,
     onError: (error) => {
       // Ticked on another device meanwhile: show that list, to be ticked again.
       const current = error instanceof ApiError && keptShoppingListSchema.safeParse(error.current);
-      if (current && current.success) setList(current.data);
+      if (!current || !current.success) return;
+      take(current.data);
+      setBought(boughtOf(current.data));
     },
   });
   const toBuy = list.lines.filter(({ toBuySkeins }) => toBuySkeins > 0);
-  const bought = toBuy.filter((line) => line.bought).map(({ colour }) => colour);
-  const toggle = (colour: string) =>
-    tick.mutate(
-      bought.includes(colour) ? bought.filter((each) => each !== colour) : [...bought, colour],
-    );
+  function toggle(colour: string) {
+    const next = bought.includes(colour)
+      ? bought.filter((each) => each !== colour)
+      : [...bought, colour];
+    setBought(next);
+    tick.mutate(next);
+  }
   return (
     <div className="grid max-w-xl gap-6 pb-10">
       <header>
@@ -56,7 +68,11 @@ function TickList({ initial, units: shown }: KeptShoppingListProps) {
         </p>
       </header>
       {tick.error && (
-        <Notice kind="problem" live>
+        <Notice
+          kind="problem"
+          live
+          action={<Button onClick={() => tick.mutate(bought)}>Try again</Button>}
+        >
           {tick.error.message}
         </Notice>
       )}
@@ -65,8 +81,7 @@ function TickList({ initial, units: shown }: KeptShoppingListProps) {
         {toBuy.map((line) => (
           <li key={line.colour} className="flex items-center gap-4 border-t border-line py-2">
             <Checkbox
-              checked={line.bought}
-              disabled={tick.isPending}
+              checked={bought.includes(line.colour)}
               onChange={() => toggle(line.colour)}
               label={`${line.name}: ${line.toBuySkeins} ${line.toBuySkeins === 1 ? 'skein' : 'skeins'}`}
             />
@@ -92,3 +107,6 @@ function TickList({ initial, units: shown }: KeptShoppingListProps) {
     </div>
   );
 }
+
+const boughtOf = ({ lines }: KeptList): string[] =>
+  lines.filter((line) => line.bought && line.toBuySkeins > 0).map(({ colour }) => colour);
