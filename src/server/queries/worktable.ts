@@ -1,0 +1,66 @@
+import type { BlanketFace } from '../../lib/plan/blanketFace';
+import type { BlanketSummary } from '../../schemas/blanket';
+import type { BlanketShopping } from '../../schemas/shoppingList';
+import type { PresentedSwatch } from '../../schemas/swatch';
+import type { CurrentUser } from '../../schemas/user';
+import { AppError } from '../errors';
+import { listBlanketFaces } from './blanketFaces';
+import { listBlankets } from './blankets';
+import { getBlanketShopping } from './blanketShopping';
+import { listStash } from './stash';
+import { listSwatches } from './swatches';
+
+export interface BlanketOnHook {
+  blanket: BlanketSummary;
+  face: BlanketFace | undefined;
+  /** Null for a plan that has to be opened and saved first. */
+  shopping: BlanketShopping | null;
+}
+
+export interface Worktable {
+  onHook: BlanketOnHook[];
+  blanketCount: number;
+  swatches: PresentedSwatch[];
+  swatchCount: number;
+  stash: { lotCount: number; totalM: number };
+}
+
+const LATEST = 3;
+
+/** The latest of everything, and what each latest blanket is short of. */
+export async function getWorktable(user: CurrentUser): Promise<Worktable> {
+  const latest = { limit: LATEST, offset: 0 };
+  const blankets = await listBlankets(user, { ...latest, deleted: 'no' });
+  const [faces, swatches, stash, shopping] = await Promise.all([
+    listBlanketFaces(
+      user,
+      blankets.items.map(({ id }) => id),
+    ),
+    listSwatches(user, latest),
+    listStash(user),
+    Promise.all(blankets.items.map(({ id }) => shoppingOrNull(user, id))),
+  ]);
+  return {
+    onHook: blankets.items.map((blanket, i) => ({
+      blanket,
+      face: faces[blanket.id],
+      shopping: shopping[i] ?? null,
+    })),
+    blanketCount: blankets.total,
+    swatches: swatches.items,
+    swatchCount: swatches.total,
+    stash: {
+      lotCount: stash.total,
+      totalM: stash.items.reduce((sum, { totalM }) => sum + totalM, 0),
+    },
+  };
+}
+
+async function shoppingOrNull(user: CurrentUser, id: string): Promise<BlanketShopping | null> {
+  try {
+    return await getBlanketShopping(user, id);
+  } catch (error) {
+    if (error instanceof AppError && error.code === 'gone') return null;
+    throw error;
+  }
+}
