@@ -159,7 +159,7 @@ describe('GET /api/blankets/[id]/shopping-list.csv', () => {
     expect(Number(data[1]?.[2])).toBeCloseTo(first!.neededM, 0);
     expect(data[1]?.slice(6, 9)).toEqual([
       String(first!.skeins),
-      String(first!.costMinor! / 100),
+      (first!.costMinor! / 100).toFixed(2),
       'EUR',
     ]);
   });
