@@ -15,8 +15,15 @@ interface NumberInputProps<Values extends FieldValues> extends Omit<NumberLimits
   factor?: number;
 }
 
-/** Digits that a typed figure keeps through its conversion and back. */
-const DIGITS = 5;
+/** Decimals of a figure that was typed in another unit: 150 mm are 5.91 in. */
+const CONVERTED_DECIMALS = 2;
+
+/** The last number that could be read, as it was typed. */
+interface Typed {
+  stored: number | null;
+  shown: number | null;
+  factor: number;
+}
 
 /**
  * A number of a form, shown in the person's unit and stored in the program's. What cannot be read
@@ -26,10 +33,9 @@ export function NumberInput<Values extends FieldValues>(props: NumberInputProps<
   const { control, name, factor = 1, ...rest } = props;
   const { field, fieldState } = useController({ control, name });
   const stored = field.value as number | null;
-  // While the text cannot be read, the field is told of the last number that could.
-  const [readable, setReadable] = useState(stored);
+  const [typed, setTyped] = useState<Typed>({ stored, shown: inUnit(stored, factor), factor });
   const isUnreadable = Number.isNaN(stored);
-  const value = isUnreadable ? readable : stored;
+  const isAsTyped = isUnreadable || (typed.stored === stored && typed.factor === factor);
   return (
     <NumberField
       {...rest}
@@ -37,15 +43,19 @@ export function NumberInput<Values extends FieldValues>(props: NumberInputProps<
       name={name}
       // Empty is refused by the form's schema, in the words of its field.
       optional
-      value={
-        value === null ? null : Number((value / factor).toPrecision(factor === 1 ? 12 : DIGITS))
-      }
+      value={isAsTyped ? typed.shown : inUnit(stored, factor)}
       error={isUnreadable ? undefined : fieldState.error?.message}
       onCommit={(reading) => {
-        const next = reading.ok ? reading.value && reading.value * factor : NaN;
-        if (reading.ok) setReadable(next);
+        if (!reading.ok) return field.onChange(NaN);
+        const next = reading.value === null ? null : reading.value * factor;
+        setTyped({ stored: next, shown: reading.value, factor });
         field.onChange(next);
       }}
     />
   );
+}
+
+function inUnit(stored: number | null, factor: number): number | null {
+  if (stored === null || factor === 1) return stored;
+  return Number((stored / factor).toFixed(CONVERTED_DECIMALS));
 }

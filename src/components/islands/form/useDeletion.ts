@@ -43,8 +43,9 @@ export function useDeletion<Row>(options: DeletionOptions<Row>): Deletion<Row> {
     onSettled: refresh,
   });
   const undoing = useMutation({
-    async mutationFn() {
-      for (const row of deleted) await restore(row);
+    // The rows are handed over: closing the notice forgets them before this runs.
+    async mutationFn(rows: readonly Row[]) {
+      for (const row of rows) await restore(row);
       setDeleted([]);
     },
     onSettled: refresh,
@@ -59,7 +60,7 @@ export function useDeletion<Row>(options: DeletionOptions<Row>): Deletion<Row> {
       undoing.reset();
       removing.mutate(rows);
     },
-    undo: () => undoing.mutate(),
+    undo: () => undoing.mutate(deleted),
     forget: () => setDeleted([]),
   };
 }

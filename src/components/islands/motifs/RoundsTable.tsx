@@ -25,7 +25,7 @@ export function RoundsTable({ motif, geometry, units, terms }: RoundsTableProps)
         What the hook makes includes the chains that stand for a stitch and the slip stitches on the
         way.
       </p>
-      <div role="region" aria-label="Rounds" tabIndex={0} className="mt-3 overflow-x-auto">
+      <div role="region" aria-label="Table of rounds" tabIndex={0} className="mt-3 overflow-x-auto">
         <table className="w-full min-w-200">
           <thead>
             <tr className="text-sm text-ink-2">
