@@ -21,8 +21,8 @@ export function JoinFits({ motif, terms }: { motif: Motif; terms: Terms }) {
             )}
             <div>
               <h3>
-                {join.name}
-                <span className="font-normal text-ink-2">{fits ? ' fits' : ' does not fit'}</span>
+                {join.name}{' '}
+                <span className="font-normal text-ink-2">{fits ? 'fits' : 'does not fit'}</span>
               </h3>
               <p className="text-ink-2">{words}</p>
             </div>
