@@ -5,10 +5,13 @@ export type Schema = z.ZodType;
 export type Parsed<S extends Schema> = z.output<S>;
 export type Unparsed<S extends Schema> = z.input<S>;
 
-/** The JSON Schema (2020-12, as OpenAPI 3.1 uses) of what a schema takes in or gives out. */
-export function jsonSchemaOf(schema: Schema, io: 'input' | 'output'): Record<string, unknown> {
+/**
+ * The JSON Schema (2020-12, as OpenAPI 3.1 uses) of the JSON a schema parses: of requests, and of
+ * responses too, whose branded quantities are plain numbers on the wire.
+ */
+export function jsonSchemaOf(schema: Schema): Record<string, unknown> {
   const { $schema: _dialect, ...rest } = z.toJSONSchema(schema, {
-    io,
+    io: 'input',
     target: 'draft-2020-12',
     unrepresentable: 'any',
   });

@@ -83,7 +83,7 @@ function describe({ method, path, spec }: Operation): Json {
     required: true,
     content: {
       'application/json': {
-        schema: jsonSchemaOf(spec.body, 'input'),
+        schema: jsonSchemaOf(spec.body),
         example: spec.example.body,
       },
     },
@@ -120,7 +120,7 @@ function parametersOf(
   example: unknown,
 ): Json[] {
   if (!schema) return [];
-  const { properties = {}, required = [] } = jsonSchemaOf(schema, 'input') as {
+  const { properties = {}, required = [] } = jsonSchemaOf(schema) as {
     properties?: Record<string, Json>;
     required?: string[];
   };
@@ -136,7 +136,7 @@ function parametersOf(
 
 function success({ status = 200, mediaType = 'application/json', response }: RouteSpec): Json {
   if (status === 204) return { 204: { description: 'Done.' } };
-  const schema = jsonSchemaOf(response, 'output');
+  const schema = jsonSchemaOf(response);
   return { [status]: { description: 'Done.', content: { [mediaType]: { schema } } } };
 }
 

@@ -1,6 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import * as z from 'zod';
 import { handle } from '../../src/server/handle';
+import { planSchema } from '../../src/schemas/plan';
+import { jsonSchemaOf } from '../../src/schemas/schema';
 import { buildOpenApi, operationsOf } from '../../src/server/openapi';
 
 const PUT = handle({
@@ -66,6 +68,14 @@ describe('buildOpenApi', () => {
       415: 'Code unsupported.',
       429: 'Code too-many.',
       500: 'Code internal.',
+    });
+  });
+
+  it('says that a quantity with a unit is a number, in answers as in requests', () => {
+    expect(jsonSchemaOf(planSchema)).toMatchObject({
+      properties: {
+        yarn: { properties: { putUp: { properties: { lengthM: { type: 'number' } } } } },
+      },
     });
   });
 });
