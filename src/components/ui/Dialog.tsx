@@ -1,6 +1,6 @@
 import { X } from 'lucide-react';
 import { Dialog as Radix } from 'radix-ui';
-import type { ReactNode } from 'react';
+import { useRef, type ReactNode } from 'react';
 import { classNames } from './classNames';
 import { Button } from './Button';
 
@@ -32,6 +32,12 @@ export function Sheet({ wide, ...props }: DialogProps & { wide?: boolean }) {
 
 function Panel(props: DialogProps & { place: string }) {
   const { open, onOpenChange, title, description, children, actions, place } = props;
+  // Opened by state rather than by a trigger of its own, it has to remember where the focus was.
+  const opener = useRef<Element | null>(null);
+  function giveBackFocus(event: Event) {
+    event.preventDefault();
+    if (opener.current instanceof HTMLElement) opener.current.focus();
+  }
   return (
     <Radix.Root open={open} onOpenChange={onOpenChange}>
       <Radix.Portal>
@@ -41,6 +47,8 @@ function Panel(props: DialogProps & { place: string }) {
             'fixed z-50 flex flex-col border-edge bg-surface shadow-float outline-none',
             place,
           )}
+          onOpenAutoFocus={() => (opener.current = document.activeElement)}
+          onCloseAutoFocus={giveBackFocus}
           {...(description ? {} : { 'aria-describedby': undefined })}
         >
           <div className="flex items-start justify-between gap-4 px-5 pt-4 pb-2">
