@@ -1,4 +1,4 @@
-import type { WeightCategory } from '../plan/plan';
+import type { PlanSwatch, WeightCategory } from '../plan/plan';
 import type { StitchCode } from '../stitches/stitch';
 
 export interface SwatchSize {
@@ -26,6 +26,21 @@ export type SwatchMeasurement = SwatchSize | SwatchWeight | SwatchLength;
 export interface SwatchYarn {
   readonly weightCategory: WeightCategory;
   readonly putUp: { readonly massG: number; readonly lengthM: number };
+}
+
+/** One's own yarn, to choose for a swatch. */
+export interface YarnChoice extends SwatchYarn {
+  readonly id: string;
+  readonly name: string;
+  /** Colour to draw a swatch of it in. */
+  readonly hex: string | null;
+}
+
+/** One's own swatch that has a size, to take a gauge from. */
+export interface GaugeSwatch {
+  readonly id: string;
+  readonly name: string;
+  readonly swatch: PlanSwatch;
 }
 
 /** A flat swatch as kept: its counts, every measurement of it, and its yarn when that is known. */

@@ -1,14 +1,8 @@
 import { swatchGauge } from '../../lib/swatches/swatchGauge';
-import type { PlanSwatch } from '../../lib/plan/plan';
+import type { GaugeSwatch } from '../../lib/swatches/swatchRecord';
 import { widthMm } from '../../lib/units/quantities';
 import type { CurrentUser } from '../../schemas/user';
 import { listSwatches } from './swatches';
-
-interface GaugeSwatch {
-  id: string;
-  name: string;
-  swatch: PlanSwatch;
-}
 
 /** One's swatches that have a size, as a plan takes them: what a gauge can be chosen from. */
 export async function listGaugeSwatches(user: CurrentUser): Promise<GaugeSwatch[]> {

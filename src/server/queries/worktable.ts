@@ -1,29 +1,12 @@
-import type { BlanketFace } from '../../lib/plan/blanketFace';
-import type { BlanketSummary } from '../../schemas/blanket';
 import type { BlanketShopping } from '../../schemas/shoppingList';
-import type { PresentedSwatch } from '../../schemas/swatch';
 import type { CurrentUser } from '../../schemas/user';
+import type { Worktable } from '../../schemas/worktable';
 import { AppError } from '../errors';
 import { listBlanketFaces } from './blanketFaces';
 import { listBlankets } from './blankets';
 import { getBlanketShopping } from './blanketShopping';
 import { listStash } from './stash';
 import { listSwatches } from './swatches';
-
-export interface BlanketOnHook {
-  blanket: BlanketSummary;
-  face: BlanketFace | undefined;
-  /** Null for a plan that has to be opened and saved first. */
-  shopping: BlanketShopping | null;
-}
-
-export interface Worktable {
-  onHook: BlanketOnHook[];
-  blanketCount: number;
-  swatches: PresentedSwatch[];
-  swatchCount: number;
-  stash: { lotCount: number; totalM: number };
-}
 
 const LATEST = 3;
 

@@ -1,13 +1,6 @@
-import type { SwatchYarn } from '../../lib/swatches/swatchRecord';
+import type { YarnChoice } from '../../lib/swatches/swatchRecord';
 import type { CurrentUser } from '../../schemas/user';
 import { listYarns } from './yarns';
-
-interface YarnChoice extends SwatchYarn {
-  id: string;
-  name: string;
-  /** Colour to draw a swatch of it in. */
-  hex: string | null;
-}
 
 /** One's yarns as a form offers them. */
 export async function listYarnChoices(user: CurrentUser): Promise<YarnChoice[]> {

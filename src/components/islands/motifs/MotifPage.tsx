@@ -15,7 +15,8 @@ import { Fact } from '../../ui/Fact';
 import { Notice } from '../../ui/Notice';
 import { Select } from '../../ui/Select';
 import { useTerms, useUnits } from '../../ui/useUnits';
-import { gaugeChoices, type GaugeSwatch } from './gaugeChoices';
+import type { GaugeSwatch } from '../../../lib/swatches/swatchRecord';
+import { gaugeChoices } from './gaugeChoices';
 import { JoinFits } from './JoinFits';
 import { RoundsTable } from './RoundsTable';
 

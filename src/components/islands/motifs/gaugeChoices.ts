@@ -1,14 +1,8 @@
 import type { PlanSwatch, WeightCategory } from '../../../lib/plan/plan';
+import type { GaugeSwatch } from '../../../lib/swatches/swatchRecord';
 import { expectedStitchWidthMm, YARN_CATEGORIES } from '../../../lib/yarnCategories';
 import type { Units } from '../../../lib/units/display';
 import { GAUGE_SPAN, perSpan } from '../swatches/swatchWords';
-
-/** A swatch of one's own that a gauge can be taken from. */
-export interface GaugeSwatch {
-  id: string;
-  name: string;
-  swatch: PlanSwatch;
-}
 
 export interface GaugeChoice {
   key: string;

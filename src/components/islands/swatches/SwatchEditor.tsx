@@ -18,13 +18,8 @@ import { DeleteSwatch } from './DeleteSwatch';
 import { MeasurementList } from './MeasurementList';
 import { SwatchFields } from './SwatchFields';
 import { findingsOf, SwatchFindings, type Findings } from './SwatchFindings';
-import {
-  blankSwatch,
-  exampleSwatch,
-  PLAIN_YARN,
-  readableSwatch,
-  type YarnChoice,
-} from './swatchForm';
+import type { YarnChoice } from '../../../lib/swatches/swatchRecord';
+import { blankSwatch, exampleSwatch, PLAIN_YARN, readableSwatch } from './swatchForm';
 import { GAUGE_SPAN, perSpan, showLoop, swatchWording } from './swatchWords';
 import { useSwatchForm } from './useSwatchForm';
 

@@ -5,7 +5,7 @@ import { stitchWord, type Terms } from '../../planner/stitchWord';
 import { Field } from '../../ui/Field';
 import { Select } from '../../ui/Select';
 import { NumberInput } from '../form/NumberInput';
-import type { YarnChoice } from './swatchForm';
+import type { YarnChoice } from '../../../lib/swatches/swatchRecord';
 
 interface SwatchFieldsProps {
   form: UseFormReturn<SwatchInput>;

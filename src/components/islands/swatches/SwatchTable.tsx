@@ -20,7 +20,7 @@ import { useDeletion } from '../form/useDeletion';
 import { WithQueries } from '../WithQueries';
 import { SampleSwatch } from './SampleSwatch';
 import { swatchColumns } from './swatchColumns';
-import type { YarnChoice } from './swatchForm';
+import type { YarnChoice } from '../../../lib/swatches/swatchRecord';
 import { swatchRow, type SwatchRow } from './swatchRow';
 
 interface SwatchTableProps {

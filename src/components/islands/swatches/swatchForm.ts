@@ -1,4 +1,4 @@
-import type { SwatchRecord, SwatchYarn } from '../../../lib/swatches/swatchRecord';
+import type { SwatchRecord, YarnChoice } from '../../../lib/swatches/swatchRecord';
 import { stitch } from '../../../lib/stitches/stitchTable';
 import {
   measurementSchema,
@@ -7,14 +7,6 @@ import {
   type Measurement,
   type SwatchInput,
 } from '../../../schemas/swatch';
-
-/** A yarn to choose for a swatch. */
-export interface YarnChoice extends SwatchYarn {
-  id: string;
-  name: string;
-  /** Colour to draw the swatch in. */
-  hex: string | null;
-}
 
 /** How the program draws yarn whose colour it does not know. */
 export const PLAIN_YARN = '#b9a58a';

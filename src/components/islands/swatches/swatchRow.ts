@@ -2,7 +2,8 @@ import type { SwatchYarnFindings } from '../../../lib/swatches/swatchYarn';
 import type { SwatchGauge } from '../../../lib/swatches/swatchGauge';
 import type { PresentedSwatch } from '../../../schemas/swatch';
 import { findingsOf } from './SwatchFindings';
-import { readableSwatch, type YarnChoice } from './swatchForm';
+import type { YarnChoice } from '../../../lib/swatches/swatchRecord';
+import { readableSwatch } from './swatchForm';
 
 /** A swatch as the list shows it. */
 export interface SwatchRow {

@@ -3,7 +3,7 @@ import { mmToInches } from '../../../lib/units/conversion';
 import type { Measurement, SwatchInput } from '../../../schemas/swatch';
 import { codeWord, type Terms } from '../../planner/stitchWord';
 import type { Wording } from '../form/differences';
-import type { YarnChoice } from './swatchForm';
+import type { YarnChoice } from '../../../lib/swatches/swatchRecord';
 
 const NB = '\u00a0';
 
