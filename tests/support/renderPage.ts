@@ -12,7 +12,7 @@ interface PageVisit {
   preferences?: Preferences;
   params?: Record<string, string>;
   /** In place of what the middleware sets. */
-  locals?: object;
+  locals?: Partial<App.Locals>;
 }
 
 /** Answers a page as the server would, islands included, for whoever visits it. */
@@ -26,6 +26,6 @@ export async function renderPage(
   return container.renderToResponse(page, {
     request: new Request(new URL(url, ORIGIN)),
     params,
-    locals: visit.locals ?? { user, preferences },
+    locals: (visit.locals ?? { user, preferences }) as App.Locals,
   });
 }
