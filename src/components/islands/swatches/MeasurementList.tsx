@@ -81,10 +81,10 @@ function MeasurementItem({ form, units, kind, index, onRemove }: MeasurementItem
   return (
     <li className="grid grid-cols-6 gap-x-2.5 gap-y-2 py-3">
       <div className="col-span-6 flex items-center gap-2">
-        <h3 className="flex flex-1 items-center gap-1.5">
+        <p className="flex flex-1 items-center gap-1.5 font-bold">
           <Icon size={16} aria-hidden className="text-ink-2" />
           {word}
-        </h3>
+        </p>
         <input
           type="date"
           id={name}
