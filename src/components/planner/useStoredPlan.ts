@@ -14,7 +14,7 @@ export function useStoredPlan({ plan, change }: PlanEditing, asked: boolean): bo
   useEffect(() => {
     if (ready) return;
     let gone = false;
-    storedPlan().then((stored) => {
+    void storedPlan().then((stored) => {
       if (gone) return;
       if (stored) change(() => stored, 'brought back');
       setReady(true);

@@ -1,7 +1,6 @@
 import Papa from 'papaparse';
 
 /** Text that begins so would run as a formula in a spreadsheet (OWASP ASVS 5, 1.2.10). */
-// eslint-disable-next-line no-control-regex -- NUL and control characters are what it looks for
 const FORMULA_START = /^[=+\-@\t\r\0]/;
 
 /** A cell: numbers stay numbers, so that a negative one is not taken for a formula. */
