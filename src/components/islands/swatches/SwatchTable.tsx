@@ -22,10 +22,13 @@ import { SampleSwatch } from './SampleSwatch';
 import { swatchColumns } from './swatchColumns';
 import type { YarnChoice } from '../../../lib/swatches/swatchRecord';
 import { swatchRow, type SwatchRow } from './swatchRow';
+import { useSwatchFigures, type FiguresBySave } from './useSwatchFigures';
 
 interface SwatchTableProps {
   swatches: PresentedSwatch[];
   yarns: YarnChoice[];
+  /** Worked out by the server for these very saves. */
+  figures: FiguresBySave;
   units: Units;
   terms: Terms;
 }
@@ -38,7 +41,7 @@ export function SwatchTable(props: SwatchTableProps) {
   );
 }
 
-function Table({ swatches, yarns, ...preferences }: SwatchTableProps) {
+function Table({ swatches, yarns, figures: known, ...preferences }: SwatchTableProps) {
   const units = useUnits(preferences.units);
   const terms = useTerms(preferences.terms);
   const query = useQuery({ ...swatchesQuery, initialData: swatches });
@@ -47,12 +50,15 @@ function Table({ swatches, yarns, ...preferences }: SwatchTableProps) {
     remove: ({ swatch }) => deleteSwatch(swatch.id),
     restore: ({ swatch }) => createSwatch(swatchContent(swatch)),
   });
+  const figures = useSwatchFigures(query.data, yarns, known);
   const rows = useMemo(
-    () => query.data.map((swatch) => swatchRow(swatch, yarns)),
-    [query.data, yarns],
+    () => query.data.map((swatch) => swatchRow(swatch, yarns, figures)),
+    [query.data, yarns, figures],
   );
   const columns = useMemo(() => {
-    const sizes = rows.flatMap(({ gauge }) => (gauge ? [gauge.widthMm, gauge.heightMm] : []));
+    const sizes = rows.flatMap((row) =>
+      row.figures ? [row.figures.widthMm, row.figures.heightMm] : [],
+    );
     return swatchColumns(units, terms, Math.max(1, ...sizes));
   }, [rows, units, terms]);
 

@@ -35,26 +35,26 @@ export function swatchColumns(
     },
     {
       id: 'gauge',
-      accessorFn: ({ gauge }) => gauge?.stitchWidth.mean ?? 0,
+      accessorFn: ({ figures }) => figures?.stitchWidthMm ?? 0,
       header: `Stitches × rows in ${GAUGE_SPAN[units].words}`,
       enableGlobalFilter: false,
       meta: { figures: true },
       cell: ({ row: { original } }) =>
-        original.gauge ? (
-          `${perSpan(original.gauge.stitchWidth.mean, units)} × ${perSpan(original.gauge.rowHeight.mean, units)}`
+        original.figures ? (
+          `${perSpan(original.figures.stitchWidthMm, units)} × ${perSpan(original.figures.rowHeightMm, units)}`
         ) : (
           <Missing>not measured</Missing>
         ),
     },
     {
       id: 'loop',
-      accessorFn: ({ yarn }) => yarn?.after.meanMm ?? 0,
+      accessorFn: ({ figures }) => figures?.loopMm ?? 0,
       header: 'Yarn in a loop',
       enableGlobalFilter: false,
       meta: { figures: true },
       cell: ({ row: { original } }) =>
-        original.yarn ? (
-          showLoop(original.yarn.after.meanMm, units)
+        original.figures?.loopMm ? (
+          showLoop(original.figures.loopMm, units)
         ) : (
           <Missing>not weighed</Missing>
         ),
@@ -78,23 +78,23 @@ function Missing({ children }: { children: string }) {
 }
 
 function NameCell({ row, pxPerMm }: { row: SwatchRow; pxPerMm: number }) {
-  const { swatch, gauge, hex } = row;
+  const { swatch, figures, hex } = row;
   return (
     <span className="flex items-center gap-3">
       <span className="flex shrink-0 justify-center" style={{ width: THUMB_PX }}>
-        {gauge ? (
+        {figures ? (
           <svg
             aria-hidden
-            width={gauge.widthMm * pxPerMm}
-            height={gauge.heightMm * pxPerMm}
-            viewBox={`0 0 ${gauge.widthMm} ${gauge.heightMm}`}
+            width={figures.widthMm * pxPerMm}
+            height={figures.heightMm * pxPerMm}
+            viewBox={`0 0 ${figures.widthMm} ${figures.heightMm}`}
           >
             <SwatchDrawing
               stitch={swatch.stitch}
               stitches={swatch.stitches}
               rows={swatch.rows}
-              widthMm={gauge.widthMm}
-              heightMm={gauge.heightMm}
+              widthMm={figures.widthMm}
+              heightMm={figures.heightMm}
               hex={hex ?? PLAIN_YARN}
             />
           </svg>
