@@ -10,6 +10,10 @@ import { expect, test } from './support/test';
 const button = (page: Page, name: string) =>
   page.locator('[data-answer], form').getByRole('button', { name, exact: true }).first();
 
+/** As long as a finger stays on a key: a choice follows the arrow only while it is down. */
+const arrow = (page: Page, key: 'ArrowLeft' | 'ArrowRight') =>
+  page.keyboard.press(key, { delay: 80 });
+
 /** Opens a sheet from its button, does something in it, leaves by Escape: the focus is back. */
 async function inSheet(page: Page, opener: string, work: () => Promise<void>): Promise<void> {
   await tabTo(page, button(page, opener));
@@ -59,10 +63,11 @@ test('the whole job is done from the keyboard', async ({ page }) => {
   await now(plan);
 
   await tabTo(page, page.getByRole('radio', { name: 'So many motifs' }));
-  await page.keyboard.press('ArrowRight');
+  await arrow(page, 'ArrowRight');
   await expect(page.getByRole('radio', { name: 'A size wanted' })).toBeFocused();
+  await expect(field(page, 'Blanket', 'Width')).toBeVisible();
   await expectFocusSeen(page);
-  await page.keyboard.press('ArrowLeft');
+  await arrow(page, 'ArrowLeft');
   await now({ ...plan, size: { by: 'grid', rows: 10, columns: 8 } });
 
   await tabTo(page, field(page, 'Blanket', 'Join'));
@@ -70,7 +75,7 @@ test('the whole job is done from the keyboard', async ({ page }) => {
   await now({ ...plan, join: { ...plan.join, key: 'whip-stitch' } });
 
   await tabTo(page, page.getByRole('radio', { name: '95 %' }));
-  await page.keyboard.press('ArrowRight');
+  await arrow(page, 'ArrowRight');
   await now({ ...plan, confidence: 0.99 });
 
   await tabTo(page, page.getByRole('button', { name: /Barley/ }).first());

@@ -28,6 +28,8 @@ export function JoinsChart({ rows, plan, units }: JoinsChartProps) {
       <div aria-hidden className="keeps-colour mt-1" style={{ height: 30 * data.length + 8 }}>
         <ResponsiveContainer>
           <BarChart
+            // The chart is a picture of the table beneath: nothing in it takes the focus.
+            accessibilityLayer={false}
             data={data}
             layout="vertical"
             margin={{ left: 0, right: 72, top: 4, bottom: 4 }}

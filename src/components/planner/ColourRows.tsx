@@ -88,7 +88,7 @@ function ColourRow({ plan, units, chosen, onChoose, onLedger, colour, mostM }: C
       <td className="text-end">
         <button
           type="button"
-          className="figures min-h-9 rounded-control px-1 text-end hocus:text-teal"
+          className="figures min-h-9 rounded-control px-1 text-end coarse:min-h-11 hocus:text-teal"
           onClick={() => onLedger(colour.colour)}
           aria-label={`${yarnFigure(meanM, units)} ${unit}, give or take ${yarnFigure(neededM - meanM, units)}: how ${name} is worked out`}
         >

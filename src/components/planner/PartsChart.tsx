@@ -33,6 +33,8 @@ export default function PartsChart({ plan, estimate, units }: PartsChartProps) {
       <div aria-hidden className="keeps-colour h-44">
         <ResponsiveContainer>
           <BarChart
+            // A picture with its figures in words: nothing in it takes the focus.
+            accessibilityLayer={false}
             data={rows}
             layout="vertical"
             margin={{ left: 0, right: 0, top: 4, bottom: 0 }}

@@ -19,10 +19,14 @@ export async function ready(page: Page): Promise<void> {
       return !first || Object.keys(first).some((key) => key.startsWith('__reactFiber$'));
     }),
   );
-  await page.evaluate(
+  await frames(page);
+}
+
+/** Until what was just changed is painted, and whatever waits for the painting has run. */
+export const frames = (page: Page): Promise<void> =>
+  page.evaluate(
     () =>
-      new Promise<void>((done) => {
+      new Promise((done) => {
         requestAnimationFrame(() => requestAnimationFrame(() => setTimeout(done)));
       }),
   );
-}
