@@ -130,29 +130,6 @@ export const moment = z.iso.datetime();
 /** A table as RFC 4180, for a spreadsheet. */
 export const csvText = z.string();
 
-const TEXT_NUMBER = /^[+-]?(\d+([.,]\d*)?|[.,]\d+)$/;
-const GROUPED = /^[+-]?[1-9]\d{0,2},\d{3}$/;
-
-/**
- * What a person types in a number field. Empty is missing, never 0; a decimal comma is read as a
- * point, except where "1,500" could as well mean fifteen hundred.
- */
-export const numberFromText = z.codec(z.string(), z.number(), {
-  decode(text, context) {
-    const typed = text.trim();
-    const message =
-      typed === ''
-        ? 'Write a number'
-        : GROUPED.test(typed)
-          ? `Write ${typed.replace(',', '')} or ${typed.replace(',', '.')}: the comma could mean either`
-          : 'Write a number, such as 12.5';
-    if (TEXT_NUMBER.test(typed) && !GROUPED.test(typed)) return Number(typed.replace(',', '.'));
-    context.issues.push({ code: 'custom', message, input: text });
-    return z.NEVER;
-  },
-  encode: (value) => String(value),
-});
-
 const pageNumber = (what: string, least: number, most: number, usual: number) =>
   z
     .string()

@@ -1,4 +1,4 @@
-import { numberFromText } from '../../schemas/fields';
+import { numberFromText } from '../../lib/units/numberFromText';
 
 export interface NumberLimits {
   min?: number;
@@ -17,9 +17,8 @@ const shown = new Intl.NumberFormat('en', { maximumFractionDigits: 6 });
 /** Reads what was typed in a number field, or says in words what is wrong with it. Empty is never 0. */
 export function readNumber(typed: string, limits: NumberLimits = {}): NumberReading {
   if (limits.optional && typed.trim() === '') return { ok: true, value: null };
-  const parsed = numberFromText.safeDecode(typed);
-  if (!parsed.success) return { ok: false, error: parsed.error.issues[0]?.message ?? '' };
-  return withinLimits(parsed.data, limits);
+  const parsed = numberFromText(typed);
+  return parsed.ok ? withinLimits(parsed.value, limits) : parsed;
 }
 
 function withinLimits(value: number, { min, max, whole, unit }: NumberLimits): NumberReading {
