@@ -18,6 +18,7 @@ import { Select } from '../../ui/Select';
 import { useUnits } from '../../ui/useUnits';
 import { DeletionNotice } from '../form/DeletionNotice';
 import { failureWords } from '../form/formErrors';
+import { StaleNotice } from '../form/StaleNotice';
 import { useDeletion } from '../form/useDeletion';
 import { WithQueries } from '../WithQueries';
 import { BlanketItem } from './BlanketItem';
@@ -74,7 +75,7 @@ function List(props: BlanketListProps) {
     1,
     ...query.data.flatMap(({ figures }) => (figures ? [figures.widthMm, figures.heightMm] : [])),
   );
-  const error = query.error ?? beginning.error ?? copying.error;
+  const error = beginning.error ?? copying.error;
   const newBlanket = (
     <Button
       kind="primary"
@@ -93,6 +94,7 @@ function List(props: BlanketListProps) {
         {query.data.length > 0 && newBlanket}
       </div>
       <DeletionNotice deletion={deletion} what={blanketsWords} />
+      <StaleNotice error={query.error} onRetry={() => void query.refetch()} />
       {error && (
         <Notice kind="problem" live className="mb-4">
           {failureWords(error)}

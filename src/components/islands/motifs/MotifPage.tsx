@@ -44,7 +44,7 @@ export function MotifPage(props: MotifPageProps) {
   const { sides } = motif;
   const across = showFabric(geometry.acrossMm, units);
   const stitches = joinStitches(motif);
-  const plan = `/?motif=${motif.key}`;
+  const plan = `/?motif=${motif.key}&rounds=${rounds}`;
 
   return (
     <>

@@ -2,12 +2,14 @@ import { FormProvider, useWatch, type UseFormReturn } from 'react-hook-form';
 import type { Units } from '../../../lib/units/display';
 import type { StashEntry } from '../../../schemas/stashEntry';
 import { skeinLengthM, skeinMassG, type Money, type PresentedYarn } from '../../../schemas/yarn';
+import type { Terms } from '../../planner/stitchWord';
 import { Button } from '../../ui/Button';
 import { Sheet } from '../../ui/Dialog';
 import { ErrorSummary } from '../../ui/ErrorSummary';
 import { Notice } from '../../ui/Notice';
 import { Select } from '../../ui/Select';
 import { listErrors } from '../form/formErrors';
+import { useDiscardGuard } from '../form/useDiscardGuard';
 import { ColourFields } from './ColourFields';
 import { LotFields } from './LotFields';
 import { BLANK_COLOUR, BLANK_YARN } from './stashForm';
@@ -18,6 +20,7 @@ interface AddLotSheetProps {
   yarns: readonly PresentedYarn[];
   initial: StashEntry;
   units: Units;
+  terms: Terms;
   currency: Money['currency'];
   onChange: () => void;
   onClose: () => void;
@@ -25,26 +28,27 @@ interface AddLotSheetProps {
 
 /** Yarn, colour and lot in one form; what is there already is chosen, what is not is typed. */
 export function AddLotSheet(props: AddLotSheetProps) {
-  const { yarns, initial, units, currency, onChange, onClose } = props;
+  const { yarns, initial, units, terms, currency, onChange, onClose } = props;
   const { form, failure, isSaving, submit } = useStashEntry({
     initial,
     onSaved: onClose,
     onChange,
   });
   const entry = useWatch({ control: form.control }) as StashEntry;
-  const { errors, submitCount } = form.formState;
+  const { errors, submitCount, isDirty } = form.formState;
+  const { requestClose, question } = useDiscardGuard(isDirty, onClose);
   const yarn = entry.yarn ?? yarns.find(({ id }) => id === entry.yarnId);
   return (
     <Sheet
       open
-      onOpenChange={(open) => !open && onClose()}
+      onOpenChange={(open) => !open && requestClose()}
       title="Add yarn to the stash"
       actions={
         <>
           <Button kind="primary" type="submit" form="add-lot" busy={isSaving && 'Saving…'}>
             Add to the stash
           </Button>
-          <Button onClick={onClose}>Cancel</Button>
+          <Button onClick={requestClose}>Cancel</Button>
         </>
       }
     >
@@ -57,7 +61,7 @@ export function AddLotSheet(props: AddLotSheetProps) {
           )}
           <ErrorSummary errors={listErrors(errors)} attempt={submitCount} />
           <YarnChoice form={form} yarns={yarns} />
-          {entry.yarn && <YarnFields {...{ units, currency }} />}
+          {entry.yarn && <YarnFields {...{ units, terms, currency }} />}
           <ColourChoice form={form} yarns={yarns} />
           {entry.colour && <ColourFields weight={yarn?.weightCategory ?? 4} />}
           <div className="border-t border-line pt-4">
@@ -65,6 +69,7 @@ export function AddLotSheet(props: AddLotSheetProps) {
           </div>
         </form>
       </FormProvider>
+      {question}
     </Sheet>
   );
 }

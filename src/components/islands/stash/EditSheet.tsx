@@ -6,6 +6,7 @@ import { ErrorSummary } from '../../ui/ErrorSummary';
 import { SaveStatus, type SaveState } from '../../ui/SaveStatus';
 import { ConflictDialog, type Difference } from '../form/ConflictDialog';
 import { listErrors } from '../form/formErrors';
+import { useDiscardGuard } from '../form/useDiscardGuard';
 
 interface EditSheetProps<Values extends FieldValues> {
   title: string;
@@ -33,11 +34,12 @@ interface EditSheetProps<Values extends FieldValues> {
 export function EditSheet<Values extends FieldValues>(props: EditSheetProps<Values>) {
   const { title, description, what, editing, differences, more, onClose, children } = props;
   const { form, state, isSaving, submit } = editing;
-  const { errors, submitCount } = form.formState;
+  const { errors, submitCount, isDirty } = form.formState;
+  const { requestClose, question } = useDiscardGuard(isDirty, onClose);
   return (
     <Sheet
       open
-      onOpenChange={(open) => !open && onClose()}
+      onOpenChange={(open) => !open && requestClose()}
       title={title}
       description={description}
       actions={
@@ -56,6 +58,7 @@ export function EditSheet<Values extends FieldValues>(props: EditSheetProps<Valu
           {children}
         </form>
       </FormProvider>
+      {question}
       {differences && (
         <ConflictDialog
           what={what}

@@ -6,14 +6,14 @@ import { yarnsQuery } from '../../../client/queries/yarns';
 import { showYarn, type Units } from '../../../lib/units/display';
 import type { PresentedLot } from '../../../schemas/stash';
 import type { Money, PresentedYarn } from '../../../schemas/yarn';
+import type { Terms } from '../../planner/stitchWord';
 import { Button } from '../../ui/Button';
 import { Fact } from '../../ui/Fact';
 import { countInWords } from '../../ui/inWords';
-import { Notice } from '../../ui/Notice';
 import { SegmentedControl } from '../../ui/SegmentedControl';
-import { useUnits } from '../../ui/useUnits';
+import { useTerms, useUnits } from '../../ui/useUnits';
 import { DeletionNotice } from '../form/DeletionNotice';
-import { failureWords } from '../form/formErrors';
+import { StaleNotice } from '../form/StaleNotice';
 import { useDeletion } from '../form/useDeletion';
 import { WithQueries } from '../WithQueries';
 import { NoStash } from './NoStash';
@@ -26,6 +26,7 @@ interface StashPageProps {
   lots: PresentedLot[];
   yarns: PresentedYarn[];
   units: Units;
+  terms: Terms;
   currency: Money['currency'];
 }
 
@@ -39,6 +40,7 @@ export function StashPage(props: StashPageProps) {
 
 function Stash(props: StashPageProps) {
   const units = useUnits(props.units);
+  const terms = useTerms(props.terms);
   const client = useQueryClient();
   const stash = useQuery({ ...stashQuery, initialData: props.lots });
   const yarns = useQuery({ ...yarnsQuery, initialData: props.yarns });
@@ -55,22 +57,12 @@ function Stash(props: StashPageProps) {
     void client.invalidateQueries({ queryKey: yarnsQuery.queryKey });
   };
   const lots = stash.data;
-  const error = stash.error ?? yarns.error;
 
   return (
     <>
       <h1 className={yarns.data.length === 0 ? 'mb-6' : 'sr-only'}>Stash</h1>
       <DeletionNotice deletion={deletion} what={lotsWords} />
-      {error && (
-        <Notice
-          kind="problem"
-          live
-          className="mb-4"
-          action={<Button onClick={refresh}>Try again</Button>}
-        >
-          {failureWords(error)} What is shown may be old.
-        </Notice>
-      )}
+      <StaleNotice error={stash.error ?? yarns.error} onRetry={refresh} />
       {yarns.data.length === 0 ? (
         <NoStash
           onAdd={() => setSheet({ is: 'add' })}
@@ -117,7 +109,7 @@ function Stash(props: StashPageProps) {
         </>
       )}
       <StashSheets
-        {...{ sheet, setSheet, units }}
+        {...{ sheet, setSheet, units, terms }}
         yarns={yarns.data}
         currency={props.currency}
         onChange={refresh}

@@ -1,5 +1,6 @@
 import type { Units } from '../../../lib/units/display';
 import type { PresentedLot } from '../../../schemas/stash';
+import type { Terms } from '../../planner/stitchWord';
 import type { Money, PresentedColourway, PresentedYarn } from '../../../schemas/yarn';
 import { AddLotSheet } from './AddLotSheet';
 import { ColourSheet } from './ColourSheet';
@@ -19,6 +20,7 @@ interface StashSheetsProps {
   setSheet: (sheet: OpenSheet | null) => void;
   yarns: readonly PresentedYarn[];
   units: Units;
+  terms: Terms;
   currency: Money['currency'];
   onChange: () => void;
   onDelete: (lot: PresentedLot) => void;
@@ -26,17 +28,19 @@ interface StashSheetsProps {
 
 /** Whatever is open beside the page. */
 export function StashSheets(props: StashSheetsProps) {
-  const { sheet, setSheet, yarns, units, currency, onChange, onDelete } = props;
+  const { sheet, setSheet, yarns, units, terms, currency, onChange, onDelete } = props;
   const shared = { units, currency, onChange, onClose: () => setSheet(null) };
   switch (sheet?.is) {
     case undefined:
       return null;
     case 'add':
-      return <AddLotSheet {...shared} yarns={yarns} initial={blankEntry(yarns, sheet.yarnId)} />;
+      return (
+        <AddLotSheet {...shared} {...{ yarns, terms }} initial={blankEntry(yarns, sheet.yarnId)} />
+      );
     case 'example':
-      return <AddLotSheet {...shared} yarns={yarns} initial={EXAMPLE_ENTRY} />;
+      return <AddLotSheet {...shared} {...{ yarns, terms }} initial={EXAMPLE_ENTRY} />;
     case 'yarn':
-      return <YarnSheet {...shared} yarn={sheet.yarn} />;
+      return <YarnSheet {...shared} terms={terms} yarn={sheet.yarn} />;
     case 'colour':
       return <ColourSheet {...shared} yarn={sheet.yarn} colour={sheet.colour} />;
     case 'lot': {

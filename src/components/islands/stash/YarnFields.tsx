@@ -1,20 +1,22 @@
 import { useFormContext } from 'react-hook-form';
 import { YARN_UNIT, type Units } from '../../../lib/units/display';
-import { YARN_CATEGORIES } from '../../../lib/yarnCategories';
 import type { YarnForm } from '../../../schemas/stashEntry';
 import type { Money } from '../../../schemas/yarn';
+import type { Terms } from '../../planner/stitchWord';
 import { Field } from '../../ui/Field';
 import { Select } from '../../ui/Select';
+import { weightOptions } from '../../yarnWeights';
 import { NumberInput } from '../form/NumberInput';
 import { PriceInput } from '../form/PriceInput';
 
 interface YarnFieldsProps {
   units: Units;
+  terms: Terms;
   currency: Money['currency'];
 }
 
 /** A yarn as its band tells it. */
-export function YarnFields({ units, currency }: YarnFieldsProps) {
+export function YarnFields({ units, terms, currency }: YarnFieldsProps) {
   const { control, register, formState } = useFormContext<YarnForm>();
   const errors = formState.errors.yarn;
   const { word, m } = YARN_UNIT[units];
@@ -41,10 +43,7 @@ export function YarnFields({ units, currency }: YarnFieldsProps) {
         label="Weight"
         id="yarn.weightCategory"
         error={errors?.weightCategory?.message}
-        options={YARN_CATEGORIES.map(({ category, name, stitchesIn4In: [fewest, most] }) => ({
-          value: String(category),
-          word: `${category} ${name} · ${fewest}–${most} ${category === 0 ? 'dc' : 'sc'} in 4 in`,
-        }))}
+        options={weightOptions(terms)}
         {...register('yarn.weightCategory', { setValueAs: Number })}
       />
       <NumberInput

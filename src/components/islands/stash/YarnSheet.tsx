@@ -4,6 +4,7 @@ import { deleteYarn, updateYarn, yarnContent } from '../../../client/queries/yar
 import type { Units } from '../../../lib/units/display';
 import { yarnFormSchema, type YarnForm } from '../../../schemas/stashEntry';
 import type { Money, PresentedYarn } from '../../../schemas/yarn';
+import type { Terms } from '../../planner/stitchWord';
 import { Button } from '../../ui/Button';
 import { Notice } from '../../ui/Notice';
 import { differencesOf } from '../form/differences';
@@ -16,6 +17,7 @@ import { YarnFields } from './YarnFields';
 interface YarnSheetProps {
   yarn: PresentedYarn;
   units: Units;
+  terms: Terms;
   currency: Money['currency'];
   onChange: () => void;
   onClose: () => void;
@@ -24,7 +26,8 @@ interface YarnSheetProps {
 const valuesOf = (yarn: PresentedYarn): YarnForm => ({ yarn: yarnContent(yarn) });
 
 /** A yarn, for all its colours and lots. */
-export function YarnSheet({ yarn, units, currency, onChange, onClose }: YarnSheetProps) {
+export function YarnSheet(props: YarnSheetProps) {
+  const { yarn, units, terms, currency, onChange, onClose } = props;
   const done = () => {
     onChange();
     onClose();
@@ -68,7 +71,7 @@ export function YarnSheet({ yarn, units, currency, onChange, onClose }: YarnShee
           {failureWords(deleting.error)}
         </Notice>
       )}
-      <YarnFields {...{ units, currency }} />
+      <YarnFields {...{ units, terms, currency }} />
     </EditSheet>
   );
 }

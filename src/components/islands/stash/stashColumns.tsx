@@ -42,8 +42,7 @@ export function stashColumns(
       header: 'Parts',
       enableGlobalFilter: false,
       meta: { figures: true },
-      cell: ({ row }) =>
-        row.original.partSkeins.map(({ massG }) => partWords(massG)).join(', '),
+      cell: ({ row }) => row.original.partSkeins.map(({ massG }) => partWords(massG)).join(', '),
     },
     {
       id: 'mass',

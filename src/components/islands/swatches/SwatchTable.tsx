@@ -15,7 +15,7 @@ import { DataTable } from '../../ui/DataTable';
 import { EmptyState } from '../../ui/EmptyState';
 import { useTerms, useUnits } from '../../ui/useUnits';
 import { DeletionNotice } from '../form/DeletionNotice';
-import { failureWords } from '../form/formErrors';
+import { StaleNotice } from '../form/StaleNotice';
 import { useDeletion } from '../form/useDeletion';
 import { WithQueries } from '../WithQueries';
 import { SampleSwatch } from './SampleSwatch';
@@ -65,6 +65,7 @@ function Table({ swatches, yarns, figures: known, ...preferences }: SwatchTableP
   return (
     <>
       <DeletionNotice deletion={deletion} what={swatchesWords} />
+      <StaleNotice error={query.error} onRetry={() => void query.refetch()} />
       <DataTable
         caption="Your swatches"
         captionHidden
@@ -72,11 +73,6 @@ function Table({ swatches, yarns, figures: known, ...preferences }: SwatchTableP
         columns={columns}
         rowId={({ swatch }) => swatch.id}
         empty={<NoSwatches units={units} />}
-        error={
-          query.error
-            ? { message: failureWords(query.error), onRetry: () => void query.refetch() }
-            : undefined
-        }
         filterLabel="Find a swatch, yarn or stitch"
         selectable={{
           nameOf: ({ swatch }) => swatch.name,

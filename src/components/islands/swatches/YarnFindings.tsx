@@ -36,7 +36,7 @@ export function YarnFindings({ yarn, stitch, units, terms }: YarnFindingsProps) 
           rangeOf('from its width alone', before, shown),
           rangeOf('from its yarn', after, shown),
         ]}
-        unit={units === 'metric' ? 'mm in a loop' : 'in in a loop'}
+        unit={units === 'metric' ? 'mm in a loop' : 'inches in a loop'}
         label={`From its width alone ${showLoop(before.meanMm, units)} give or take ${showLoop(Z95 * before.sdMm, units)}; from its yarn ${showLoop(after.meanMm, units)} give or take ${showLoop(Z95 * after.sdMm, units)}.`}
       />
       <p className="text-ink-2">

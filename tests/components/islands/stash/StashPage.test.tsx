@@ -95,7 +95,7 @@ afterEach(() => {
   vi.unstubAllGlobals();
 });
 
-const show = () => render(<StashPage {...kept} units="metric" currency="EUR" />);
+const show = () => render(<StashPage {...kept} units="metric" terms="us" currency="EUR" />);
 const press = (name: string | RegExp) => fireEvent.click(screen.getByRole('button', { name }));
 const type = (label: string, value: string) =>
   fireEvent.change(screen.getByLabelText(label), { target: { value } });
