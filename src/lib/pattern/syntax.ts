@@ -32,7 +32,7 @@ export type Where =
   | { readonly kind: 'first'; readonly filter: PlaceFilter }
   /** Any place of this kind: where a new yarn is attached. */
   | { readonly kind: 'any'; readonly filter: PlaceFilter }
-  | { readonly kind: 'ring' }
+  | { readonly kind: 'ring'; readonly magic: boolean }
   | { readonly kind: 'turning-chain' }
   | { readonly kind: 'chain-from-hook'; readonly nth: number };
 
@@ -60,6 +60,8 @@ export interface StitchStep extends Span {
 export interface ChainStep extends Span {
   readonly kind: 'chain';
   readonly amount: Amount;
+  /** Where the number is written, or the word where there is none. */
+  readonly amountSpan: Span;
   /** What the pattern says it counts as, or null where it says nothing. */
   readonly standsFor: StandsFor | null;
 }
@@ -127,6 +129,7 @@ export type Step =
 /** One figure of a count note: "12 dc", "4 ch-2 sps", "16 sts", "7 dc on each side". */
 export interface CountEntry extends Span {
   readonly amount: Amount;
+  readonly amountSpan: Span;
   /** One for each of the rounds that the note stands for: "(24, 36, 48 dc)". */
   readonly byRound: readonly number[] | null;
   readonly of:

@@ -27,6 +27,7 @@ const ROWS: readonly Row[] = [
   ['dc', 'double crochet', 'tr', 'treble', 1, 1, 2, 3, 1.85],
   ['edc', 'extended double crochet', 'etr', 'extended treble', 1, 1, 3, 4, 2.3],
   ['tr', 'treble crochet', 'dtr', 'double treble', 2, 1, 3, 4, 2.6],
+  ['etr', 'extended treble crochet', 'edtr', 'extended double treble', 2, 1, 4, 5, 3],
   ['dtr', 'double treble crochet', 'trtr', 'triple treble', 3, 1, 4, 5, 3.4],
   ['trtr', 'triple treble crochet', 'qtr', 'quadruple treble', 4, 1, 5, 6, 4.2],
 ];
@@ -43,60 +44,70 @@ const MOST_IN_ONE = 20;
 
 interface Family {
   readonly pattern: RegExp;
-  /** US code of the stitch whose legs it is made of, which gives its height and its UK name. */
-  readonly of: StitchCode;
-  readonly moves: (n: number) => Moves;
-  readonly us: (n: number) => string;
-  readonly ukCode: (n: number) => string;
+  /** US code of the stitch whose legs it is made of where the pattern names none. */
+  readonly of?: StitchCode;
+  readonly moves: (base: Moves, n: number) => Moves;
+  readonly us: (base: Stitch, n: number) => string;
+  readonly ukCode: (base: Stitch, n: number) => string;
 }
+
+/** Legs left unfinished on the hook, then one through all of them. */
+const gathered = ({ wraps, draws, throughs }: Moves, n: number): Moves => ({
+  wraps: n * wraps,
+  draws: n * draws,
+  throughs: n * (throughs - 1) + 1,
+});
 
 const FAMILIES: readonly Family[] = [
   {
-    pattern: /^sc(\d{1,2})tog$/,
-    of: 'sc',
-    moves: (n) => ({ wraps: 0, draws: n, throughs: 1 }),
-    us: (n) => `${n} single crochet together`,
-    ukCode: (n) => `dc${n}tog`,
+    pattern: /^(?<of>sc|hdc|dc|tr|dtr|trtr)(?<n>\d{1,2})(?:tog|cl)$/,
+    moves: gathered,
+    us: ({ us }, n) => `${n} ${us} together`,
+    ukCode: ({ ukCode }, n) => `${ukCode}${n}tog`,
   },
   {
-    pattern: /^dc(\d{1,2})(?:tog|cl)$/,
-    of: 'dc',
-    moves: (n) => ({ wraps: n, draws: n, throughs: n + 1 }),
-    us: (n) => `${n} double crochet together`,
-    ukCode: (n) => `tr${n}tog`,
+    pattern: /^(?<n>\d{1,2})-(?<of>hdc|dc|tr|dtr) pc$/,
+    moves: ({ wraps, draws, throughs }, n) => ({
+      wraps: n * wraps,
+      draws: n * draws + 1,
+      throughs: n * throughs,
+    }),
+    us: ({ us }, n) => `popcorn of ${n} ${us}`,
+    ukCode: ({ ukCode }, n) => `${n}-${ukCode} pc`,
   },
   {
-    pattern: /^(\d{1,2})-dc pc$/,
-    of: 'dc',
-    moves: (n) => ({ wraps: n, draws: n + 1, throughs: 2 * n }),
-    us: (n) => `popcorn of ${n} double crochet`,
-    ukCode: (n) => `${n}-tr pc`,
+    pattern: /^(?<n>\d{1,2})-(?<of>hdc) puff$/,
+    moves: gathered,
+    us: ({ us }, n) => `puff of ${n} ${us}`,
+    ukCode: ({ ukCode }, n) => `${n}-${ukCode} puff`,
   },
   {
-    pattern: /^(\d{1,2})-hdc puff$/,
-    of: 'hdc',
-    moves: (n) => ({ wraps: n, draws: n, throughs: 1 }),
-    us: (n) => `puff of ${n} half double crochet`,
-    ukCode: (n) => `${n}-htr puff`,
-  },
-  {
-    pattern: /^picot-(\d{1,2})$/,
+    pattern: /^picot-(?<n>\d{1,2})$/,
     of: 'sl st',
-    moves: (n) => ({ wraps: 0, draws: 1, throughs: n }),
-    us: (n) => `picot of ${n} chains`,
-    ukCode: (n) => `picot-${n}`,
+    moves: (_, n) => ({ wraps: 0, draws: 1, throughs: n }),
+    us: (_, n) => `picot of ${n} chains`,
+    ukCode: (_, n) => `picot-${n}`,
   },
 ];
+
+/** Where the hook goes in, by the letters before the stitch: "FPdc" is worked round the post, from the front. */
+const INSERTIONS: Readonly<Record<string, string>> = {
+  FP: 'front post',
+  BP: 'back post',
+  FL: 'front loop',
+  BL: 'back loop',
+};
 
 /**
  * The stitch with this US abbreviation, or null when it is not in the table.
  * Knows the basic stitches, decreases ("sc2tog"), clusters and bobbles ("dc3cl"), popcorns ("5-dc pc"),
- * puffs ("3-hdc puff") and picots ("picot-3") of up to 20 legs.
+ * puffs ("3-hdc puff") and picots ("picot-3") of up to 20 legs, and any basic stitch worked round the
+ * post or into one loop ("FPdc", "BPtr", "BLsc", "FLdc").
  *
  * Example: `stitch('dc')?.throughs` is 2.
  */
 export function stitch(code: StitchCode): Stitch | null {
-  return BASIC.get(code) ?? compoundStitch(code);
+  return BASIC.get(code) ?? insertedStitch(code) ?? compoundStitch(code);
 }
 
 /** Like `stitch`, for codes already checked. Throws DomainError for one that is not in the table. */
@@ -113,21 +124,38 @@ export function knownStitch(code: StitchCode): Stitch {
 /** The stitches of the table that have a name of their own, in order of height. */
 export const BASIC_STITCHES: readonly Stitch[] = [...BASIC.values()];
 
+/** A post or loop stitch: made of the moves of its base, and as tall. */
+function insertedStitch(code: StitchCode): Stitch | null {
+  const letters = code.slice(0, 2);
+  const base = BASIC.get(code.slice(2));
+  if (!base || base.draws === 0 || !Object.hasOwn(INSERTIONS, letters)) return null;
+  const words = INSERTIONS[letters] as string;
+  const { ukCode, us, uk } = base;
+  return {
+    ...base,
+    code,
+    us: `${words} ${us}`,
+    ukCode: `${letters}${ukCode}`,
+    uk: `${words} ${uk}`,
+  };
+}
+
 function compoundStitch(code: StitchCode): Stitch | null {
   for (const family of FAMILIES) {
-    const n = Number(family.pattern.exec(code)?.[1]);
+    const groups = family.pattern.exec(code)?.groups;
+    const n = Number(groups?.n);
     if (!(n >= 2 && n <= MOST_IN_ONE)) continue;
-    const base = BASIC.get(family.of);
+    const base = BASIC.get(groups?.of ?? family.of ?? '');
     if (!base) continue;
-    const ukCode = family.ukCode(n);
+    const ukCode = family.ukCode(base, n);
     return {
       ...base,
       code,
-      us: family.us(n),
+      us: family.us(base, n),
       ukCode,
       uk: ukCode,
       turningChains: 0,
-      ...family.moves(n),
+      ...family.moves(base, n),
     };
   }
   return null;

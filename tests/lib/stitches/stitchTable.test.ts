@@ -20,6 +20,7 @@ describe('stitch', () => {
       'dc',
       'edc',
       'tr',
+      'etr',
       'dtr',
       'trtr',
     ]);
@@ -39,6 +40,16 @@ describe('stitch', () => {
     // three chains and a slip stitch, whose draw is its only loop
     ['picot-3', 0, 1, 3],
     ['dc20tog', 20, 20, 21],
+    // a leg of hdc is a wrap and a draw, one of tr two wraps, a draw and two throughs
+    ['hdc2tog', 2, 2, 1],
+    ['tr3cl', 6, 3, 7],
+    // four whole tr (2, 1, 3 each), then one draw through the first
+    ['4-tr pc', 8, 5, 12],
+    // round the post or into one loop, with the moves of the stitch itself
+    ['FPdc', 1, 1, 2],
+    ['BPtr', 2, 1, 3],
+    ['BLsc', 0, 1, 1],
+    ['FLhdc', 1, 1, 1],
   ])('works %s out of its moves', (code, wraps, draws, throughs) => {
     expect(movesOf(code)).toEqual([wraps, draws, throughs]);
   });
@@ -53,6 +64,7 @@ describe('stitch', () => {
     });
     expect(stitch('sc2tog')?.ukCode).toBe('dc2tog');
     expect(stitch('5-dc pc')?.ukCode).toBe('5-tr pc');
+    expect(stitch('FPdc')).toMatchObject({ ukCode: 'FPtr', us: 'front post double crochet' });
   });
 
   it.each([
@@ -65,6 +77,9 @@ describe('stitch', () => {
     'dc3togx',
     'dc100tog',
     'constructor',
+    'FPch',
+    'fpdc',
+    'XXdc',
     '__proto__',
   ])('does not know "%s"', (code) => {
     expect(stitch(code)).toBeNull();

@@ -1,0 +1,11 @@
+/** The pattern reader's table of contents. */
+export { readPattern } from './readPattern';
+export { motifOf } from './motifOf';
+export { tokenize } from './tokenize';
+export { PATTERN_LIMITS } from './limits';
+export type * from './diagnostic';
+export type * from './reading';
+export type * from './span';
+export type * from './syntax';
+export type * from './token';
+export type { StitchOfTerm } from './terms/stitchOfTerm';

@@ -1,0 +1,96 @@
+import { PATTERN_LIMITS } from '../limits';
+import { nearest } from '../terms/nearest';
+import { COMPOUND_WORDS } from '../terms/stitchWords';
+import { meaningOf, numberWord, PLAIN_WORDS, timesWord } from '../terms/words';
+import type { ParseState } from './parseState';
+
+const OPENERS: ReadonlySet<string> = new Set(
+  'note notes tip tips hint hints nb optional remember gauge tension materials hook yarn size sizes abbreviations finished notions special finishing'.split(
+    ' ',
+  ),
+);
+/** Words by which a sentence without a stitch is still an instruction. */
+const VERBS: ReadonlySet<string> = new Set(
+  'turn join joining fasten rep repeat sk skip miss change cut break attach magic with using rejoin rotate mr mc'.split(
+    ' ',
+  ),
+);
+
+/** Where the sentence that begins here ends: the index of its full stop, end of line or end of text. */
+export function sentenceEnd(state: ParseState, from = state.at): number {
+  let at = from;
+  while (at < state.tokens.length - 1) {
+    const token = state.tokens[at];
+    if (token?.kind === 'line') return at;
+    if (token?.kind === 'mark' && token.text === '.' && endsHere(state, at)) return at;
+    at += 1;
+  }
+  return at;
+}
+
+/** A full stop inside "sl. st" or "12.5" ends nothing. */
+const endsHere = (state: ParseState, at: number): boolean => {
+  const next = state.tokens[at + 1];
+  return next === undefined || next.spaceBefore || next.kind === 'line' || next.kind === 'end';
+};
+
+/**
+ * Whether the sentence that begins here is told to the reader and not to the hook: it opens as a note
+ * or a tip, holds neither a stitch nor a verb of the trade, or begins in plain English.
+ */
+export function isComment(state: ParseState, end = sentenceEnd(state)): boolean {
+  const first = state.peek();
+  if (first.kind !== 'word') return false;
+  if (OPENERS.has(first.text) && (state.isMark(':', 1) || !isKnown(state, state.at))) return true;
+  const last = Math.min(end, state.at + PATTERN_LIMITS.sentenceLookAhead);
+  let unknown = 0;
+  let instructions = 0;
+  for (let at = state.at; at < last; at += 1) {
+    const token = state.tokens[at];
+    if (token?.kind === 'mark' && /^[*([]/.test(token.text)) instructions += 1;
+    if (token?.kind !== 'word') continue;
+    if (isInstruction(state, at)) instructions += 1;
+    else if (!isKnown(state, at)) unknown += 1;
+  }
+  if (instructions === 0) return unknown > 0 && !isSlip(state);
+  return unknown >= 2 && !isKnown(state, state.at) && !isSlip(state);
+}
+
+/** Whether the first word is a known one, mistyped. */
+const isSlip = (state: ParseState): boolean => nearestKnown(state, state.peek().text) !== null;
+
+/** The known word that this one is most likely a slip of; plain English never is. */
+export function nearestKnown(state: ParseState, word: string): string | null {
+  if (PLAIN_WORDS.has(word) || word.length > 20) return null;
+  return nearest(word, state.lexicon.known);
+}
+
+const isInstruction = (state: ParseState, at: number): boolean =>
+  VERBS.has(state.tokens[at]?.text ?? '') || state.stitchHere(at - state.at) !== null;
+
+/** Whether a word is one of a pattern's own. */
+export function isKnown(state: ParseState, at: number): boolean {
+  const word = state.tokens[at]?.text ?? '';
+  return (
+    isInstruction(state, at) ||
+    COMPOUND_WORDS.has(word) ||
+    (meaningOf(word) !== null && meaningOf(word) !== 'filler') ||
+    timesWord(word) !== null ||
+    numberWord(word) !== null
+  );
+}
+
+/** Steps over a comment; tells of it where it looks like an instruction, with a number and a stitch. */
+export function skipComment(state: ParseState, end: number): { begin: number; end: number } {
+  const first = state.at;
+  let looks = false;
+  while (state.at < end) {
+    if (state.peek().kind === 'number' && state.stitchHere(1) !== null) looks = true;
+    state.at += 1;
+  }
+  const span = state.spanFrom(first);
+  if (looks) {
+    state.report.say('note', 'comment', span, 'This sentence is read as a remark and not worked.');
+  }
+  return span;
+}

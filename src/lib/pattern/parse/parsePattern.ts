@@ -1,0 +1,77 @@
+import { PATTERN_LIMITS } from '../limits';
+import type { PatternText, RoundText, Step } from '../syntax';
+import { readAgain } from './again';
+import { isHeader, readHeader, type Header } from './header';
+import type { ParseState } from './parseState';
+import { readSteps } from './steps';
+
+/** Reads a whole pattern: what is made first, then its rounds. Never throws; goes on after every problem. */
+export function parsePattern(state: ParseState): PatternText {
+  const foundation = readFoundation(state);
+  const rounds: RoundText[] = [];
+  while (state.peek().kind !== 'end' && rounds.length < PATTERN_LIMITS.rounds) {
+    const round = readRound(state, rounds);
+    rounds.push(round);
+  }
+  if (state.peek().kind !== 'end') {
+    const message = `A pattern may have ${PATTERN_LIMITS.rounds} rounds; the rest is not read.`;
+    state.error('limit', state.peek(), message);
+  }
+  if (rounds.length === 0) tellNoRounds(state);
+  return { foundation, chainRules: state.chainRules, rounds, comments: state.comments };
+}
+
+function readFoundation(state: ParseState): Step[] {
+  const steps = readSteps(state, null);
+  state.note = null;
+  return steps;
+}
+
+function readRound(state: ParseState, before: readonly RoundText[]): RoundText {
+  const first = state.at;
+  const previous = before.at(-1)?.to ?? 0;
+  const header = readHeader(state, previous);
+  tellOrder(state, header, previous);
+  state.note = null;
+  state.insertion = '';
+  state.roundsOfLine = Math.max(1, header.to - header.from + 1);
+  state.skipLines();
+  const again = readAgain(state, previous);
+  const steps = readSteps(state, null);
+  const note = state.note as RoundText['note'];
+  return {
+    kind: header.kind,
+    from: header.from,
+    to: Math.min(header.to, header.from + PATTERN_LIMITS.rounds),
+    header: header.span,
+    side: header.side,
+    colour: header.colour,
+    again: again && { from: again.from, to: again.to, begin: again.begin, end: again.end },
+    steps,
+    note,
+    ...trimmed(state, first),
+  };
+}
+
+/** From the header to the last token that is not an end of line. */
+function trimmed(state: ParseState, first: number): { begin: number; end: number } {
+  let last = state.at - 1;
+  while (last > first && state.tokens[last]?.kind === 'line') last -= 1;
+  const begin = state.tokens[first]?.begin ?? 0;
+  return { begin, end: Math.max(begin, state.tokens[last]?.end ?? begin) };
+}
+
+function tellOrder(state: ParseState, header: Header, previous: number): void {
+  if (header.to < header.from) {
+    state.error('round-order', header.span, `Rounds ${header.from} to ${header.to} run backwards.`);
+  } else if (previous > 0 && header.from !== previous + 1) {
+    const message = `After round ${previous} comes round ${previous + 1}, not ${header.from}.`;
+    state.report.say('warning', 'round-order', header.span, message);
+  }
+}
+
+function tellNoRounds(state: ParseState): void {
+  const span = { begin: 0, end: state.peek().end };
+  const message = 'There is no round here. A round begins with "Rnd 1:" or "Row 1:".';
+  state.error('no-rounds', span, message);
+}

@@ -1,0 +1,25 @@
+import type { Terms } from '../reading';
+import { NAME_BEGINNINGS, STITCH_WORDS, COMPOUND_WORDS } from './stitchWords';
+import type { StitchOfTerm } from './stitchOfTerm';
+import { STRUCTURE_WORDS } from './words';
+
+/** The words of one reading: a set of terms, and the stitches of one's own. */
+export interface Lexicon {
+  readonly terms: Terms;
+  readonly own: ReadonlyMap<string, StitchOfTerm>;
+  /** Every single word that is known, for the nearest to one that is not. */
+  readonly known: readonly string[];
+}
+
+const KNOWN = { us: knownIn('us'), uk: knownIn('uk') } as const;
+
+export function lexiconOf(terms: Terms, ownStitches: readonly StitchOfTerm[] = []): Lexicon {
+  const own = new Map(ownStitches.map((each) => [each.code.toLowerCase(), each]));
+  return { terms, own, known: own.size === 0 ? KNOWN[terms] : [...KNOWN[terms], ...own.keys()] };
+}
+
+function knownIn(terms: Terms): string[] {
+  const stitches = [...STITCH_WORDS[terms].keys()].filter((word) => !word.includes(' '));
+  const compounds = [...COMPOUND_WORDS.keys()].filter((word) => word.length > 2);
+  return [...stitches, ...NAME_BEGINNINGS, ...compounds, ...STRUCTURE_WORDS, 'picot', 'crochet'];
+}

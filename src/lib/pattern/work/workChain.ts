@@ -1,0 +1,124 @@
+import { knownStitch, stitch } from '../../stitches/stitchTable';
+import type { ChainStep, StandsFor, Step, StitchStep } from '../syntax';
+import { baseOf } from './family';
+import type { Hand } from './hand';
+import { intoOf, tell, type Ahead } from './run';
+import { beginAfterTravel } from './workStitch';
+
+/** Chains: at the beginning of a round they stand for a stitch or reach its height, elsewhere they are a space. */
+export function workChain(hand: Hand, step: ChainStep, ahead: Ahead): boolean {
+  const isBeginning = !hand.begun && hand.inPlace === null;
+  if (!isBeginning && step.standsFor === null) {
+    hand.begun = true;
+    for (let i = 0; i < step.amount.value; i += 1) hand.chain('space', { kind: 'none' }, step);
+    return true;
+  }
+  beginAfterTravel(hand);
+  const standsFor = step.standsFor ?? ruled(hand, step) ?? inferred(hand, step, ahead);
+  if (standsFor === 'space') {
+    for (let i = 0; i < step.amount.value; i += 1) hand.chain('space', { kind: 'none' }, step);
+    return true;
+  }
+  if (standsFor.code === null) {
+    for (let i = 0; i < step.amount.value; i += 1) hand.chain('turning', { kind: 'none' }, step);
+    return true;
+  }
+  standingStitch(hand, step, standsFor.code, standsFor.chains);
+  return true;
+}
+
+const ruled = (hand: Hand, { amount }: ChainStep): StandsFor | null =>
+  hand.budget.chainRules.find(({ chains }) => chains === amount.value)?.standsFor ?? null;
+
+/** The chain is made in the place where the hook stands, and that place is then worked. */
+function standingStitch(hand: Hand, step: ChainStep, code: string, spaceChains: number): void {
+  if (hand.isRing && hand.below.kind === 'nothing')
+    tell(hand, 'no-ring', step, 'There is no ring to work into yet.');
+  if (!hand.isRing && hand.at < 0) hand.at = 0;
+  hand.worked += 1;
+  const into = hand.isRing ? intoOf(hand, 'ring') : intoOf(hand, Math.max(0, hand.at));
+  const chains = Math.max(0, step.amount.value - spaceChains);
+  tellHeight(hand, step, code, chains, spaceChains);
+  hand.closeSpace();
+  const place = hand.addPlace({
+    kind: 'stitch',
+    code,
+    chains: 0,
+    into: into.kind === 'place' ? into.index : -1,
+  });
+  for (let i = 0; i < chains; i += 1) {
+    hand.chain('standing', into, step);
+    const made = hand.stitches.at(-1);
+    if (made) made.place = place;
+  }
+  for (let i = 0; i < spaceChains; i += 1) hand.chain('space', { kind: 'none' }, step);
+}
+
+/** A turning chain is as tall as its stitch: published, 1 for sc to 6 for trtr. */
+function tellHeight(
+  hand: Hand,
+  step: ChainStep,
+  code: string,
+  chains: number,
+  spaceChains: number,
+): void {
+  const base = stitch(baseOf(code));
+  if (!base || base.turningChains === 0 || base.turningChains === chains) return;
+  const right = base.turningChains + spaceChains;
+  const short = chains < base.turningChains;
+  hand.budget.report.say(
+    'warning',
+    'turning-chain',
+    step,
+    `A chain of ${chains} is too ${short ? 'short' : 'tall'} for the ${code} it stands for, which is ${base.turningChains} chains tall.`,
+    { label: `Write ${right}`, ...step.amountSpan, replacement: amountText(step, right) },
+  );
+}
+
+/** "ch" with no number after it needs one. */
+const amountText = (step: ChainStep, right: number): string =>
+  step.amountSpan.begin === step.begin && step.amount.value === 1 ? `ch ${right}` : String(right);
+
+/**
+ * What a chain at the beginning stands for where the pattern does not say: published practice is that 1
+ * never counts, 3 and more do; 2 does for a hdc, unless the first hdc goes into the same stitch.
+ * Longer than the first stitch is tall, it is that stitch and a space. Before sc it is a loop.
+ */
+function inferred(hand: Hand, step: ChainStep, ahead: Ahead): StandsFor | 'space' {
+  const chains = step.amount.value;
+  const first = firstStitch(ahead.steps, ahead.next);
+  const base = first ? baseOf(first.code) : null;
+  const tall = base === null ? 0 : (stitch(base)?.turningChains ?? 0);
+  const skipsFirst = ahead.inRepeat || ahead.steps[ahead.next]?.kind === 'skip';
+  if (tall <= 1)
+    return (chains > 1 || skipsFirst) && !hand.isRing && base !== null ? 'space' : NO_STITCH;
+  const sameStitch = first?.where[0]?.kind === 'same' && first.amount.value === 1 && !hand.isRing;
+  if (chains === 1) return NO_STITCH;
+  if (chains === 2) return base === 'hdc' && !sameStitch ? { code: 'hdc', chains: 0 } : NO_STITCH;
+  const code = standingCode(ahead.steps, base ?? 'dc', chains);
+  const over = chains - knownStitch(code).turningChains;
+  return { code, chains: Math.max(0, over) };
+}
+
+const NO_STITCH: StandsFor = { code: null, chains: 0 };
+
+/** The first stitch, unless it is lower than the chain and another of the round is just as tall. */
+function standingCode(steps: readonly Step[], first: string, chains: number): string {
+  const { turningChains } = knownStitch(first);
+  if (turningChains >= chains) return first;
+  const asTall = stitchesOf(steps).find(
+    ({ code }) => stitch(baseOf(code))?.turningChains === chains,
+  );
+  return asTall ? baseOf(asTall.code) : first;
+}
+
+function firstStitch(steps: readonly Step[], from: number): StitchStep | null {
+  return stitchesOf(steps.slice(from)).find(({ code }) => code !== 'sl st') ?? null;
+}
+
+function stitchesOf(steps: readonly Step[]): StitchStep[] {
+  return steps.flatMap((step): StitchStep[] => {
+    if (step.kind === 'stitch') return [step];
+    return step.kind === 'group' || step.kind === 'repeat' ? stitchesOf(step.parts) : [];
+  });
+}

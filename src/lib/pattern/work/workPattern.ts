@@ -1,0 +1,94 @@
+import type { MotifSides } from '../../motifs/motif';
+import type { Place, WorkedRing, WorkedRound } from '../reading';
+import type { Report } from '../report';
+import type { PatternText, RoundText, Step } from '../syntax';
+import { checkCorners } from './checkCorners';
+import { checkClosed, checkNote, checkUnworked } from './checks';
+import { cornersBelow } from './cornersBelow';
+import type { CornerSearch } from './corners';
+import { finishRound } from './finishRound';
+import { foundationOf } from './foundation';
+import { Hand } from './hand';
+import { plannedRounds, type PlannedRound } from './plannedRounds';
+import { run } from './run';
+import { Budget, type Below } from './state';
+
+export interface WorkedPattern {
+  readonly ring: WorkedRing;
+  readonly rounds: WorkedRound[];
+}
+
+/** Works a pattern as a hand does, round by round, and reports what cannot be worked. */
+export function workPattern(
+  pattern: PatternText,
+  sides: MotifSides,
+  report: Report,
+): WorkedPattern {
+  const budget = new Budget(report, pattern.chainRules);
+  const { ring, firstSteps } = foundationOf(pattern, budget);
+  const rounds: WorkedRound[] = [];
+  const texts: RoundText[] = [];
+  const seeming: CornerSearch['seeming'][] = [];
+  let below = belowRing(ring);
+  let start = 0;
+  let colour = foundationColour(pattern);
+  for (const planned of plannedRounds(pattern, firstSteps, report)) {
+    if (budget.spent) break;
+    const { text } = planned;
+    const isBack = planned.turnsFirst || (text.kind === 'row' && rounds.length > 0);
+    const hand = new Hand(isBack ? turned(below, start) : below, budget, isBack ? 0 : start);
+    hand.colour = text.colour ?? colour;
+    hand.isBack = isBack;
+    work(hand, planned);
+    checkUnworked(hand, text, report);
+    checkClosed(hand, text, report);
+    const note = planned.note;
+    const finished = finishRound(hand, text, planned.number, sides, note);
+    rounds.push(finished.round);
+    texts.push(text);
+    seeming.push(finished.seeming);
+    colour = hand.colour;
+    below = belowRound(finished.round);
+    start = hand.endsInSpace ? Math.max(0, finished.round.places.length - 1) : 0;
+  }
+  cornersBelow(rounds, sides);
+  rounds.forEach((round, i) => {
+    const text = texts[i];
+    if (round.note && text) checkNote(round, round.note, round.number - text.from, report);
+  });
+  checkCorners(rounds, texts, seeming, sides, report);
+  return { ring, rounds };
+}
+
+function work(hand: Hand, { steps }: PlannedRound): void {
+  run(hand, steps, false);
+  hand.closeSpace();
+}
+
+const foundationColour = ({ foundation }: PatternText): string | null => {
+  const step = foundation.findLast(({ kind }) => kind === 'colour' || kind === 'attach') as
+    Extract<Step, { colour: string | null }> | undefined;
+  return step?.colour ?? null;
+};
+
+function belowRing(ring: WorkedRing): Below {
+  if (ring.kind === 'none') return { kind: 'nothing', places: [], corner: null, order: [] };
+  if (ring.kind !== 'chain-row') return { kind: 'ring', places: [], corner: null, order: [] };
+  return inOrder(ring.places, null);
+}
+
+const belowRound = ({ places, corner }: WorkedRound): Below => inOrder(places, corner);
+
+const inOrder = (places: readonly Place[], corner: Below['corner']): Below => ({
+  kind: places.length > 0 ? 'places' : 'nothing',
+  places,
+  corner,
+  order: places.map((_, i) => i),
+});
+
+/** Worked back: from the place where the round was joined, the other way round; a row from its end. */
+function turned(below: Below, start: number): Below {
+  const count = below.order.length;
+  const order = below.order.map((_, i) => (start - i + count) % count);
+  return { ...below, order };
+}

@@ -1,0 +1,109 @@
+import type { RepeatStep, Until } from '../syntax';
+import type { Hand } from './hand';
+import { limitOf } from './resolve';
+import { run } from './run';
+import { counted } from './words';
+
+/** Works a repeat so many times, or as long as the round below lasts. */
+export function workRepeat(hand: Hand, step: RepeatStep): boolean {
+  if (step.times.kind === 'until') return asLongAsItLasts(hand, step, step.times.until);
+  const times = step.times.amount.value;
+  for (let i = 0; i < times && !hand.budget.spent; i += 1) {
+    const upTo = i === times - 1 ? (step.partsBeforeEnd ?? step.parts.length) : step.parts.length;
+    if (!run(hand, step.parts, true, upTo)) return false;
+  }
+  return true;
+}
+
+function asLongAsItLasts(hand: Hand, step: RepeatStep, until: Until): boolean {
+  if (hand.isRing || hand.inPlace !== null) return endless(hand, step);
+  const outerLimit = hand.limit;
+  hand.limit = Math.min(outerLimit, limitOf(hand, until, step));
+  let each = 0;
+  for (;;) {
+    const before = hand.snapshot();
+    const result = attempt(hand, step);
+    if (result === 'ended-at-mark') break;
+    if (result === 'done') {
+      if (
+        hand.at === before.at &&
+        hand.worked === before.worked &&
+        hand.skipped === before.skipped
+      ) {
+        hand.limit = outerLimit;
+        return endless(hand, step);
+      }
+      each = hand.at - before.at;
+      if (hand.budget.spent) break;
+      continue;
+    }
+    const uneven = hand.worked > before.worked || hand.skipped > before.skipped;
+    hand.takeBack(before);
+    if (uneven) {
+      if (hand.attempts > 0) {
+        hand.limit = outerLimit;
+        return false;
+      }
+      tellUneven(hand, step, each);
+    } else if (each === 0 && hand.attempts === 0) {
+      tellNothing(hand, step, until);
+    }
+    break;
+  }
+  hand.limit = outerLimit;
+  return true;
+}
+
+/** One time round; with "**", it ends there when nothing is left after it. */
+function attempt(hand: Hand, step: RepeatStep): 'done' | 'failed' | 'ended-at-mark' {
+  hand.attempts += 1;
+  let result: 'done' | 'failed' | 'ended-at-mark' = 'done';
+  const mark = step.partsBeforeEnd;
+  if (!run(hand, step.parts, true, mark ?? step.parts.length)) result = 'failed';
+  else if (mark !== null) {
+    const before = hand.snapshot();
+    if (!nothingLeft(hand) && run(hand, step.parts.slice(mark), true)) result = 'done';
+    else {
+      hand.takeBack(before);
+      result = 'ended-at-mark';
+    }
+  }
+  hand.attempts -= 1;
+  return result;
+}
+
+const nothingLeft = (hand: Hand): boolean => hand.at + 1 >= hand.limit;
+
+/** Says by how much the repeat does not come out even, and with how many stitches it would. */
+function tellUneven(hand: Hand, step: RepeatStep, each: number): void {
+  const left = hand.limit - hand.at - 1;
+  const leftStitches = counted(left, 'st');
+  hand.explained = true;
+  if (each === 0) {
+    const message = `The repeat does not fit once: the round below has only ${leftStitches} for it.`;
+    hand.budget.report.say('error', 'repeat-uneven', step, message);
+    return;
+  }
+  const below = hand.size - left;
+  const message =
+    `The repeat does not come out even: it takes ${each} of the round below each time and leaves ${left} over. ` +
+    `${below} or ${below + each} places instead of ${hand.size} would.`;
+  hand.budget.report.say('error', 'repeat-uneven', step, message);
+}
+
+function tellNothing(hand: Hand, step: RepeatStep, until: Until): void {
+  // "[…] to corner" may have nothing to do on the first, short side.
+  if (until.to !== 'end') return;
+  hand.explained = true;
+  const message =
+    'The repeat finds nothing to work into: the round below has none of its places left.';
+  hand.budget.report.say('error', 'no-such-place', step, message);
+}
+
+function endless(hand: Hand, step: RepeatStep): boolean {
+  const message =
+    'This repeat uses up nothing of the round below and would never end: say how many times.';
+  hand.budget.report.say('error', 'repeat-endless', step, message);
+  hand.explained = true;
+  return true;
+}
