@@ -50,10 +50,11 @@ export function isComment(state: ParseState, end = sentenceEnd(state)): boolean 
     if (token?.kind === 'mark' && /^[*([]/.test(token.text)) instructions += 1;
     if (token?.kind !== 'word') continue;
     if (isInstruction(state, at)) instructions += 1;
-    else if (!isKnown(state, at)) unknown += 1;
+    else if (!isKnown(state, at) && meaningOf(token.text) === null) unknown += 1;
   }
   if (instructions === 0) return unknown > 0 && !isSlip(state);
-  return unknown >= 2 && !isKnown(state, state.at) && !isSlip(state);
+  const filler = meaningOf(first.text) !== null;
+  return unknown >= 2 && !filler && !isKnown(state, state.at) && !isSlip(state);
 }
 
 /** Whether the first word is a known one, mistyped. */

@@ -130,7 +130,7 @@ function readNoun(state: ParseState): CountEntry['of'] | 'uncounted' | null {
     state.at = counted.next;
     return { kind: 'stitch', code: counted.code };
   }
-  const filter = kind === 'word' ? readFilter(state) : null;
+  const filter = readFilter(state);
   if (!filter) return null;
   if (filter.of === 'space' || filter.of === 'corner-space')
     return { kind: 'space', chains: filter.chains };

@@ -45,6 +45,7 @@ function plainFilter(state: ParseState): PlaceFilter | null {
     state.at += 1;
     return filterOf('space');
   }
+  if (isNumberedChain(state)) return numberedChain(state);
   const term = state.stitchHere();
   if (!term || term.code === 'ch') return null;
   state.at = term.next;
@@ -66,6 +67,23 @@ function chainSpace(state: ParseState): PlaceFilter {
   }
   if (state.means('corner') || state.take('sp')) return filterOf('space');
   return hyphen ? filterOf('space') : filterOf('stitch', 'ch');
+}
+
+/** Whether "2-ch sp" or "2ch sp" stands here, as UK patterns write it. */
+export function isNumberedChain(state: ParseState): boolean {
+  if (state.peek().kind !== 'number') return false;
+  const ahead = state.isMark('-', 1) ? 2 : 1;
+  if (!state.isWord('ch', ahead)) return state.isWord('chsp', ahead);
+  const then = state.isMark('-', ahead + 1) ? ahead + 2 : ahead + 1;
+  return state.means('sp', then) || state.means('corner', then);
+}
+
+function numberedChain(state: ParseState): PlaceFilter {
+  const chains = state.checked(state.peek().value, state.peek());
+  state.at += state.isMark('-', 1) ? 3 : 2;
+  if (state.isMark('-')) state.at += 1;
+  if (!state.means('corner')) state.take('sp');
+  return filterOf('space', null, chains);
 }
 
 /** "each dc and ch-1 sp", "each st and each sp": both kinds. */

@@ -7,8 +7,9 @@ import { readSteps } from './steps';
 
 /** Reads a whole pattern: what is made first, then its rounds. Never throws; goes on after every problem. */
 export function parsePattern(state: ParseState): PatternText {
-  const foundation = readFoundation(state);
-  const rounds: RoundText[] = [];
+  const beforeRounds = readFoundation(state);
+  const { foundation, first } = withoutHeader(state, beforeRounds);
+  const rounds: RoundText[] = first ? [first] : [];
   while (state.peek().kind !== 'end' && rounds.length < PATTERN_LIMITS.rounds) {
     const round = readRound(state, rounds);
     rounds.push(round);
@@ -22,9 +23,7 @@ export function parsePattern(state: ParseState): PatternText {
 }
 
 function readFoundation(state: ParseState): Step[] {
-  const steps = readSteps(state, null);
-  state.note = null;
-  return steps;
+  return readSteps(state, null);
 }
 
 function readRound(state: ParseState, before: readonly RoundText[]): RoundText {
@@ -51,6 +50,47 @@ function readRound(state: ParseState, before: readonly RoundText[]): RoundText {
     note,
     ...trimmed(state, first),
   };
+}
+
+/**
+ * Stitches before any header are round 1, whose header is left out: "Ch 2, 6 sc in 2nd ch from hook. Rnd 2: …".
+ */
+function withoutHeader(
+  state: ParseState,
+  steps: readonly Step[],
+): { foundation: readonly Step[]; first: RoundText | null } {
+  const begins = steps.findIndex(
+    ({ kind }) => kind === 'stitch' || kind === 'group' || kind === 'repeat',
+  );
+  const opening = steps[begins];
+  const last = steps.at(-1);
+  if (!opening || !last) return { foundation: steps, first: null };
+  // A ring that is closed is made before the round; a chain that is not belongs to it.
+  const ring = steps
+    .slice(0, begins)
+    .findLastIndex(({ kind }) => kind === 'join' || kind === 'magic-ring');
+  const own = steps.slice(ring + 1);
+  const span = { begin: (own[0] ?? opening).begin, end: last.end };
+  const message = 'These stitches are read as Rnd 1: write "Rnd 1:" before them.';
+  state.report.say('note', 'no-rounds', opening, message, {
+    label: 'Write "Rnd 1:"',
+    begin: span.begin,
+    end: span.begin,
+    replacement: 'Rnd 1: ',
+  });
+  const first: RoundText = {
+    kind: 'round',
+    from: 1,
+    to: 1,
+    header: { begin: span.begin, end: span.begin },
+    side: null,
+    colour: null,
+    again: null,
+    steps: own,
+    note: state.note,
+    ...span,
+  };
+  return { foundation: steps.slice(0, ring + 1), first };
 }
 
 /** From the header to the last token that is not an end of line. */

@@ -1,6 +1,6 @@
 import type { PlaceFilter, Until, Where } from '../syntax';
 import { isAmount, readAmount } from './amount';
-import { ANY_STITCH, readFilter } from './filter';
+import { ANY_STITCH, isNumberedChain, readFilter } from './filter';
 import { amountOf, type ParseState } from './parseState';
 import { readUntil } from './until';
 
@@ -58,6 +58,7 @@ function placeNamed(state: ParseState, preposition: boolean): Where | null {
   if (state.means('each')) return readEach(state);
   if (state.means('next')) return readNext(state);
   if (state.means('last')) return readLast(state);
+  if (state.means('remaining')) return readRemaining(state);
   if (state.means('any')) return readAny(state);
   if (state.means('first')) return readFirst(state);
   if (state.means('beginning') || isTurningChain(state)) return readBeginning(state);
@@ -73,7 +74,7 @@ function placeNamed(state: ParseState, preposition: boolean): Where | null {
 function readNext(state: ParseState): Where | null {
   state.take('next');
   state.skipFillers();
-  const amount = isAmount(state) ? readAmount(state) : null;
+  const amount = isPlainAmount(state) ? readAmount(state) : null;
   const filter = readFilter(state) ?? (amount ? ANY_STITCH : null);
   return filter && { kind: 'next', amount: amount ?? amountOf(1), filter };
 }
@@ -106,13 +107,14 @@ function readEach(state: ParseState): Where | null {
   state.skipFillers();
   if (state.means('next')) return readNext(state);
   if (state.means('last')) return readLast(state);
+  if (state.means('remaining')) return readRemaining(state);
   if (state.means('first')) {
     state.take('first');
     const amount = readAmount(state) ?? amountOf(1);
     const filter = readFilter(state) ?? ANY_STITCH;
     return { kind: 'next', amount, filter };
   }
-  const amount = isAmount(state) ? readAmount(state) : null;
+  const amount = isPlainAmount(state) ? readAmount(state) : null;
   const filter = readFilter(state);
   if (!filter) return null;
   if (amount) return { kind: 'next', amount, filter };
@@ -120,10 +122,21 @@ function readEach(state: ParseState): Where | null {
 }
 
 function readLast(state: ParseState): Where | null {
-  state.take('last');
-  const amount = isAmount(state) ? readAmount(state) : null;
+  state.at += 1;
+  const amount = isPlainAmount(state) ? readAmount(state) : null;
   const filter = readFilter(state) ?? (amount ? ANY_STITCH : null);
   return filter && { kind: 'last', amount: amount ?? amountOf(1), filter };
+}
+
+/** "remaining sts", of which there may be none; "remaining 3 sts" is "last 3 sts". */
+function readRemaining(state: ParseState): Where | null {
+  state.take('remaining');
+  if (isAmount(state)) {
+    state.at -= 1;
+    return readLast(state);
+  }
+  const filter = readFilter(state);
+  return filter && { kind: 'each', filter, until: { to: 'end', word: 'to end' } };
 }
 
 function readAny(state: ParseState): Where | null {
@@ -134,7 +147,7 @@ function readAny(state: ParseState): Where | null {
 
 function readFirst(state: ParseState): Where | null {
   state.take('first');
-  const amount = isAmount(state) ? readAmount(state) : null;
+  const amount = isPlainAmount(state) ? readAmount(state) : null;
   const filter = readFilter(state);
   if (!filter) return null;
   return amount ? { kind: 'next', amount, filter } : { kind: 'first', filter };
@@ -228,7 +241,7 @@ function readRing(state: ParseState): Where {
 
 /** "in ch-2 sp", "in corner", "in st": the next one. */
 function readPlain(state: ParseState): Where | null {
-  const amount = isAmount(state) && !state.isMark('-', 1) ? readAmount(state) : null;
+  const amount = isPlainAmount(state) && !state.isMark('-', 1) ? readAmount(state) : null;
   const filter = readFilter(state);
   if (!filter) return amount && { kind: 'next', amount, filter: ANY_STITCH };
   return { kind: 'next', amount: amount ?? amountOf(1), filter };
@@ -262,3 +275,6 @@ function takePost(state: ParseState): void {
   state.take('of');
   state.skipFillers();
 }
+
+/** A number of places, and not that of "2-ch sp". */
+const isPlainAmount = (state: ParseState): boolean => isAmount(state) && !isNumberedChain(state);

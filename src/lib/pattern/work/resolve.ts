@@ -22,7 +22,8 @@ export function positionsOf(
     case 'each':
       return eachOne(hand, where.filter, where.until, span);
     case 'same':
-      return [Math.max(0, hand.at)];
+      if (hand.at < 0) hand.moveTo(0);
+      return [hand.at];
     case 'first':
       return firstOne(hand, where.filter, span);
     case 'any':
@@ -118,7 +119,7 @@ function eachOne(hand: Hand, filter: PlaceFilter, until: Until, span: Span): Pos
     hand.moveTo(position);
     positions.push(position);
   }
-  if (positions.length === 0 && until.to === 'end') {
+  if (positions.length === 0 && until.to === 'end' && until.word !== 'to end') {
     if (hand.attempts > 0) return null;
     const message = `There is no ${filterInWords(filter)} left in the round below.`;
     hand.budget.report.say('error', 'no-such-place', span, message);

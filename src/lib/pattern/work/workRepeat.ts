@@ -19,57 +19,60 @@ function asLongAsItLasts(hand: Hand, step: RepeatStep, until: Until): boolean {
   if (hand.isRing || hand.inPlace !== null) return endless(hand, step);
   const outerLimit = hand.limit;
   hand.limit = Math.min(outerLimit, limitOf(hand, until, step));
-  let each = 0;
-  for (;;) {
-    const before = hand.snapshot();
-    const result = attempt(hand, step);
-    if (result === 'ended-at-mark') break;
-    if (result === 'done') {
-      if (
-        hand.at === before.at &&
-        hand.worked === before.worked &&
-        hand.skipped === before.skipped
-      ) {
-        hand.limit = outerLimit;
-        return endless(hand, step);
-      }
-      each = hand.at - before.at;
-      if (hand.budget.spent) break;
-      continue;
-    }
-    const uneven = hand.worked > before.worked || hand.skipped > before.skipped;
-    hand.takeBack(before);
-    if (uneven) {
-      if (hand.attempts > 0) {
-        hand.limit = outerLimit;
-        return false;
-      }
-      tellUneven(hand, step, each);
-    } else if (each === 0 && hand.attempts === 0) {
-      tellNothing(hand, step, until);
-    }
-    break;
-  }
+  const done = untilNothingIsLeft(hand, step, until);
   hand.limit = outerLimit;
-  return true;
+  return done;
 }
 
-/** One time round; with "**", it ends there when nothing is left after it. */
-function attempt(hand: Hand, step: RepeatStep): 'done' | 'failed' | 'ended-at-mark' {
-  hand.attempts += 1;
-  let result: 'done' | 'failed' | 'ended-at-mark' = 'done';
-  const mark = step.partsBeforeEnd;
-  if (!run(hand, step.parts, true, mark ?? step.parts.length)) result = 'failed';
-  else if (mark !== null) {
+function untilNothingIsLeft(hand: Hand, step: RepeatStep, until: Until): boolean {
+  let each = 0;
+  let atMark: ReturnType<Hand['snapshot']> | null = null;
+  for (;;) {
     const before = hand.snapshot();
-    if (!nothingLeft(hand) && run(hand, step.parts.slice(mark), true)) result = 'done';
-    else {
-      hand.takeBack(before);
+    const { result, mark } = attempt(hand, step);
+    const moved =
+      hand.at !== before.at || hand.worked > before.worked || hand.skipped > before.skipped;
+    if (result === 'ended-at-mark' || hand.budget.spent) return true;
+    if (result === 'done') {
+      if (!moved) return endless(hand, step);
+      each = hand.at - before.at;
+      atMark = mark;
+      continue;
+    }
+    hand.takeBack(before);
+    if (!moved) {
+      // The one before was the last, and so it ends at its "**".
+      if (atMark) hand.takeBack(atMark);
+      if (each === 0 && hand.attempts === 0) tellNothing(hand, step, until);
+      return true;
+    }
+    if (hand.attempts > 0) return false;
+    tellUneven(hand, step, each);
+    return true;
+  }
+}
+
+interface Attempt {
+  readonly result: 'done' | 'failed' | 'ended-at-mark';
+  /** The hand as it was at "**". */
+  readonly mark: ReturnType<Hand['snapshot']> | null;
+}
+
+/** One time round; with "**", it ends there when what comes after does not fit. */
+function attempt(hand: Hand, step: RepeatStep): Attempt {
+  hand.attempts += 1;
+  const done = run(hand, step.parts, true, step.partsBeforeEnd ?? step.parts.length);
+  const mark = done && step.partsBeforeEnd !== null ? hand.snapshot() : null;
+  let result: Attempt['result'] = done ? 'done' : 'failed';
+  if (mark) {
+    const after = step.parts.slice(step.partsBeforeEnd ?? 0);
+    if (nothingLeft(hand) || !run(hand, after, true)) {
+      hand.takeBack(mark);
       result = 'ended-at-mark';
     }
   }
   hand.attempts -= 1;
-  return result;
+  return { result, mark };
 }
 
 const nothingLeft = (hand: Hand): boolean => hand.at + 1 >= hand.limit;
@@ -93,7 +96,7 @@ function tellUneven(hand: Hand, step: RepeatStep, each: number): void {
 
 function tellNothing(hand: Hand, step: RepeatStep, until: Until): void {
   // "[…] to corner" may have nothing to do on the first, short side.
-  if (until.to !== 'end') return;
+  if (until.to !== 'end' || until.word === 'to end') return;
   hand.explained = true;
   const message =
     'The repeat finds nothing to work into: the round below has none of its places left.';
