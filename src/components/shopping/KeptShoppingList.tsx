@@ -8,10 +8,12 @@ import {
   keptShoppingListSchema,
   type KeptShoppingList as KeptList,
 } from '../../schemas/shoppingList';
+import { useLeaveWarning } from '../islands/form/useLeaveWarning';
 import { WithQueries } from '../islands/WithQueries';
 import { Button, ButtonLink } from '../ui/Button';
 import { Checkbox } from '../ui/Checkbox';
 import { Notice } from '../ui/Notice';
+import { SaveStatus, type SaveState } from '../ui/SaveStatus';
 import { useUnits } from '../ui/useUnits';
 
 interface KeptShoppingListProps {
@@ -50,6 +52,7 @@ function TickList({ initial, units: shown }: KeptShoppingListProps) {
       setBought(boughtOf(current.data));
     },
   });
+  useLeaveWarning(tick.isPending);
   const toBuy = list.lines.filter(({ toBuySkeins }) => toBuySkeins > 0);
   function toggle(colour: string) {
     const next = bought.includes(colour)
@@ -66,6 +69,7 @@ function TickList({ initial, units: shown }: KeptShoppingListProps) {
           {bought.length} of {toBuy.length} colours bought, {list.toBuySkeins} skeins of{' '}
           {list.yarnName} in all.
         </p>
+        <SaveStatus state={saveState(tick)} className="mt-1" />
       </header>
       {tick.error && (
         <Notice
@@ -106,6 +110,11 @@ function TickList({ initial, units: shown }: KeptShoppingListProps) {
       </div>
     </div>
   );
+}
+
+function saveState({ isPending, error }: { isPending: boolean; error: Error | null }): SaveState {
+  if (isPending) return { is: 'saving' };
+  return error ? { is: 'failed', why: error.message } : { is: 'saved' };
 }
 
 const boughtOf = ({ lines }: KeptList): string[] =>

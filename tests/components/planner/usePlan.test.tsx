@@ -22,7 +22,8 @@ const change = (edit: (plan: Plan) => Plan, about: string | null = null): Act =>
   about,
 });
 const after = (...acts: Act[]) => acts.reduce(planHistory, START);
-const [UNDO, REDO]: Act[] = [{ type: 'undo' }, { type: 'redo' }];
+const UNDO: Act = { type: 'undo' };
+const REDO: Act = { type: 'redo' };
 
 describe('planHistory', () => {
   it('takes changes back one by one and does them again', () => {
