@@ -1,4 +1,4 @@
-import { fitInWords, fitOf } from '../../lib/joins/fit';
+import { joinFit } from '../../lib/joins/fit';
 import type { Join } from '../../lib/joins/join';
 import { READY_JOINS } from '../../lib/joins/readyJoins';
 import { joinStitches } from '../../lib/ledger/blanketOf';
@@ -63,12 +63,11 @@ export interface JoinFit {
 /** Each ready-made join against the side of a motif, those that fit first. */
 export function joinFits(motif: Motif, terms: Terms): JoinFit[] {
   const stitches = joinStitches(motif);
-  return READY_JOINS.map((join) => ({
-    join,
-    fits: fitOf(stitches, join.fit).fits,
+  return READY_JOINS.map((join) => {
+    const { fits, words } = joinFit(join, motif, stitches);
     // The sentence names the one stitch that helps, in US terms.
-    words: fitInWords(stitches, join.fit).replace(/\bsc\b/g, codeWord('sc', terms)),
-  })).sort((left, right) => Number(right.fits) - Number(left.fits));
+    return { join, fits, words: words.replace(/\bsc\b/g, codeWord('sc', terms)) };
+  }).sort((left, right) => Number(right.fits) - Number(left.fits));
 }
 
 /** "Fits every join.", or which it does not. */

@@ -1,5 +1,6 @@
 import { READY_JOINS } from '../../lib/joins/readyJoins';
-import { fitOf } from '../../lib/joins/fit';
+import { joinFit } from '../../lib/joins/fit';
+import type { Motif } from '../../lib/motifs/motif';
 import type { Estimate } from '../../lib/ledger/ledger';
 import { withBorder } from '../../lib/plan/edits';
 import type { Plan } from '../../lib/plan/plan';
@@ -37,7 +38,7 @@ export function BlanketSection({ plan, estimate, units, terms, change }: Blanket
           }
           options={READY_JOINS.map((join) => ({
             value: join.key,
-            word: fitOf(estimate.sideStitches, join.fit).fits
+            word: joinFit(join, plan.motifs[0] as Motif, estimate.sideStitches).fits
               ? join.name
               : `${join.name} · does not fit`,
           }))}

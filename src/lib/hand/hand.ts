@@ -69,6 +69,12 @@ export function learnHand(
   return { stitchWidthMm, belief: posterior(prior, observations), stitches, measured };
 }
 
+/** Yarn that a piece usually takes at this stitch width, in metres, before anything is weighed. */
+export function usualM(stitchWidthMm: number, { loops, seamM, cutM }: YarnUse): number {
+  const allLoops = [...loops.values()].reduce((sum, count) => sum + count, 0);
+  return (LOOP_OVER_WIDTH * stitchWidthMm * allLoops) / 1000 + SEWN_FACTOR * seamM + cutM;
+}
+
 /** Expected yarn per loop of one stitch, in mm. */
 export function loopLengthMm(hand: Hand, code: StitchCode): number {
   const [common = NaN] = hand.belief.mean;

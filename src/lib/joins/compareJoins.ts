@@ -1,7 +1,8 @@
 import { estimate } from '../ledger/estimate';
 import type { Estimate } from '../ledger/ledger';
 import type { Plan } from '../plan/plan';
-import { fitInWords } from './fit';
+import type { Motif } from '../motifs/motif';
+import { joinFit } from './fit';
 import type { Join } from './join';
 
 /** One join tried on a plan. */
@@ -31,6 +32,7 @@ export function compareJoins(plan: Plan, joins: readonly Join[]): JoinComparison
   const onGrid: Plan = { ...plan, size: { by: 'grid', rows, columns } };
   return joins.map((join): JoinComparison => {
     const result = estimate({ ...onGrid, join: { ...plan.join, key: join.key } });
+    const { fits, words } = joinFit(join, plan.motifs[0] as Motif, result.sideStitches);
     return {
       join,
       joinM: joinYarnM(result),
@@ -41,8 +43,8 @@ export function compareJoins(plan: Plan, joins: readonly Join[]): JoinComparison
       heightMm: result.size.heightMm,
       tails: result.totals.tails,
       durationS: result.totals.joinDurationS,
-      fits: result.fit.fits,
-      fitWords: fitInWords(result.sideStitches, join.fit),
+      fits,
+      fitWords: words,
       costMinor: result.totals.costMinor,
     };
   });

@@ -1,4 +1,5 @@
-import type { Fit } from './join';
+import type { Motif } from '../motifs/motif';
+import type { Fit, Join } from './join';
 
 /** A round of sc with 3 sc in each corner adds this many stitches to every side. */
 const STITCHES_ADDED_BY_SC_ROUND = 2;
@@ -62,3 +63,17 @@ export function fitInWords(n: number, fit: Fit): string {
 
 const counted = (count: number, one: string, more: string): string =>
   `${count} ${count === 1 ? one : more}`;
+
+/** Whether a join needs chain spaces along the sides of a motif whose last round has none. */
+export function lacksSpaces({ needsSpaces = false }: Join, motif: Motif): boolean {
+  const last = motif.rounds.at(-1);
+  return needsSpaces && !Object.keys(last?.spaces ?? {}).some((kind) => kind !== last?.cornerSpace);
+}
+
+/** How a join suits a motif whose side it works along `n` stitches of: yes or no, and why in words. */
+export function joinFit(join: Join, motif: Motif, n: number): { fits: boolean; words: string } {
+  if (lacksSpaces(join, motif)) {
+    return { fits: false, words: 'The last round has no chain spaces along its sides to link by.' };
+  }
+  return { fits: fitOf(n, join.fit).fits, words: fitInWords(n, join.fit) };
+}

@@ -28,6 +28,8 @@ export interface Join {
   readonly name: string;
   readonly description: string;
   readonly fit: Fit;
+  /** Works into chain spaces along the sides of the motif's last round. */
+  readonly needsSpaces?: boolean;
   /** Sewn with a needle along the seam; its yarn is a factor times the length. */
   readonly sewn: boolean;
   /** Rounds added to every motif before or as it is linked. */

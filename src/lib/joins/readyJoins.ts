@@ -111,6 +111,7 @@ export const READY_JOINS: readonly Join[] = [
     ...SEAM,
     key: 'last-round',
     name: 'Joined in the last round',
+    needsSpaces: true,
     description:
       'The chain spaces and corners of the last round link to the neighbour as they are worked: no yarn of its own.',
     fit: { multipleOf: 4, plus: 3 },

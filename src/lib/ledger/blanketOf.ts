@@ -76,7 +76,7 @@ export function blanketOf(plan: Plan): Blanket {
     sideStitches: joinStitches(motif),
     seamMm: (geometries[0] as MotifGeometry).sideMm * (motif.sides === 0 ? 0.5 : 1),
     cornerLinks: motif.sides === 0 ? 0 : cornerLinks(layout, counts, plan.corners),
-    seamLines: rows - 1 + (columns - 1),
+    seamLines: seamLines(layout, rows, columns),
   };
 }
 
@@ -84,4 +84,12 @@ export function blanketOf(plan: Plan): Blanket {
 export function joinStitches(motif: Motif): number {
   const perSide = motif.rounds.at(-1)?.perSide ?? 0;
   return motif.sides === 0 ? Math.floor(perSide / (2 * joinSidesOf(motif))) : perSide;
+}
+
+/**
+ * Long lines that seams can be worked in without cutting: every row and every column of a square
+ * grid; of hexagons every zigzag between rows, and each seam within a row on its own.
+ */
+function seamLines(layout: Layout, rows: number, columns: number): number {
+  return layout === 'square' ? rows - 1 + (columns - 1) : rows - 1 + rows * (columns - 1);
 }

@@ -89,7 +89,7 @@ function linesOfGroup(hand: Hand, group: PieceGroup): LedgerLine[] {
   return group.lines.flatMap((line) => [
     ...Object.entries(line.made)
       .filter(([, count]) => count > 0)
-      .map(([code, count]) => stitchLine(hand, group, line, code, count * group.count)),
+      .map(([code, count]) => stitchLine(hand, group, line, code, whole(count * group.count))),
     ...seamLine(hand, group, line),
     ...tailLine(group, line),
   ]);
@@ -116,6 +116,9 @@ function stitchLine(
     source: sourceOf(hand, code),
   };
 }
+
+/** Stitches shared out over like pieces add up to whole ones again; what is left is rounding. */
+const whole = (count: number): number => Number(count.toPrecision(12));
 
 function seamLine(hand: Hand, group: PieceGroup, line: PieceLine): LedgerLine[] {
   if (line.seamMm === 0) return [];

@@ -60,7 +60,7 @@ export function estimate(plan: Plan): Estimate {
 
 /** The hand learnt from the plan's evidence, for every stitch of the blanket, the evidence and the swatch. */
 function handOf({ plan, gauge }: Blanket, groups: readonly PieceGroup[]): Hand {
-  const evidence = evidenceOf(plan);
+  const evidence = evidenceOf(plan, gauge.stitchWidthMm);
   const swatch = swatchUse(plan) ?? NO_YARN;
   const uses = [...groups.map(useOfGroup), ...evidence.map(({ use }) => use), swatch];
   const stitches = [...new Set(uses.flatMap(({ loops }) => [...loops.keys()]))].sort();

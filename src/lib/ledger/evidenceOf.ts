@@ -1,4 +1,4 @@
-import type { Evidence } from '../hand/hand';
+import { usualM, type Evidence } from '../hand/hand';
 import { readingLengthM, readingVarianceM2 } from '../hand/readingVariance';
 import { addUse, NO_YARN, useOfStitches, type YarnUse } from '../hand/yarnUse';
 import type { Plan, PlanEvidence } from '../plan/plan';
@@ -7,18 +7,23 @@ import { swatchCounts } from '../stitches/swatchCounts';
 import { motifPieces } from './pieces';
 import { TAIL_KEPT, TAIL_M } from './tails';
 
-/** The plan's weighed and unravelled pieces as evidence about the maker's hand. */
-export function evidenceOf(plan: Plan): Evidence[] {
+/**
+ * The plan's weighed and unravelled pieces as evidence about the hand of a maker of this stitch
+ * width. How much a piece may differ is taken from what it usually takes, not from its reading: a
+ * reading that came out low would otherwise count as the surer for it, and makers would run short
+ * more often than said.
+ */
+export function evidenceOf(plan: Plan, stitchWidthMm: number): Evidence[] {
+  const { putUp } = plan.yarn;
   return plan.evidence.flatMap((item) => {
     const use = useOfPiece(plan, item);
     if (!use) return [];
-    const lengthM = readingLengthM(item.reading, plan.yarn.putUp);
     const motifs = item.piece === 'motifs' ? item.count : 0;
     return [
       {
         use,
-        lengthM,
-        varianceM2: readingVarianceM2(item.reading, plan.yarn.putUp, lengthM, motifs),
+        lengthM: readingLengthM(item.reading, putUp),
+        varianceM2: readingVarianceM2(item.reading, putUp, usualM(stitchWidthMm, use), motifs),
       },
     ];
   });

@@ -69,7 +69,7 @@ export interface NextMeasurement {
   /** Motifs on the scale; 0 for a swatch. */
   readonly motifs: number;
   readonly resolutionG: number;
-  /** Safety margin over the mean at the plan's confidence, now and then. */
+  /** Safety margin over the mean at the plan's confidence (at 80 % where that is lower), now and then. */
   readonly marginNow: number;
   readonly marginThen: number;
   readonly skeinsNow: number;

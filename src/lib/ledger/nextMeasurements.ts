@@ -1,4 +1,11 @@
-import { handVarianceAfterM2, learnHand, handVarianceM2, expectedM, type Hand } from '../hand/hand';
+import {
+  expectedM,
+  handVarianceAfterM2,
+  handVarianceM2,
+  learnHand,
+  usualM,
+  type Hand,
+} from '../hand/hand';
 import { readingVarianceM2 } from '../hand/readingVariance';
 import { addUse, NO_YARN, type YarnUse } from '../hand/yarnUse';
 import { skeinsFor } from '../skeins/skeins';
@@ -112,7 +119,12 @@ function candidate(
   motifs: number,
   reading: YarnReading,
 ): Candidate {
-  const varianceM2 = readingVarianceM2(reading, plan.yarn.putUp, expectedM(hand, use), motifs);
+  const varianceM2 = readingVarianceM2(
+    reading,
+    plan.yarn.putUp,
+    usualM(hand.stitchWidthMm, use),
+    motifs,
+  );
   return {
     kind,
     motifs,
@@ -137,7 +149,11 @@ function finerScale(plan: Plan, hand: Hand): Candidate[] {
         : reading;
     return { ...item, reading: finer };
   });
-  const finer = learnHand(hand.stitchWidthMm, hand.stitches, evidenceOf({ ...plan, evidence }));
+  const finer = learnHand(
+    hand.stitchWidthMm,
+    hand.stitches,
+    evidenceOf({ ...plan, evidence }, hand.stitchWidthMm),
+  );
   const motifs = Math.max(
     0,
     ...plan.evidence.map((item) => (item.piece === 'motifs' ? item.count : 0)),

@@ -1,8 +1,9 @@
 import { expectedM, learnHand, handVarianceM2 } from '../hand/hand';
-import { fitInWords, fitOf } from '../joins/fit';
+import { joinFit } from '../joins/fit';
+import type { Motif } from '../motifs/motif';
 import type { Plan } from '../plan/plan';
 import { stitchWidthRangeMm, YARN_CATEGORIES } from '../yarnCategories';
-import type { Blanket } from './blanketOf';
+import { joinStitches, type Blanket } from './blanketOf';
 import { evidenceOf } from './evidenceOf';
 import type { Notice } from './ledger';
 
@@ -44,7 +45,7 @@ function gaugeNotices({ swatch, yarn }: Plan): Notice[] {
 
 /** Each reading against what the hand could take before it was weighed. */
 function readingNotices({ plan, gauge }: Blanket): Notice[] {
-  return evidenceOf(plan).flatMap((evidence, i): Notice[] => {
+  return evidenceOf(plan, gauge.stitchWidthMm).flatMap((evidence, i): Notice[] => {
     const hand = learnHand(gauge.stitchWidthMm, [...evidence.use.loops.keys()], []);
     const usualM = expectedM(hand, evidence.use);
     const sdM = Math.sqrt(handVarianceM2(hand, evidence.use) + evidence.varianceM2);
@@ -60,15 +61,27 @@ function readingNotices({ plan, gauge }: Blanket): Notice[] {
 }
 
 function fitNotices({ plan, join, sideStitches }: Blanket): Notice[] {
-  if (fitOf(sideStitches, join.fit).fits) return [];
+  const motif = plan.motifs[0] as Motif;
+  const { fits, words } = joinFit(join, motif, sideStitches);
+  const counts = [...new Set(plan.motifs.map(joinStitches))];
   return [
-    {
-      code: 'join-does-not-fit',
-      severity: 'question',
-      message: `${join.name} on ${plan.motifs[0]?.name ?? 'this motif'}: ${fitInWords(sideStitches, join.fit)}`,
-    },
+    ...(fits ? [] : [question('join-does-not-fit', `${join.name} on ${motif.name}: ${words}`)]),
+    ...(counts.length > 1
+      ? [
+          question(
+            'sides-differ-in-stitches',
+            `The motifs have ${counts.join(' and ')} stitches a side: the join is planned for ${sideStitches}.`,
+          ),
+        ]
+      : []),
   ];
 }
+
+const question = (code: string, message: string): Notice => ({
+  code,
+  severity: 'question',
+  message,
+});
 
 function flatnessNotices({ plan, geometries }: Blanket): Notice[] {
   const sides = geometries.map(({ acrossMm }) => acrossMm);

@@ -3,6 +3,7 @@ import {
   handVarianceM2,
   learnHand,
   loopLengthMm,
+  usualM,
   type Evidence,
   type Hand,
 } from '../hand/hand';
@@ -54,11 +55,11 @@ export function swatchYarn(swatch: SwatchRecord, stitchWidthMm: number): SwatchY
   const readings = readingsOf(swatch.measurements, swatch.yarn);
   if (readings.length === 0) return null;
   const use = swatchUse(swatch);
-  const evidence = evidenceOf(readings, use);
+  const evidence = evidenceOf(readings, use, stitchWidthMm);
   const codes = [...use.loops.keys()];
   const before = learnHand(stitchWidthMm, codes, []);
   const after = learnHand(stitchWidthMm, codes, [evidence]);
-  const usualM = expectedM(before, use);
+  const expectedBeforeM = expectedM(before, use);
   const usualSdM = Math.sqrt(handVarianceM2(before, use) + evidence.varianceM2);
   return {
     lengthM: evidence.lengthM,
@@ -68,8 +69,8 @@ export function swatchYarn(swatch: SwatchRecord, stitchWidthMm: number): SwatchY
     loopsPerStitch: loopsOf(knownStitch(swatch.stitch)),
     before: beliefOf(before, swatch.stitch),
     after: beliefOf(after, swatch.stitch),
-    usualM,
-    questioned: Math.abs(evidence.lengthM - usualM) > READING_TOLERANCE * usualSdM,
+    usualM: expectedBeforeM,
+    questioned: Math.abs(evidence.lengthM - expectedBeforeM) > READING_TOLERANCE * usualSdM,
   };
 }
 
@@ -119,6 +120,7 @@ const LEAST_VARIANCE_M2 = 1e-6;
 function evidenceOf(
   readings: readonly Read[],
   use: YarnUse,
+  stitchWidthMm: number,
 ): Evidence & { readonly readVarianceM2: number } {
   const weights = readings.map(({ varianceM2 }) => 1 / Math.max(varianceM2, LEAST_VARIANCE_M2));
   const total = weights.reduce((sum, weight) => sum + weight, 0);
@@ -128,7 +130,7 @@ function evidenceOf(
     use,
     lengthM: meanM,
     readVarianceM2: 1 / total,
-    varianceM2: 1 / total + (PIECE_SPREAD * meanM) ** 2,
+    varianceM2: 1 / total + (PIECE_SPREAD * usualM(stitchWidthMm, use)) ** 2,
   };
 }
 

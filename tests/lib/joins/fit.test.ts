@@ -1,5 +1,9 @@
 import { describe, expect, it } from 'vitest';
-import { fitInWords, fitOf } from '../../../src/lib/joins/fit';
+import { fitInWords, fitOf, joinFit } from '../../../src/lib/joins/fit';
+import type { Join } from '../../../src/lib/joins/join';
+import { readyJoin } from '../../../src/lib/joins/readyJoins';
+import type { Motif } from '../../../src/lib/motifs/motif';
+import { readyMotif } from '../../../src/lib/motifs/readyMotifs';
 
 const fourAndThree = { multipleOf: 4, plus: 3 };
 const any = { multipleOf: 1, plus: 0 };
@@ -81,5 +85,27 @@ describe('fitInWords', () => {
     ],
   ])('says of %i stitches for %o', (n, fit, words) => {
     expect(fitInWords(n, fit)).toBe(words);
+  });
+});
+
+describe('joinFit', () => {
+  const lastRound = readyJoin('last-round') as Join;
+
+  it('asks a join in the last round for chain spaces to link by', () => {
+    // Both have 15 stitches a side; only the group square has chain spaces between its groups.
+    const grouped = readyMotif('group-square', 4) as Motif;
+    const solid = readyMotif('solid-square', 4) as Motif;
+    expect(joinFit(lastRound, grouped, 15).fits).toBe(true);
+    expect(joinFit(lastRound, solid, 15)).toEqual({
+      fits: false,
+      words: 'The last round has no chain spaces along its sides to link by.',
+    });
+  });
+
+  it('goes by the stitch count otherwise', () => {
+    const solid = readyMotif('solid-square', 4) as Motif;
+    const braid = readyJoin('flat-braid') as Join;
+    expect(joinFit(braid, solid, 15)).toEqual({ fits: true, words: fitInWords(15, braid.fit) });
+    expect(joinFit(braid, solid, 16).fits).toBe(false);
   });
 });

@@ -80,9 +80,11 @@ describe("estimate of the front page's plan", () => {
   };
   const weighedPiece: Loops = { ch: 4 * 72, dc: 4 * 464, sc: 0, slst: 4 * 5 };
   const readingM = 40 * 2 - 4 * 8 * 0.15 * 0.75;
-  const noise = 2 / 3 + (0.02 * 80) ** 2 + (0.03 * 80) ** 2 / 4;
-  const spread = covariance(weighedPiece, weighedPiece) + noise;
   const priorM = (loops: Loops) => (39 * (loops.ch + loops.dc + loops.sc + loops.slst)) / 1000;
+  // How much the piece may differ is a share of what it usually takes, tails included.
+  const usualM = priorM(weighedPiece) + 4 * 8 * 0.15 * 0.75;
+  const noise = 2 / 3 + (0.02 * usualM) ** 2 + (0.03 * usualM) ** 2 / 4;
+  const spread = covariance(weighedPiece, weighedPiece) + noise;
   const meanOf = (loops: Loops) =>
     priorM(loops) + (covariance(loops, weighedPiece) * (readingM - priorM(weighedPiece))) / spread;
   const varianceOf = (loops: Loops) =>

@@ -49,10 +49,14 @@ describe('useOfPiece', () => {
 
 describe('evidenceOf', () => {
   it('turns readings into metres with their variance', () => {
-    // 40 g at 2 m/g; 2/12 × 4 + (0.02 × 80)² + (0.03 × 80)²/4
-    const [evidence] = evidenceOf(buildPlan());
+    // 40 g at 2 m/g. Four motifs of 72 ch, 116 dc and 5 sl st, 541 loops, at 5.2 × 7.5 = 39 mm a loop,
+    // and 8 tails each of which 112.5 mm stay: 87.996 m; 2/12 × 4 + (0.02 × 87.996)² + (0.03 × 87.996)²/4
+    const [evidence] = evidenceOf(buildPlan(), 7.5);
     expect(evidence?.lengthM).toBe(80);
-    expect(evidence?.varianceM2).toBeCloseTo(2 / 3 + 2.56 + 1.44, 12);
+    expect(evidence?.varianceM2).toBeCloseTo(
+      2 / 3 + (0.02 * 87.996) ** 2 + (0.03 * 87.996) ** 2 / 4,
+      12,
+    );
   });
 
   it('leaves out what the plan has no piece for', () => {
@@ -60,7 +64,7 @@ describe('evidenceOf', () => {
       { piece: 'swatch', reading: weighed(15, 1) },
       { piece: 'motifs', count: 2, motifIndex: 7, reading: weighed(20, 1) },
     ] as const;
-    expect(evidenceOf(buildPlan({ swatch: null, evidence }))).toEqual([]);
-    expect(evidenceOf(buildPlan({ evidence: [] }))).toEqual([]);
+    expect(evidenceOf(buildPlan({ swatch: null, evidence }), 7.5)).toEqual([]);
+    expect(evidenceOf(buildPlan({ evidence: [] }), 7.5)).toEqual([]);
   });
 });
