@@ -1,5 +1,6 @@
 import { EXAMPLE_PLAN } from '../lib/plan/examplePlan';
 import type { MotifInput } from '../schemas/motif';
+import type { PatternReadInput } from '../schemas/pattern';
 import type { PlanInput } from '../schemas/plan';
 
 /** Examples of requests that several routes share. */
@@ -9,3 +10,12 @@ export const PLAN_EXAMPLE = structuredClone(EXAMPLE_PLAN) as unknown as PlanInpu
 
 const { key: _key, ...motif } = PLAN_EXAMPLE.motifs[0]!;
 export const MOTIF_EXAMPLE: MotifInput = { ...motif, name: 'Four rounds of groups' };
+
+export const PATTERN_EXAMPLE: PatternReadInput = {
+  text:
+    'Ch 4, join with sl st to form ring.\n' +
+    'Rnd 1: Ch 3 (counts as dc), 2 dc in ring, ch 2, *3 dc in ring, ch 2; rep from * 2 more times; ' +
+    'join with sl st in top of beg ch-3. (12 dc, 4 ch-2 sps)',
+  terms: 'us',
+  sides: 4,
+};

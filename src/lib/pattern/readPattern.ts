@@ -36,7 +36,7 @@ export function readPattern(text: string, options: ReadOptions): Reading {
     report,
   );
   const pattern = parsePattern(state);
-  const { ring, rounds } = workPattern(pattern, options.sides, report);
+  const { ring, rounds } = workPattern(pattern, options, report);
   return {
     text,
     terms: options.terms,

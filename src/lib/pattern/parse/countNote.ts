@@ -12,13 +12,13 @@ const UNCOUNTED: ReadonlySet<string> = new Set(
 
 /**
  * A count of what a round makes, in brackets or after a dash at its end: "(12 dc, 4 ch-2 sps)",
- * "[16 sts]", "— 48 dc", "= 48 dc". Null, with nothing read, where it is something else.
+ * "[16 sts]", "— 48 dc", "= 48 dc", and `bare` after the join "48 dc". Null, with nothing read, where it is something else.
  */
-export function readCountNote(state: ParseState): CountNote | null {
+export function readCountNote(state: ParseState, bare = false): CountNote | null {
   const start = state.at;
   const close = closerOf(state.peek().text);
   const dash = state.isMark('-') || state.isMark('=') || state.isMark(':');
-  if (close === null && !dash) return null;
+  if (close === null && !dash && !(bare && state.peek().kind === 'number')) return null;
   while (state.isMark('-') || state.isMark('=') || state.isMark(':')) state.at += 1;
   if (close !== null && state.at === start) state.at += 1;
   const entries = readEntries(state);

@@ -17,7 +17,7 @@ export function readInstruction(state: ParseState): Step[] {
   state.take('and');
   state.skipFillers();
   if (state.peek().kind === 'line' || state.peek().kind === 'mark') return [];
-  return plainWord(state, first) ?? counted(state, first) ?? readUnknown(state);
+  return plainWord(state, first) ?? counted(state, first) ?? readUnknown(state, first);
 }
 
 function plainWord(state: ParseState, first: number): Step[] | null {

@@ -30,7 +30,7 @@ export class ParseState {
   roundsOfLine = 1;
 
   constructor(
-    readonly tokens: readonly Token[],
+    readonly tokens: Token[],
     readonly lexicon: Lexicon,
     readonly size: number,
     readonly report: Report,

@@ -4,6 +4,7 @@ import { timesWord } from '../terms/words';
 import { isAmount, readAmount } from './amount';
 import { amountOf, type ParseState } from './parseState';
 import { readSteps } from './steps';
+import { readTimes } from './times';
 import { readUntil } from './until';
 
 /** "* … ** …; rep from * 3 more times, ending last rep at **". */
@@ -28,6 +29,22 @@ export function readStar(state: ParseState, close: string | null): Step[] {
   state.endMark = outer;
   state.openStars -= 1;
   state.depth -= 1;
+  if (closesStar(state)) {
+    state.at += 1;
+    const times = readTimes(state);
+    if (times) {
+      return [
+        {
+          kind: 'repeat',
+          mark: 'star',
+          parts,
+          times,
+          partsBeforeEnd: null,
+          ...state.spanFrom(first),
+        },
+      ];
+    }
+  }
   if (!repeatsFromStar(state)) {
     const message = 'Nothing repeats from this *: "rep from *" is missing. It is worked once.';
     state.error('star-without-repeat', star, message);
@@ -47,6 +64,16 @@ export function readStar(state: ParseState, close: string | null): Step[] {
     state.error('repeat-without-star', state.spanFrom(first), message);
   }
   return [repeat];
+}
+
+/** Whether a second star ends the repeat, with its times after it: "*sc in next st, inc* 6 times". */
+export function closesStar(state: ParseState): boolean {
+  if (!state.isMark('*')) return false;
+  const start = state.at;
+  state.at += 1;
+  const found = readTimes(state) !== null;
+  state.at = start;
+  return found;
 }
 
 /** Whether "rep from *" stands here; also "rep between *s", "rep * to *". */

@@ -6,7 +6,7 @@ import { closerOf, readCountNote } from './countNote';
 import { isHeader } from './header';
 import { readInstruction } from './instruction';
 import type { ParseState } from './parseState';
-import { readRepeat, readStar, repeatsFromStar } from './star';
+import { closesStar, readRepeat, readStar, repeatsFromStar } from './star';
 
 /**
  * Reads instructions up to the closing bracket `close`, the "rep from *" of an open star, the next
@@ -25,7 +25,7 @@ export function readSteps(state: ParseState, close: string | null): Step[] {
 function stopsHere(state: ParseState, close: string | null): boolean {
   if (state.peek().kind === 'end') return true;
   if (close !== null && state.isMark(close)) return true;
-  return isHeader(state) || (state.openStars > 0 && repeatsFromStar(state));
+  return isHeader(state) || (state.openStars > 0 && (repeatsFromStar(state) || closesStar(state)));
 }
 
 /** Reads whatever stands here; false where the steps end. */
@@ -48,7 +48,7 @@ function readOne(state: ParseState, close: string | null, steps: Step[]): boolea
     }
   }
   if (state.depth === 0) {
-    const note = readCountNote(state);
+    const note = readCountNote(state, steps.at(-1)?.kind === 'join');
     if (note) {
       state.note ??= note;
       return true;

@@ -1,6 +1,7 @@
 import { ownWordOf } from '../terms/ownWord';
 import type { Amount, GroupStep, JoinStep, StitchStep } from '../syntax';
 import type { StitchTerm } from '../terms/readStitch';
+import { isAmount, readAmount } from './amount';
 import { takeToFormRing, takeToJoin, targetOf } from './join';
 import { amountOf, type ParseState } from './parseState';
 import { readUntil } from './until';
@@ -35,7 +36,7 @@ export function readStitchStep(
   }
   const code = withInsertion(state, term.code);
   const span = state.spanFrom(first);
-  const each = amount ?? amountOf(1);
+  const each = amount ?? (where.length === 0 ? readTimesAfter(state) : null) ?? amountOf(1);
   if (term.perPlace > 1 && where.length === 0) return increases(code, term.perPlace, each, span);
   const times = term.perPlace * each.value;
   return {
@@ -46,6 +47,13 @@ export function readStitchStep(
     standing,
     ...span,
   };
+}
+
+/** "inc x 6", "sc x 4". */
+function readTimesAfter(state: ParseState): Amount | null {
+  if (!state.isWord('x') || !isAmount(state, 1)) return null;
+  state.at += 1;
+  return readAmount(state);
 }
 
 const join = (state: ParseState, first: number, to: JoinStep['to']): JoinStep => ({

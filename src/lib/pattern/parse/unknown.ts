@@ -1,62 +1,38 @@
 import type { Step } from '../syntax';
-import { isKnown, nearestKnown } from './comment';
+import { isKnown } from './comment';
+import { correctWord } from './correct';
+import { readInstruction } from './instruction';
 import type { ParseState } from './parseState';
 
 /**
- * What no rule reads. A word that is one letter away from a known one is told, with the known one, and
- * left out; a number or an abbreviation that nobody knows is told; plain words are stepped over.
+ * What no rule reads. A slip of a known word is told and read as that word; a number or an abbreviation
+ * that nobody knows is told and left out; plain words are stepped over as a remark.
  */
-export function readUnknown(state: ParseState): Step[] {
-  const first = state.at;
-  const afterNumber = state.last().kind === 'number' && state.at > 0;
+export function readUnknown(state: ParseState, first: number): Step[] {
   const token = state.peek();
+  const afterNumber = state.at > first && state.last().kind === 'number';
   const looksWorked = afterNumber || followedByPlace(state);
-  if (token.kind === 'word' && !isKnown(state, state.at)) {
-    const near = nearestKnown(state, token.text);
-    if (near !== null && (looksWorked || token.text.length <= 6)) {
-      state.error(
-        'unknown-word',
-        token,
-        `"${token.written}" is not an abbreviation. Is "${near}" meant?`,
-        {
-          label: `Write "${near}"`,
-          begin: token.begin,
-          end: token.end,
-          replacement: near,
-        },
-      );
-    } else if (looksWorked) {
-      state.error(
-        'unknown-word',
-        token,
-        `"${token.written}" is not an abbreviation this reader knows.`,
-      );
-    } else {
-      state.report.say(
-        'note',
-        'not-understood',
-        skipped(state, first),
-        'These words are read as a remark and not worked.',
-      );
-      return [];
-    }
-  } else if (token.kind !== 'word' && !/^(line|mark|end)$/.test(token.kind)) {
-    state.error('not-understood', token, `It is not clear what "${token.written}" means here.`);
-  } else if (afterNumber) {
-    state.error(
-      'not-understood',
-      state.last(),
-      `"${state.last().written}" of what? A stitch is missing after the number.`,
-    );
-  } else if (token.kind === 'word') {
-    state.report.say(
-      'warning',
-      'not-understood',
-      token,
-      `It is not clear what "${token.written}" means here.`,
-    );
+  if ((looksWorked || token.text.length <= 6) && correctWord(state)) {
+    state.at = first;
+    return readInstruction(state);
   }
-  skipped(state, first);
+  const isWord = token.kind === 'word';
+  if (isWord && !isKnown(state, state.at) && !looksWorked) {
+    const message = 'These words are read as a remark and not worked.';
+    state.report.say('note', 'not-understood', skipped(state, state.at), message);
+    return [];
+  }
+  if (isWord && !isKnown(state, state.at)) {
+    const message = `"${token.written}" is not an abbreviation this reader knows.`;
+    state.error('unknown-word', token, message);
+  } else if (afterNumber) {
+    const message = `"${state.last().written}" of what? A stitch is missing after the number.`;
+    state.error('not-understood', state.last(), message);
+  } else {
+    const message = `It is not clear what "${token.written}" means here.`;
+    state.report.say(isWord ? 'warning' : 'error', 'not-understood', token, message);
+  }
+  skipped(state, state.at);
   return [];
 }
 

@@ -1,5 +1,6 @@
 import type { PlaceFilter, Until, Where } from '../syntax';
 import { isAmount, readAmount } from './amount';
+import { correctWord } from './correct';
 import { ANY_STITCH, isNumberedChain, readFilter } from './filter';
 import { amountOf, type ParseState } from './parseState';
 import { readUntil } from './until';
@@ -42,6 +43,7 @@ function readWhere(state: ParseState, bare: boolean): Where | null {
   readLoops(state);
   takePost(state);
   state.skipFillers();
+  if (preposition) correctWord(state);
   const where = preposition ? placeNamed(state, preposition) : bareEach(state);
   if (!where) state.at = start;
   return where;
@@ -74,7 +76,9 @@ function placeNamed(state: ParseState, preposition: boolean): Where | null {
 function readNext(state: ParseState): Where | null {
   state.take('next');
   state.skipFillers();
+  correctWord(state);
   const amount = isPlainAmount(state) ? readAmount(state) : null;
+  correctWord(state);
   const filter = readFilter(state) ?? (amount ? ANY_STITCH : null);
   return filter && { kind: 'next', amount: amount ?? amountOf(1), filter };
 }
@@ -115,15 +119,19 @@ function readEach(state: ParseState): Where | null {
     return { kind: 'next', amount, filter };
   }
   const amount = isPlainAmount(state) ? readAmount(state) : null;
+  correctWord(state);
   const filter = readFilter(state);
   if (!filter) return null;
   if (amount) return { kind: 'next', amount, filter };
-  return { kind: 'each', filter, until: readUntil(state) ?? TO_THE_END };
+  let until = readUntil(state);
+  if (!until && state.peek().text.length > 5 && correctWord(state)) until = readUntil(state);
+  return { kind: 'each', filter, until: until ?? TO_THE_END };
 }
 
 function readLast(state: ParseState): Where | null {
   state.at += 1;
   const amount = isPlainAmount(state) ? readAmount(state) : null;
+  correctWord(state);
   const filter = readFilter(state) ?? (amount ? ANY_STITCH : null);
   return filter && { kind: 'last', amount: amount ?? amountOf(1), filter };
 }
@@ -148,6 +156,7 @@ function readAny(state: ParseState): Where | null {
 function readFirst(state: ParseState): Where | null {
   state.take('first');
   const amount = isPlainAmount(state) ? readAmount(state) : null;
+  correctWord(state);
   const filter = readFilter(state);
   if (!filter) return null;
   return amount ? { kind: 'next', amount, filter } : { kind: 'first', filter };

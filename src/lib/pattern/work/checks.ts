@@ -28,9 +28,17 @@ export function checkUnworked(hand: Hand, text: RoundText, report: Report): void
 }
 
 /** A round that begins with a chain and is not joined stays open. */
-export function checkClosed(hand: Hand, text: RoundText, report: Report): void {
+export function checkClosed(
+  hand: Hand,
+  text: RoundText,
+  othersJoined: boolean,
+  report: Report,
+): void {
   if (text.kind === 'row' || hand.joined || hand.budget.spent || hand.stitches.length === 0) return;
-  const begins = hand.stitches.some(({ role }) => role === 'standing' || role === 'turning');
+  const begins = hand.stitches.some(
+    // A chain of 1 may begin a spiral, which is never joined.
+    ({ role }) => role === 'standing' || (role === 'turning' && othersJoined),
+  );
   if (!begins) return;
   const last = (hand.stitches.at(-1) as { span: Span }).span;
   report.say(

@@ -50,6 +50,8 @@ export class Hand {
   attempts = 0;
   /** The place all stitches of a group go into. */
   inPlace: number | 'ring' | null = null;
+  /** A beginning chain that is a leg of the next stitch: the code of the whole, and where its chains begin. */
+  lead: { readonly code: string; readonly from: number } | null = null;
   /** A problem has been told that explains places left over. */
   explained = false;
   private start: number;
@@ -128,10 +130,16 @@ export class Hand {
   make(code: string, role: Role, into: Into, span: Span, head: boolean): void {
     if (!this.budget.stitch(span)) return;
     if (head) this.closeSpace();
-    const place = head
-      ? this.addPlace({ kind: 'stitch', code, chains: 0, into: indexOf(into) })
-      : null;
+    const place = head ? this.addHead(code, into) : null;
     this.stitches.push({ code, role, into, place, colour: this.colour, span });
+  }
+
+  private addHead(code: string, into: Into): number {
+    const whole = this.lead?.code ?? code;
+    const place = this.addPlace({ kind: 'stitch', code: whole, chains: 0, into: indexOf(into) });
+    for (const stitch of this.lead ? this.stitches.slice(this.lead.from) : []) stitch.place = place;
+    this.lead = null;
+    return place;
   }
 
   chain(role: Role, into: Into, span: Span): void {

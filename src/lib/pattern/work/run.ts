@@ -70,5 +70,7 @@ export function tell(
   span: Span,
   message: string,
 ): void {
-  if (hand.attempts === 0) hand.budget.report.say('error', code, span, message);
+  if (hand.attempts > 0 || (code === 'no-ring' && hand.budget.toldNoRing)) return;
+  if (code === 'no-ring') hand.budget.toldNoRing = true;
+  hand.budget.report.say('error', code, span, message);
 }

@@ -1,5 +1,5 @@
 import { PATTERN_LIMITS } from '../limits';
-import type { Into, Place, Role } from '../reading';
+import type { Into, Place, Role, Terms } from '../reading';
 import type { Report } from '../report';
 import type { Span } from '../span';
 import type { Corner } from '../reading';
@@ -37,10 +37,15 @@ export class Budget {
   stitches = 0;
   steps = 0;
   told = false;
+  /** That there is no ring is told once. */
+  toldNoRing = false;
+  /** So is that the terms may be the other ones. */
+  toldTerms = false;
 
   constructor(
     readonly report: Report,
     readonly chainRules: readonly ChainRule[],
+    readonly terms: Terms,
   ) {}
 
   /** Counts one step of work; false when there is too much, which is told once. */

@@ -1,4 +1,5 @@
-import { knownStitch, stitch } from '../../stitches/stitchTable';
+import type { Stitch } from '../../stitches/stitch';
+import { BASIC_STITCHES, knownStitch, stitch } from '../../stitches/stitchTable';
 import type { ChainStep, StandsFor, Step, StitchStep } from '../syntax';
 import { baseOf } from './family';
 import type { Hand } from './hand';
@@ -14,6 +15,8 @@ export function workChain(hand: Hand, step: ChainStep, ahead: Ahead): boolean {
     return true;
   }
   beginAfterTravel(hand);
+  const cluster = beginningCluster(ahead);
+  if (cluster) return leadCluster(hand, step, cluster);
   const standsFor = step.standsFor ?? ruled(hand, step) ?? inferred(hand, step, ahead);
   if (standsFor === 'space') {
     for (let i = 0; i < step.amount.value; i += 1) hand.chain('space', { kind: 'none' }, step);
@@ -24,6 +27,30 @@ export function workChain(hand: Hand, step: ChainStep, ahead: Ahead): boolean {
     return true;
   }
   standingStitch(hand, step, standsFor.code, standsFor.chains);
+  return true;
+}
+
+/**
+ * "ch 3, dc2tog" in a round of dc3tog is one of them: the chain is its first leg. The code of the whole
+ * cluster, or null.
+ */
+function beginningCluster({ steps, next }: Ahead): string | null {
+  const then = steps[next];
+  const first = then?.kind === 'group' ? then.parts[0] : then;
+  if (first?.kind !== 'stitch') return null;
+  const [, base, legs] = /^(hdc|dc|tr|dtr)(\d+)(?:tog|cl)$/.exec(first.code) ?? [];
+  if (!base) return null;
+  const whole = [`${base}${Number(legs) + 1}cl`, `${base}${Number(legs) + 1}tog`];
+  return stitchesOf(steps).find(({ code }) => whole.includes(code))?.code ?? null;
+}
+
+function leadCluster(hand: Hand, step: ChainStep, code: string): boolean {
+  if (!hand.isRing && hand.at < 0) hand.at = 0;
+  hand.begun = true;
+  const into = hand.isRing ? intoOf(hand, 'ring') : intoOf(hand, Math.max(0, hand.at));
+  const from = hand.stitches.length;
+  for (let i = 0; i < step.amount.value; i += 1) hand.chain('standing', into, step);
+  hand.lead = { code, from };
   return true;
 }
 
@@ -64,6 +91,7 @@ function tellHeight(
 ): void {
   const base = stitch(baseOf(code));
   if (!base || base.turningChains === 0 || base.turningChains === chains) return;
+  tellTerms(hand, step, base, chains);
   const right = base.turningChains + spaceChains;
   const short = chains < base.turningChains;
   hand.budget.report.say(
@@ -73,6 +101,18 @@ function tellHeight(
     `A chain of ${chains} is too ${short ? 'short' : 'tall'} for the ${code} it stands for, which is ${base.turningChains} chains tall.`,
     { label: `Write ${right}`, ...step.amountSpan, replacement: amountText(step, right) },
   );
+}
+
+/** The chain is right for the stitch that the same word means in the other terms. */
+function tellTerms(hand: Hand, step: ChainStep, { code, ukCode }: Stitch, chains: number): void {
+  const { terms } = hand.budget;
+  const word = terms === 'us' ? code : ukCode;
+  const other = BASIC_STITCHES.find((each) => (terms === 'us' ? each.ukCode : each.code) === word);
+  if (hand.budget.toldTerms || other?.turningChains !== chains) return;
+  hand.budget.toldTerms = true;
+  const [here, there] = terms === 'us' ? ['US', 'UK'] : ['UK', 'US'];
+  const message = `A chain of ${chains} is right for a ${word} in ${there} terms, not in ${here} terms: is the pattern written in ${there} terms?`;
+  hand.budget.report.say('warning', 'terms-doubtful', step, message);
 }
 
 /** "ch" with no number after it needs one. */
@@ -91,7 +131,7 @@ function inferred(hand: Hand, step: ChainStep, ahead: Ahead): StandsFor | 'space
   const tall = base === null ? 0 : (stitch(base)?.turningChains ?? 0);
   const skipsFirst = ahead.inRepeat || ahead.steps[ahead.next]?.kind === 'skip';
   if (tall <= 1)
-    return (chains > 1 || skipsFirst) && !hand.isRing && base !== null ? 'space' : NO_STITCH;
+    return skipsFirst || (chains > 1 && !hand.isRing && base !== null) ? 'space' : NO_STITCH;
   const sameStitch = first?.where[0]?.kind === 'same' && first.amount.value === 1 && !hand.isRing;
   if (chains === 1) return NO_STITCH;
   if (chains === 2) return base === 'hdc' && !sameStitch ? { code: 'hdc', chains: 0 } : NO_STITCH;

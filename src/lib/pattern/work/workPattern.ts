@@ -1,5 +1,4 @@
-import type { MotifSides } from '../../motifs/motif';
-import type { Place, WorkedRing, WorkedRound } from '../reading';
+import type { Place, ReadOptions, WorkedRing, WorkedRound } from '../reading';
 import type { Report } from '../report';
 import type { PatternText, RoundText, Step } from '../syntax';
 import { checkCorners } from './checkCorners';
@@ -21,13 +20,14 @@ export interface WorkedPattern {
 /** Works a pattern as a hand does, round by round, and reports what cannot be worked. */
 export function workPattern(
   pattern: PatternText,
-  sides: MotifSides,
+  { sides, terms }: Pick<ReadOptions, 'sides' | 'terms'>,
   report: Report,
 ): WorkedPattern {
-  const budget = new Budget(report, pattern.chainRules);
+  const budget = new Budget(report, pattern.chainRules, terms);
   const { ring, firstSteps } = foundationOf(pattern, budget);
   const rounds: WorkedRound[] = [];
   const texts: RoundText[] = [];
+  const hands: { hand: Hand; text: RoundText }[] = [];
   const seeming: CornerSearch['seeming'][] = [];
   let below = belowRing(ring);
   let start = 0;
@@ -41,7 +41,7 @@ export function workPattern(
     hand.isBack = isBack;
     work(hand, planned);
     checkUnworked(hand, text, report);
-    checkClosed(hand, text, report);
+    hands.push({ hand, text });
     const note = planned.note;
     const finished = finishRound(hand, text, planned.number, sides, note);
     rounds.push(finished.round);
@@ -51,6 +51,8 @@ export function workPattern(
     below = belowRound(finished.round);
     start = hand.endsInSpace ? Math.max(0, finished.round.places.length - 1) : 0;
   }
+  const joined = hands.some(({ hand }) => hand.joined);
+  for (const { hand, text } of hands) checkClosed(hand, text, joined, report);
   cornersBelow(rounds, sides);
   rounds.forEach((round, i) => {
     const text = texts[i];

@@ -48,7 +48,7 @@ function workWhere(hand: Hand, step: StitchStep, where: Where): boolean {
   }
   const takes = takesOf(step.code);
   // "dc3tog in next ch-2 sp" gathers its legs in one place.
-  const onePlace = where.kind === 'next' && where.filter.of !== 'stitch';
+  const onePlace = hand.isRing || (where.kind === 'next' && where.filter.of !== 'stitch');
   const isTravel = travels(hand, step, where);
   // The round below was joined at its first stitch, where the hook stands: the next one is the second.
   if (isTravel && hand.at < 0 && !hand.isRing && where.kind === 'next') hand.at = 0;
