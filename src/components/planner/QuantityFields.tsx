@@ -22,7 +22,7 @@ export function FabricField({ valueMm, units, maxMm, onChange, ...field }: Fabri
       min={0.1}
       max={Math.floor(maxMm / mm)}
       step={units === 'metric' ? 0.5 : 0.25}
-      value={valueMm === null ? null : Number((valueMm / mm).toPrecision(6))}
+      value={valueMm === null ? null : Number((valueMm / mm).toFixed(2))}
       onCommit={(reading) =>
         reading.ok && onChange(reading.value === null ? null : widthMm(reading.value * mm))
       }
@@ -48,7 +48,7 @@ export function YarnLengthField({ valueM, units, maxM, onChange, label }: YarnLe
       min={1}
       max={Math.floor(maxM / m)}
       step={5}
-      value={Number((valueM / m).toPrecision(6))}
+      value={Number((valueM / m).toFixed(1))}
       onCommit={(reading) =>
         reading.ok && reading.value !== null && onChange(lengthM(reading.value * m))
       }
