@@ -44,7 +44,7 @@ function ListOfBlanket({ initial, weight, colourways, units: shown }: BlanketSho
   });
   const failure = link.error ?? keep.error;
   return (
-    <div className="grid max-w-3xl gap-6 pb-10">
+    <div className="grid max-w-3xl grid-cols-[minmax(0,1fr)] gap-6 pb-10">
       <header>
         <h1>Shopping list</h1>
         <p className="mt-1 text-ink-2">

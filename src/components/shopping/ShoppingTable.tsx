@@ -1,6 +1,7 @@
 import type { ShoppingLine, ShoppingList } from '../../lib/shopping/shoppingList';
 import type { WeightCategory } from '../../lib/plan/plan';
 import { showMass, showPrice, showYarn, type Units } from '../../lib/units/display';
+import { classNames } from '../ui/classNames';
 import { WoundCard } from '../ui/WoundCard';
 
 interface ShoppingTableProps {
@@ -24,7 +25,7 @@ export function ShoppingTable({ list, weight, units, hasStash }: ShoppingTablePr
           <Heading>needed</Heading>
           {hasStash && <Heading>have</Heading>}
           <Heading>to buy</Heading>
-          {currency && <Heading>price</Heading>}
+          {currency && <Heading wide>price</Heading>}
         </tr>
       </thead>
       <tbody>
@@ -35,10 +36,10 @@ export function ShoppingTable({ list, weight, units, hasStash }: ShoppingTablePr
             </th>
             <Quantity lengthM={line.neededM} massG={line.neededG} units={units} />
             {hasStash && <Quantity lengthM={line.haveM} massG={line.haveG} units={units} />}
-            <ToBuy line={line} />
+            <ToBuy line={line} price={priceOf(line.costMinor, currency)} />
             {currency && (
-              <td className="figures ps-3 text-end">
-                {line.costMinor === null ? '' : showPrice(line.costMinor, currency)}
+              <td className="figures ps-3 text-end max-sm:hidden">
+                {priceOf(line.costMinor, currency)}
               </td>
             )}
           </tr>
@@ -49,11 +50,12 @@ export function ShoppingTable({ list, weight, units, hasStash }: ShoppingTablePr
           <th scope="row" className="py-2 text-start" colSpan={hasStash ? 3 : 2}>
             In all
           </th>
-          <td className="ps-3 text-end text-lg tabular-nums">{toBuySkeins}</td>
+          <td className="ps-3 text-end text-lg tabular-nums">
+            {toBuySkeins}
+            <span className="figures block text-sm sm:hidden">{priceOf(costMinor, currency)}</span>
+          </td>
           {currency && (
-            <td className="figures ps-3 text-end">
-              {costMinor === null ? '' : showPrice(costMinor, currency)}
-            </td>
+            <td className="figures ps-3 text-end max-sm:hidden">{priceOf(costMinor, currency)}</td>
           )}
         </tr>
       </tfoot>
@@ -61,11 +63,25 @@ export function ShoppingTable({ list, weight, units, hasStash }: ShoppingTablePr
   );
 }
 
-function Heading({ children, start }: { children: string; start?: boolean }) {
+const priceOf = (costMinor: number | null, currency: string | null): string =>
+  costMinor === null || currency === null ? '' : showPrice(costMinor, currency);
+
+interface HeadingProps {
+  children: string;
+  start?: boolean;
+  /** Only where there is room; on a phone the price stands under the skeins. */
+  wide?: boolean;
+}
+
+function Heading({ children, start, wide }: HeadingProps) {
   return (
     <th
       scope="col"
-      className={start ? 'pb-1 text-start font-normal' : 'ps-3 pb-1 text-end font-normal'}
+      className={classNames(
+        'pb-1 font-normal',
+        start ? 'text-start' : 'ps-3 text-end',
+        wide && 'max-sm:hidden',
+      )}
     >
       {children}
     </th>
@@ -81,10 +97,11 @@ function Quantity({ lengthM, massG, units }: { lengthM: number; massG: number; u
   );
 }
 
-function ToBuy({ line }: { line: ShoppingLine }) {
+function ToBuy({ line, price }: { line: ShoppingLine; price: string }) {
   return (
     <td className="ps-3 text-end">
       <span className="block text-lg font-bold tabular-nums">{line.toBuySkeins}</span>
+      <span className="figures block text-sm sm:hidden">{price}</span>
       <span className="block text-sm text-ink-2">
         {line.toBuySkeins === 0
           ? 'enough in hand'
