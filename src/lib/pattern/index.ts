@@ -1,5 +1,8 @@
 /** The pattern reader's table of contents. */
 export { readPattern } from './readPattern';
+export { printPattern, type PrintedPattern, type PrintOptions } from './print/printPattern';
+export { convertTerms } from './print/convertTerms';
+export type { KeyLine } from './print/vocabulary';
 export { motifOf } from './motifOf';
 export { tokenize } from './tokenize';
 export { PATTERN_LIMITS } from './limits';

@@ -13,7 +13,9 @@ export function readJoin(state: ParseState): JoinStep | AttachStep {
   state.at += 1;
   if (state.isWord('round') || state.means('round')) state.at += 1;
   const colour = readColour(state);
-  const namesYarn = colour !== null || /^(yarn|colour|color)$/.test(state.last().text);
+  const unnamed = colour === null && /^(yarn|colour|color|new)$/.test(state.peek().text);
+  while (unnamed && /^(yarn|colour|color|new)$/.test(state.peek().text)) state.at += 1;
+  const namesYarn = colour !== null || unnamed;
   let code: string | null = null;
   if (state.take('with') || state.isWord('by')) {
     state.skipFillers();

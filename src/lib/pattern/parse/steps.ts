@@ -48,7 +48,8 @@ function readOne(state: ParseState, close: string | null, steps: Step[]): boolea
     }
   }
   if (state.depth === 0) {
-    const note = readCountNote(state, steps.at(-1)?.kind === 'join');
+    const afterJoin = steps.at(-1)?.kind === 'join' && /^(\.|\n)$/.test(state.last().text);
+    const note = readCountNote(state, afterJoin);
     if (note) {
       state.note ??= note;
       return true;

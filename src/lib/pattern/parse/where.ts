@@ -85,7 +85,8 @@ function readNext(state: ParseState): Where | null {
 
 function readSame(state: ParseState): Where {
   state.take('same');
-  readFilter(state);
+  if (state.isWord('place')) state.at += 1;
+  else readFilter(state);
   if (!state.isWord('as')) return { kind: 'same' };
   state.at += 1;
   state.skipFillers();

@@ -74,5 +74,5 @@ function loopHeight(places: readonly Placed[]): LoopHeight | null {
   const { chains } = loop.place;
   const gapStitches = Math.max(1, Math.round(loop.lie.reach));
   const square = ((chains * CHAIN_WIDTHS) / 2) ** 2 - (gapStitches / 2) ** 2;
-  return square > SC_WIDTHS ** 2 ? { chains, gapStitches } : null;
+  return square > anchorHeight ** 2 ? { chains, gapStitches } : null;
 }

@@ -36,7 +36,9 @@ export function workPattern(
     if (budget.spent) break;
     const { text } = planned;
     const isBack = planned.turnsFirst || (text.kind === 'row' && rounds.length > 0);
-    const hand = new Hand(isBack ? turned(below, start) : below, budget, isBack ? 0 : start);
+    // A row is worked back from its end, a round from where it was joined.
+    const end = text.kind === 'row' ? Math.max(0, below.order.length - 1) : start;
+    const hand = new Hand(isBack ? turned(below, end) : below, budget, isBack ? 0 : start);
     hand.colour = text.colour ?? colour;
     hand.isBack = isBack;
     work(hand, planned);
