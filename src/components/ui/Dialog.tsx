@@ -41,7 +41,7 @@ function Panel(props: DialogProps & { place: string }) {
   return (
     <Radix.Root open={open} onOpenChange={onOpenChange}>
       <Radix.Portal>
-        <Radix.Overlay className="fixed inset-0 z-40 bg-veil" />
+        <Radix.Overlay className="fixed inset-0 z-50 bg-veil" />
         <Radix.Content
           className={classNames(
             'fixed z-50 flex flex-col border-edge bg-surface shadow-float outline-none',
