@@ -11,8 +11,11 @@ export { loopsOf } from './stitches/loops';
 export { swatchCounts } from './stitches/swatchCounts';
 export type { LoopHeight, Motif, MotifRound, MotifSides, Ring } from './motifs/motif';
 export { MOTIF_SIDES } from './motifs/motif';
-export { READY_MOTIFS, readyMotif } from './motifs/readyMotifs';
+export { LIBRARY_MOTIFS, READY_MOTIFS, readyMotif } from './motifs/readyMotifs';
+export { READY_PATTERNS } from './motifs/ready/readyPatterns';
 export { motifGeometry } from './motifs/geometry';
+// Patterns
+export * from './pattern';
 // Yarn, gauge and the maker's hand
 export { YARN_CATEGORIES, expectedStitchWidthMm, stitchWidthRangeMm } from './yarnCategories';
 export { gaugeOf } from './gauge/gauge';

@@ -111,7 +111,7 @@ function sidePlaces(
     outerHalfMm * ((2 * (j + cornerGap + 0.5)) / (round.perSide + 2 * cornerGap) - 1);
   const grouped = spaces > 0 && Number.isInteger(perGroup);
   return Array.from({ length: round.perSide }, (_, j) => j)
-    .filter((j) => !grouped || j % (perGroup + 1) !== perGroup)
+    .filter((j) => (grouped ? j % (perGroup + 1) !== perGroup : !isSpace(j, spaces, round.perSide)))
     .map((j) => {
       const headMm = head(j);
       if (!grouped) return { headMm, footMm: within(headMm, innerHalfMm) };
@@ -121,6 +121,10 @@ function sidePlaces(
       return { headMm, footMm: within(below + GROUP_FEET * (headMm - head(middle)), innerHalfMm) };
     });
 }
+
+/** Whether place `j` is one of the chain spaces of a side without groups, which are spread evenly. */
+const isSpace = (j: number, spaces: number, places: number): boolean =>
+  Math.round(((j + 1) * spaces) / places) > Math.round((j * spaces) / places);
 
 const within = (value: number, most: number): number => Math.max(-most, Math.min(most, value));
 
