@@ -16,11 +16,9 @@ async function expectGood(page: Page): Promise<void> {
 
 const STRANGERS = [
   '/',
-  '/?motif=hexagon',
   '/joins',
   '/motifs',
   '/motifs/group-square',
-  '/motifs/circle',
   '/how-it-works',
   '/sign-in',
   '/register',
@@ -99,11 +97,18 @@ interface List {
   items: { id: string }[];
 }
 
+const ADMINISTRATOR = demo.people.find(({ roles }) => roles.includes('administrator'))?.name ?? '';
+
+/** Somebody of the demonstration, who keeps much. */
+async function signInAs(page: Page, first: string): Promise<void> {
+  const email = demo.people.find((person) => person.name.startsWith(first))?.email ?? '';
+  await signIn(page, { name: '', email, password: demo.password });
+}
+
 test('the pages of somebody with much kept', async ({ page }) => {
   // Seven pages in both themes: the longest test there is.
   test.slow();
-  const [somebody] = demo.people;
-  await signIn(page, { name: '', email: somebody?.email ?? '', password: demo.password });
+  await signInAs(page, 'Isolde');
   const first = async (path: string) => (await send<List>(page, 'GET', path)).items[0]?.id ?? '';
   const blanket = await first('/api/blankets');
   const paths = [
@@ -116,6 +121,28 @@ test('the pages of somebody with much kept', async ({ page }) => {
     `/blankets/${blanket}/shopping-list`,
   ];
   for (const path of paths) {
+    await open(page, path);
+    await expectGood(page);
+  }
+});
+
+test('the stash being filled, and its table', async ({ page }) => {
+  await signInAs(page, 'Tamsin');
+  await open(page, '/stash');
+  await page.getByRole('radio', { name: 'Table' }).click();
+  await expect(page.getByRole('table')).toBeVisible();
+  await expectGood(page);
+  await page.getByRole('button', { name: 'Add yarn' }).click();
+  const sheet = page.getByRole('dialog');
+  await sheet.getByLabel('Whole skeins').fill('some');
+  await sheet.getByRole('button', { name: 'Add to the stash' }).click();
+  await expect(sheet.getByLabel('Whole skeins')).toHaveAttribute('aria-invalid', 'true');
+  await expectGood(page);
+});
+
+test('the pages of an administrator', async ({ page }) => {
+  await signInAs(page, ADMINISTRATOR);
+  for (const path of ['/admin', '/admin/changes']) {
     await open(page, path);
     await expectGood(page);
   }

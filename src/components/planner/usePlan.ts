@@ -72,6 +72,8 @@ export function usePlan(initial: Plan): PlanEditing {
       if (!(event.ctrlKey || event.metaKey) || event.altKey) return;
       const key = event.key.toLowerCase();
       if (key !== 'z' && key !== 'y') return;
+      // A title is no part of the plan: there the keys undo typing, as in any field.
+      if (event.target instanceof Element && event.target.closest('[data-own-undo]')) return;
       event.preventDefault();
       if (key === 'y' || event.shiftKey) redo();
       else undo();

@@ -94,6 +94,16 @@ describe('usePlan', () => {
     expect(result.current.plan.confidence).toBe(0.5);
   });
 
+  it('leaves the undoing of a title to its field', () => {
+    const { result } = renderHook(() => usePlan(EXAMPLE_PLAN));
+    act(() => result.current.change(sure(0.5)));
+    document.body.innerHTML = '<input data-own-undo>';
+    const title = document.querySelector('input') as HTMLInputElement;
+    expect(fireEvent.keyDown(title, { key: 'z', ctrlKey: true })).toBe(true);
+    expect(result.current.plan.confidence).toBe(0.5);
+    document.body.innerHTML = '';
+  });
+
   it('listens no longer once it is gone', () => {
     const { unmount } = renderHook(() => usePlan(EXAMPLE_PLAN));
     unmount();
