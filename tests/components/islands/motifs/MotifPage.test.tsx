@@ -28,7 +28,8 @@ const show = (motif = square, terms: 'us' | 'uk' = 'us') =>
   render(<MotifPage motif={motif} swatches={[swatch]} units="metric" terms={terms} />);
 const choose = (label: string, value: string) =>
   fireEvent.change(screen.getByLabelText(label), { target: { value } });
-const rows = () => within(screen.getByRole('region', { name: 'Table of rounds' })).getAllByRole('row');
+const rows = () =>
+  within(screen.getByRole('region', { name: 'Table of rounds' })).getAllByRole('row');
 
 describe('MotifPage', () => {
   it('has a row for every round it is worked to', () => {
