@@ -75,7 +75,7 @@ export function Planner({ editing, preferences, heading, keeping, shoppingHref }
         >
           {heading}
           <HistoryBar editing={editing} keeping={keeping} />
-          <YarnSection {...shared} currency={preferences.currency} />
+          <YarnSection {...shared} terms={terms} currency={preferences.currency} />
           <SwatchSection {...shared} terms={terms} />
           <WeighedSection {...shared} />
           <MotifSection {...shared} onColours={() => setSheet('colours')} />

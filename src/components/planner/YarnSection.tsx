@@ -1,24 +1,26 @@
 import type { Plan, PlanYarn, WeightCategory } from '../../lib/plan/plan';
 import { currencyDecimals, type Units } from '../../lib/units/display';
 import { massG, priceMinor } from '../../lib/units/quantities';
-import { YARN_CATEGORIES } from '../../lib/yarnCategories';
 import { PLAN_LIMITS } from '../../schemas/limits';
 import { NumberField } from '../ui/NumberField';
 import { Select } from '../ui/Select';
+import { weightOptions } from '../yarnWeights';
 import { YarnLengthField } from './QuantityFields';
 import { Section } from './Section';
+import type { Terms } from './stitchWord';
 import type { ChangePlan } from './usePlan';
 
 interface YarnSectionProps {
   plan: Plan;
   units: Units;
+  terms: Terms;
   /** Of prices typed here, where the yarn has none yet. */
   currency: string;
   change: ChangePlan;
 }
 
 /** What one skein holds and costs, and how thick the yarn is. */
-export function YarnSection({ plan, units, currency, change }: YarnSectionProps) {
+export function YarnSection({ plan, units, terms, currency, change }: YarnSectionProps) {
   const { yarn } = plan;
   const set = (part: Partial<PlanYarn>, about: string) =>
     change((old) => ({ ...old, yarn: { ...old.yarn, ...part } }), about);
@@ -58,10 +60,7 @@ export function YarnSection({ plan, units, currency, change }: YarnSectionProps)
           onChange={(event) =>
             set({ weightCategory: Number(event.target.value) as WeightCategory }, 'weight')
           }
-          options={YARN_CATEGORIES.map(({ category, name, stitchesIn4In: [fewest, most] }) => ({
-            value: String(category),
-            word: `${category} ${name} · ${fewest}–${most} ${category === 0 ? 'dc' : 'sc'} in 4 in`,
-          }))}
+          options={weightOptions(terms)}
         />
       </div>
     </Section>
