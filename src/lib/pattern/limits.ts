@@ -17,6 +17,8 @@ export const PATTERN_LIMITS = {
   workSteps: 600_000,
   /** Problems told; a text with more of them is not a pattern. */
   diagnostics: 200,
-  /** Tokens of one sentence that are looked through for a stitch. */
-  sentenceLookAhead: 400,
+  /** Tokens that are looked at as one sentence. */
+  sentence: 400,
+  /** Figures of one count note. */
+  countEntries: 40,
 } as const;

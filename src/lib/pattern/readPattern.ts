@@ -36,7 +36,7 @@ export function readPattern(text: string, options: ReadOptions): Reading {
     report,
   );
   const pattern = parsePattern(state);
-  const { ring, rounds } = workPattern(pattern, options, report);
+  const { ring, rounds, workSteps } = workPattern(pattern, options, report);
   return {
     text,
     terms: options.terms,
@@ -44,6 +44,7 @@ export function readPattern(text: string, options: ReadOptions): Reading {
     pattern,
     ring,
     rounds,
+    workSteps,
     diagnostics: report.diagnostics(),
   };
 }

@@ -123,6 +123,8 @@ export interface Reading {
   readonly pattern: PatternText;
   readonly ring: WorkedRing;
   readonly rounds: readonly WorkedRound[];
+  /** Instructions carried out and places looked at: at most `PATTERN_LIMITS.workSteps` and a little. */
+  readonly workSteps: number;
   /** In the order of the text. */
   readonly diagnostics: readonly Diagnostic[];
 }

@@ -16,10 +16,22 @@ const VERBS: ReadonlySet<string> = new Set(
   ),
 );
 
+/** A longer word is no abbreviation, mistyped or not. */
+const LONGEST_SLIP = 14;
+
 /** Where the sentence that begins here ends: the index of its full stop, end of line or end of text. */
-export function sentenceEnd(state: ParseState, from = state.at): number {
+export function sentenceEnd(state: ParseState): number {
+  const from = state.at;
+  if (from >= state.sentence.from && from <= state.sentence.end) return state.sentence.end;
+  const end = findEnd(state, from);
+  state.sentence = { from, end };
+  return end;
+}
+
+function findEnd(state: ParseState, from: number): number {
   let at = from;
-  while (at < state.tokens.length - 1) {
+  const most = Math.min(state.tokens.length - 1, from + PATTERN_LIMITS.sentence);
+  while (at < most) {
     const token = state.tokens[at];
     if (token?.kind === 'line') return at;
     if (token?.kind === 'mark' && token.text === '.' && endsHere(state, at)) return at;
@@ -42,10 +54,9 @@ export function isComment(state: ParseState, end = sentenceEnd(state)): boolean 
   const first = state.peek();
   if (first.kind !== 'word') return false;
   if (OPENERS.has(first.text) && (state.isMark(':', 1) || !isKnown(state, state.at))) return true;
-  const last = Math.min(end, state.at + PATTERN_LIMITS.sentenceLookAhead);
   let unknown = 0;
   let instructions = 0;
-  for (let at = state.at; at < last; at += 1) {
+  for (let at = state.at; at < end; at += 1) {
     const token = state.tokens[at];
     if (token?.kind === 'mark' && /^[*([]/.test(token.text)) instructions += 1;
     if (token?.kind !== 'word') continue;
@@ -62,8 +73,14 @@ const isSlip = (state: ParseState): boolean => nearestKnown(state, state.peek().
 
 /** The known word that this one is most likely a slip of; plain English never is. */
 export function nearestKnown(state: ParseState, word: string): string | null {
-  if (PLAIN_WORDS.has(word) || word.length > 20) return null;
-  return nearest(word, state.lexicon.known);
+  if (PLAIN_WORDS.has(word) || word.length > LONGEST_SLIP) return null;
+  const known = state.nearest.get(word);
+  if (known !== undefined) return known;
+  const found = nearest(word, state.lexicon.known);
+  // Part of a name, such as "single", which is not one on its own.
+  const near = found === word ? null : found;
+  state.nearest.set(word, near);
+  return near;
 }
 
 const isInstruction = (state: ParseState, at: number): boolean =>

@@ -1,4 +1,3 @@
-import type { Token } from '../token';
 import { isKnown, nearestKnown } from './comment';
 import type { ParseState } from './parseState';
 
@@ -15,7 +14,6 @@ export function correctWord(state: ParseState): boolean {
   const { begin, end } = token;
   const fix = { label: `Write "${near}"`, begin, end, replacement: near };
   state.error('unknown-word', token, message, fix);
-  const read: Token = { ...token, text: near };
-  state.tokens[state.at] = read;
+  state.replace(state.at, { ...token, text: near });
   return true;
 }

@@ -57,6 +57,7 @@ function readEntries(state: ParseState): CountEntry[] {
     const entry = readEntry(state);
     if (entry === null) return [];
     if (entry !== 'uncounted') entries.push(entry);
+    if (entries.length > PATTERN_LIMITS.countEntries) return [];
     const more =
       state.takeMark(',') ||
       state.takeMark(';') ||

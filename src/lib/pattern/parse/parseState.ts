@@ -16,6 +16,12 @@ export class ParseState {
   openStars = 0;
   /** How many steps of the open star stand before its "**"; null before it is read. */
   endMark: number | null = null;
+  /** The sentence that was looked at last. */
+  sentence = { from: 0, end: -1 };
+  /** Stitches looked up already, by the token they begin at. */
+  private readonly stitches: (StitchTerm | null)[] = [];
+  /** Words looked up already, with the known word nearest to each. */
+  readonly nearest = new Map<string, string | null>();
   /** Remarks that were stepped over. */
   comments: Span[] = [];
   /** Chains that the whole pattern counts alike. */
@@ -86,7 +92,18 @@ export class ParseState {
   }
 
   stitchHere(ahead = 0): StitchTerm | null {
-    return readStitch(this.tokens, this.at + ahead, this.lexicon);
+    const at = this.at + ahead;
+    const known = this.stitches[at];
+    if (known !== undefined) return known;
+    const found = readStitch(this.tokens, at, this.lexicon);
+    this.stitches[at] = found;
+    return found;
+  }
+
+  /** Reads this token as another from now on. */
+  replace(at: number, token: Token): void {
+    this.tokens[at] = token;
+    this.stitches.length = 0;
   }
 
   /** The stretch from a token to the last one that was read. */

@@ -9,13 +9,28 @@ export function nearest(word: string, known: Iterable<string>): string | null {
   let bestDistance = word.length >= 6 ? 3 : word.length >= 2 ? 2 : 0;
   for (const each of known) {
     if (Math.abs(each.length - word.length) >= bestDistance) continue;
-    const distance = editDistance(word, each, bestDistance);
+    const distance =
+      bestDistance === 2 ? oneEdit(word, each) : editDistance(word, each, bestDistance);
     if (distance < bestDistance) {
       best = each;
       bestDistance = distance;
     }
   }
   return best;
+}
+
+/** 0 for the same word, 1 where one letter is wrong, missing, too many or swapped with its neighbour, else 2. */
+function oneEdit(left: string, right: string): number {
+  let begin = 0;
+  while (begin < left.length && left[begin] === right[begin]) begin += 1;
+  let end = 0;
+  const most = Math.min(left.length, right.length) - begin;
+  while (end < most && left[left.length - 1 - end] === right[right.length - 1 - end]) end += 1;
+  const leftOver = left.length - begin - end;
+  const rightOver = right.length - begin - end;
+  if (leftOver <= 1 && rightOver <= 1) return Math.max(leftOver, rightOver);
+  const swapped = leftOver === 2 && rightOver === 2;
+  return swapped && left[begin] === right[begin + 1] && left[begin + 1] === right[begin] ? 1 : 2;
 }
 
 /** Optimal string alignment distance, given up at `most`. */

@@ -48,9 +48,13 @@ function ownStitch(token: Token, at: number, lexicon: Lexicon): StitchTerm | nul
     : null;
 }
 
+/** Letters that "front", "back" and their abbreviations begin with. */
+const BEGIN_INSERTION: ReadonlySet<string> = new Set(['f', 'b']);
+
 /** "FPdc", "BLO dc", "front post dc". */
 function inserted(tokens: readonly Token[], at: number, lexicon: Lexicon): StitchTerm | null {
   const word = tokens[at]?.text ?? '';
+  if (!BEGIN_INSERTION.has(word[0] ?? '')) return null;
   for (const letters of [3, 2]) {
     const letter = INSERTION_WORDS.get(word.slice(0, letters));
     const base = letter && baseWord(word.slice(letters), lexicon);
@@ -66,9 +70,11 @@ function inserted(tokens: readonly Token[], at: number, lexicon: Lexicon): Stitc
   return one(letter + base.code, base.next, base.foreign ? at + width : null);
 }
 
+const JOINED = /^([a-z]{1,6}?)(\d{1,2})(tog|cl|pc|together)$/;
+
 /** A stitch by its abbreviation or name, and what may follow it: "dc", "dc3tog", "dc 3 tog", "dc cluster". */
 function named(tokens: readonly Token[], at: number, lexicon: Lexicon): StitchTerm | null {
-  const joined = /^([a-z]+?)(\d{1,2})(tog|cl|pc|together)$/.exec(tokens[at]?.text ?? '');
+  const joined = JOINED.exec(tokens[at]?.text ?? '');
   if (joined) {
     const base = baseWord(joined[1] as string, lexicon);
     const compound = COMPOUND_WORDS.get(joined[3] as string);

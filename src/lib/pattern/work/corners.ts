@@ -76,7 +76,9 @@ function spacesByKind(places: readonly DraftPlace[], lies: readonly Lie[], inPla
   const byKind = new Map<string, number[]>();
   places.forEach(({ kind, code }, i) => {
     if (kind !== 'space' || (inPlaceOnly && !lies[i]?.inPlace)) return;
-    byKind.set(code, [...(byKind.get(code) ?? []), i]);
+    const same = byKind.get(code);
+    if (same) same.push(i);
+    else byKind.set(code, [i]);
   });
   return byKind;
 }
@@ -101,7 +103,7 @@ function stitchesInCorners(
   sides: number,
 ): Corners | null {
   const together = stitchesByPlace(places);
-  const most = Math.max(0, ...[...together.values()].map(({ length }) => length));
+  const most = [...together.values()].reduce((best, { length }) => Math.max(best, length), 0);
   const groups = [...together.entries()].filter(([into, { length }]) =>
     below.corner === null
       ? length === most && most >= 3 && below.kind === 'places'
@@ -122,7 +124,10 @@ function stitchesInCorners(
 function stitchesByPlace(places: readonly DraftPlace[]): Map<number, number[]> {
   const together = new Map<number, number[]>();
   places.forEach(({ kind, into }, i) => {
-    if (kind === 'stitch' && into >= 0) together.set(into, [...(together.get(into) ?? []), i]);
+    if (kind !== 'stitch' || into < 0) return;
+    const same = together.get(into);
+    if (same) same.push(i);
+    else together.set(into, [i]);
   });
   return together;
 }

@@ -165,7 +165,8 @@ export class Hand {
     this.pending = [];
   }
 
-  snapshot(): Snapshot {
+  snapshot(span: Span): Snapshot {
+    this.budget.step(span, this.pending.length);
     const { at, begun, colour, passedStitches, passedSpaces, worked, skipped } = this;
     return {
       stitches: this.stitches.length,

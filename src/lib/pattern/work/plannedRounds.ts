@@ -1,3 +1,4 @@
+import { PATTERN_LIMITS } from '../limits';
 import type { Report } from '../report';
 import type { CountNote, PatternText, RoundText, Step } from '../syntax';
 
@@ -25,6 +26,10 @@ export function plannedRounds(
     for (let number = text.from; number <= Math.max(text.from, text.to); number += 1) {
       const own = i === 0 && number === text.from ? firstSteps : text.steps;
       const steps = stepsOf(text, number, own, byNumber, report);
+      if (planned.length >= PATTERN_LIMITS.rounds) {
+        tellTooMany(text, report);
+        return planned;
+      }
       byNumber.set(number, steps);
       const { worked, later, turnsAfter } = split(steps);
       const opening = worked.findIndex(({ kind }) => kind !== 'turn' && kind !== 'colour');
@@ -36,6 +41,11 @@ export function plannedRounds(
     }
   }
   return planned;
+}
+
+function tellTooMany(text: RoundText, report: Report): void {
+  const message = `A pattern may have ${PATTERN_LIMITS.rounds} rounds; the rest is not worked.`;
+  report.say('error', 'limit', text.header, message);
 }
 
 /** The steps of the rounds that a line repeats, one after another, and then its own. */

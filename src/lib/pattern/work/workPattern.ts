@@ -15,6 +15,7 @@ import { Budget, type Below } from './state';
 export interface WorkedPattern {
   readonly ring: WorkedRing;
   readonly rounds: WorkedRound[];
+  readonly workSteps: number;
 }
 
 /** Works a pattern as a hand does, round by round, and reports what cannot be worked. */
@@ -61,7 +62,7 @@ export function workPattern(
     if (round.note && text) checkNote(round, round.note, round.number - text.from, report);
   });
   checkCorners(rounds, texts, seeming, sides, report);
-  return { ring, rounds };
+  return { ring, rounds, workSteps: budget.steps };
 }
 
 function work(hand: Hand, { steps }: PlannedRound): void {

@@ -28,7 +28,7 @@ function untilNothingIsLeft(hand: Hand, step: RepeatStep, until: Until): boolean
   let each = 0;
   let atMark: ReturnType<Hand['snapshot']> | null = null;
   for (;;) {
-    const before = hand.snapshot();
+    const before = hand.snapshot(step);
     const { result, mark } = attempt(hand, step);
     const moved =
       hand.at !== before.at || hand.worked > before.worked || hand.skipped > before.skipped;
@@ -62,7 +62,7 @@ interface Attempt {
 function attempt(hand: Hand, step: RepeatStep): Attempt {
   hand.attempts += 1;
   const done = run(hand, step.parts, true, step.partsBeforeEnd ?? step.parts.length);
-  const mark = done && step.partsBeforeEnd !== null ? hand.snapshot() : null;
+  const mark = done && step.partsBeforeEnd !== null ? hand.snapshot(step) : null;
   let result: Attempt['result'] = done ? 'done' : 'failed';
   if (mark) {
     const after = step.parts.slice(step.partsBeforeEnd ?? 0);
