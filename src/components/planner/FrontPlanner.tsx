@@ -1,6 +1,6 @@
 import { RotateCcw } from 'lucide-react';
 import { lazy, useState } from 'react';
-import { EXAMPLE_PLAN } from '../../lib/plan/examplePlan';
+import type { MotifChoice } from '../../lib/motifs/motifChoices';
 import type { Plan } from '../../lib/plan/plan';
 import { Button } from '../ui/Button';
 import { LoadedLater } from '../ui/LoadedLater';
@@ -11,23 +11,27 @@ import { useStoredPlan } from './useStoredPlan';
 const KeepBlanket = lazy(() => import('./KeepBlanket'));
 
 interface FrontPlannerProps {
+  example: Plan;
   /** The example, or it with the motif or swatch that the address asks for. */
   initial: Plan;
   /** The address asked for something: do not bring back what was on the screen last time. */
   asked: boolean;
   signedIn: boolean;
+  motifChoices: readonly MotifChoice[];
   preferences: PlannerPreferences;
 }
 
 /** The estimator of the front page: works at once, remembers on this device, can be kept by signing up. */
-export default function FrontPlanner({ initial, asked, signedIn, preferences }: FrontPlannerProps) {
+export default function FrontPlanner(props: FrontPlannerProps) {
+  const { example, initial, asked, signedIn, motifChoices, preferences } = props;
   const editing = usePlan(initial);
-  const stored = useStoredPlan(editing, asked);
+  const stored = useStoredPlan(editing, example, asked);
   const [keeping, setKeeping] = useState(false);
   return (
     <Planner
       editing={editing}
       preferences={preferences}
+      motifChoices={motifChoices}
       heading={
         <div>
           <h1>How much yarn, how big, how sure</h1>
@@ -45,7 +49,7 @@ export default function FrontPlanner({ initial, asked, signedIn, preferences }: 
               kind="quiet"
               small
               icon={RotateCcw}
-              onClick={() => editing.change(() => EXAMPLE_PLAN)}
+              onClick={() => editing.change(() => example)}
             >
               Example
             </Button>

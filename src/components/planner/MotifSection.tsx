@@ -1,7 +1,6 @@
 import { Palette } from 'lucide-react';
 import type { Estimate } from '../../lib/ledger/ledger';
-import { READY_MOTIFS, readyMotif } from '../../lib/motifs/readyMotifs';
-import { withMotif } from '../../lib/plan/edits';
+import type { MotifChoice } from '../../lib/motifs/motifChoices';
 import type { Plan } from '../../lib/plan/plan';
 import { showFabric, type Units } from '../../lib/units/display';
 import { PLAN_LIMITS } from '../../schemas/limits';
@@ -11,24 +10,25 @@ import { WoundCard } from '../ui/WoundCard';
 import { FabricField } from './QuantityFields';
 import { Section } from './Section';
 import type { ChangePlan } from './usePlan';
+import { useReadyMotif } from './useReadyMotif';
 
 interface MotifSectionProps {
   plan: Plan;
   estimate: Estimate;
   units: Units;
   change: ChangePlan;
+  choices: readonly MotifChoice[];
   onColours: () => void;
 }
 
 /** Which motif, to how many rounds, how big it came out, and in which colours. */
-export function MotifSection({ plan, estimate, units, change, onColours }: MotifSectionProps) {
+export function MotifSection(props: MotifSectionProps) {
+  const { plan, estimate, units, change, choices, onColours } = props;
+  const { choose, failed } = useReadyMotif(change);
   const motif = plan.motifs[0];
   if (!motif) return null;
-  const ready = readyMotif(motif.key);
-  const choose = (key: string, rounds: number) => {
-    const next = readyMotif(key, rounds);
-    if (next) change((old) => withMotif(old, next));
-  };
+  const ready = choices.find(({ key }) => key === motif.key);
+  const rounds = ready?.rounds ?? motif.rounds.length;
   const computedMm = estimate.motifs[0]?.acrossMm ?? 0;
   const across =
     motif.sides === 0
@@ -42,10 +42,11 @@ export function MotifSection({ plan, estimate, units, change, onColours }: Motif
         <Select
           label="Pattern"
           value={motif.key}
+          error={failed ? 'This pattern could not be loaded. Try again.' : undefined}
           onChange={(event) => choose(event.target.value, motif.rounds.length)}
           options={[
             ...(ready ? [] : [{ value: motif.key, word: motif.name }]),
-            ...READY_MOTIFS.map(({ key, name }) => ({ value: key, word: name })),
+            ...choices.map(({ key, name }) => ({ value: key, word: name })),
           ]}
         />
       </div>
@@ -55,7 +56,7 @@ export function MotifSection({ plan, estimate, units, change, onColours }: Motif
           value={String(motif.rounds.length)}
           disabled={!ready}
           onChange={(event) => choose(motif.key, Number(event.target.value))}
-          options={(ready ?? motif).rounds.map((_, i) => ({
+          options={Array.from({ length: rounds }, (_, i) => ({
             value: String(i + 1),
             word: i === 0 ? '1 round' : `${i + 1} rounds`,
           }))}

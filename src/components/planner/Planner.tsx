@@ -1,5 +1,6 @@
 import { Redo2, Undo2 } from 'lucide-react';
 import { lazy, useState, type ReactNode } from 'react';
+import type { MotifChoice } from '../../lib/motifs/motifChoices';
 import type { Plan } from '../../lib/plan/plan';
 import { showFabric, showSize, type Units } from '../../lib/units/display';
 import { BlanketPicture } from '../blanket/BlanketPicture';
@@ -38,6 +39,7 @@ export interface PlannerPreferences {
 interface PlannerProps {
   editing: PlanEditing;
   preferences: PlannerPreferences;
+  motifChoices: readonly MotifChoice[];
   /** Above the inputs: a title, or the name and the state of a saved blanket. */
   heading: ReactNode;
   /** Beside undo and redo: how the plan is kept. */
@@ -49,11 +51,12 @@ interface PlannerProps {
 type OpenSheet = 'none' | 'colours' | 'ledger' | 'compare' | 'shopping';
 
 /** The estimator: inputs left, the answer and the picture right; everything recomputed at each change. */
-export function Planner({ editing, preferences, heading, keeping, shoppingHref }: PlannerProps) {
+export function Planner(props: PlannerProps) {
+  const { editing, preferences, motifChoices, heading, keeping, shoppingHref } = props;
   const { plan, change } = editing;
   const units = useUnits(preferences.units);
   const terms = useTerms(preferences.terms);
-  const { estimate, impossible } = useEstimate(plan);
+  const { estimate, impossible } = useEstimate(plan, editing.initial);
   const [sheet, setSheet] = useState<OpenSheet>('none');
   const [ledgerColour, setLedgerColour] = useState('all');
   const [picked, setPicked] = useState<string | null>(null);
@@ -78,7 +81,7 @@ export function Planner({ editing, preferences, heading, keeping, shoppingHref }
           <YarnSection {...shared} terms={terms} currency={preferences.currency} />
           <SwatchSection {...shared} terms={terms} />
           <WeighedSection {...shared} />
-          <MotifSection {...shared} onColours={() => setSheet('colours')} />
+          <MotifSection {...shared} choices={motifChoices} onColours={() => setSheet('colours')} />
           <BlanketSection {...shared} terms={terms} />
         </form>
         <div className="grid content-start gap-8 px-4 pt-6 pb-10 lg:px-9" data-answer>

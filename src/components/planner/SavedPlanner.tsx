@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import type { MotifChoice } from '../../lib/motifs/motifChoices';
 import { KEPT_LIMITS } from '../../schemas/limits';
 import { WithQueries } from '../islands/WithQueries';
 import { Button } from '../ui/Button';
@@ -10,6 +11,7 @@ import { useAutosave, type Kept, type KeptVersion } from './useAutosave';
 import { usePlan } from './usePlan';
 
 interface SavedPlannerProps {
+  motifChoices: readonly MotifChoice[];
   blanket: KeptVersion & { id: string };
   preferences: PlannerPreferences;
 }
@@ -23,7 +25,7 @@ export default function SavedPlanner(props: SavedPlannerProps) {
   );
 }
 
-function Saved({ blanket, preferences }: SavedPlannerProps) {
+function Saved({ blanket, motifChoices, preferences }: SavedPlannerProps) {
   const editing = usePlan(blanket.plan);
   const [title, setTitle] = useState(blanket.title);
   const mine = { title, plan: editing.plan };
@@ -39,6 +41,7 @@ function Saved({ blanket, preferences }: SavedPlannerProps) {
     <Planner
       editing={editing}
       preferences={preferences}
+      motifChoices={motifChoices}
       shoppingHref={`/blankets/${blanket.id}/shopping-list`}
       heading={
         <div className="grid gap-3">

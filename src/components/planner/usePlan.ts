@@ -45,6 +45,8 @@ export function planHistory(history: History, act: Act): History {
 export type ChangePlan = (edit: (plan: Plan) => Plan, about?: string) => void;
 
 export interface PlanEditing {
+  /** What the page was opened with. */
+  readonly initial: Plan;
   readonly plan: Plan;
   readonly change: ChangePlan;
   readonly undo: () => void;
@@ -82,6 +84,7 @@ export function usePlan(initial: Plan): PlanEditing {
     return () => document.removeEventListener('keydown', onKey);
   }, [undo, redo]);
   return {
+    initial,
     plan: history.plan,
     change,
     undo,

@@ -1,5 +1,4 @@
 import { useEffect, useState } from 'react';
-import { EXAMPLE_PLAN } from '../../lib/plan/examplePlan';
 import type { Plan } from '../../lib/plan/plan';
 import type { PlanEditing } from './usePlan';
 
@@ -9,7 +8,11 @@ const KEY = 'ellwise.plan';
  * Keeps the plan on this device while it differs from the example, and brings it back on the next
  * visit. Says whether the plan on the screen is one's own.
  */
-export function useStoredPlan({ plan, change }: PlanEditing, asked: boolean): boolean {
+export function useStoredPlan(
+  { plan, change }: PlanEditing,
+  example: Plan,
+  asked: boolean,
+): boolean {
   const [ready, setReady] = useState(asked);
   useEffect(() => {
     if (ready) return;
@@ -24,7 +27,7 @@ export function useStoredPlan({ plan, change }: PlanEditing, asked: boolean): bo
     };
   }, [ready, change]);
 
-  const own = JSON.stringify(plan) !== JSON.stringify(EXAMPLE_PLAN);
+  const own = JSON.stringify(plan) !== JSON.stringify(example);
   useEffect(() => {
     if (!ready) return;
     try {

@@ -8,7 +8,7 @@ afterEach(cleanup);
 
 const IMPOSSIBLE: Plan = { ...EXAMPLE_PLAN, join: { key: 'glue', colour: 'c1' } };
 const watching = (initial: Plan) =>
-  renderHook((plan: Plan) => useEstimate(plan), { initialProps: initial });
+  renderHook((plan: Plan) => useEstimate(plan, EXAMPLE_PLAN), { initialProps: initial });
 
 describe('useEstimate', () => {
   it("gives the library's own estimate", () => {
@@ -27,7 +27,7 @@ describe('useEstimate', () => {
     expect(result.current).toEqual({ estimate: estimate(EXAMPLE_PLAN), impossible: false });
   });
 
-  it('shows the example where there never was an answer', () => {
+  it('shows what the page was opened with where there never was an answer', () => {
     const { result } = watching(IMPOSSIBLE);
     expect(result.current).toEqual({ estimate: estimate(EXAMPLE_PLAN), impossible: true });
   });

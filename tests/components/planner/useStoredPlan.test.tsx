@@ -21,7 +21,7 @@ afterEach(() => {
 const visit = (initial = EXAMPLE_PLAN, asked = false) =>
   renderHook(() => {
     const editing = usePlan(initial);
-    return { editing, own: useStoredPlan(editing, asked) };
+    return { editing, own: useStoredPlan(editing, EXAMPLE_PLAN, asked) };
   });
 
 const stored = (): unknown => JSON.parse(localStorage.getItem(KEY) ?? 'null');
