@@ -1,4 +1,5 @@
 import type { PlaceFilter } from '../syntax';
+import { tellForeign } from './foreign';
 import type { ParseState } from './parseState';
 
 const filterOf = (
@@ -48,6 +49,7 @@ function plainFilter(state: ParseState): PlaceFilter | null {
   if (isNumberedChain(state)) return numberedChain(state);
   const term = state.stitchHere();
   if (!term || term.code === 'ch') return null;
+  tellForeign(state, term);
   state.at = term.next;
   if (state.means('st')) state.at += 1;
   return filterOf('stitch', term.code);

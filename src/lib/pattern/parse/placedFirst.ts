@@ -1,6 +1,7 @@
 import type { Step } from '../syntax';
 import type { ParseState } from './parseState';
 import { readBracket } from './bracket';
+import { readInstruction } from './instruction';
 import { readWheres } from './where';
 import { amountOf } from './parseState';
 import { closerOf } from './countNote';
@@ -12,27 +13,41 @@ import { closerOf } from './countNote';
 export function readPlacedFirst(state: ParseState): Step[] | null {
   const start = state.at;
   if (!state.means('in') && !state.means('each')) return null;
-  state.insertionHere = '';
   const where = readWheres(state);
   if (where.length === 0) {
-    if (state.insertionHere === '' && state.at === start && !takesLoops(state)) {
-      state.at = start;
-      return null;
+    if (takesLoops(state)) {
+      state.insertion = state.insertionHere;
+      return [];
     }
-    state.insertion = state.insertionHere;
-    return [];
+    state.at = start;
+    return null;
   }
   if (where[0]?.kind === 'ring') return [];
   while (
-    state.isMark(',') ||
-    state.isMark(':') ||
+    /^[,:]$/.test(state.peek().text) ||
     state.means('filler') ||
     state.peek().kind === 'line'
-  )
+  ) {
     state.at += 1;
-  if (closerOf(state.peek().text) === null) return null;
-  const parts = readBracket(state);
+  }
+  const parts = closerOf(state.peek().text) === null ? listed(state) : readBracket(state);
+  if (parts.length === 0) {
+    state.at = start;
+    return null;
+  }
   return [{ kind: 'group', parts, times: amountOf(1), where, ...state.spanFrom(start) }];
+}
+
+/** "2 dc, ch 2, 2 dc" without brackets: up to the end of the clause. */
+function listed(state: ParseState): Step[] {
+  const parts: Step[] = [];
+  do parts.push(...readInstruction(state));
+  while (
+    state.takeMark(',') &&
+    /^(word|number)$/.test(state.peek().kind) &&
+    !state.means('repeat')
+  );
+  return parts;
 }
 
 /** "in BLO" with no place after it. */

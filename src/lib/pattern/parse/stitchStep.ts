@@ -1,6 +1,6 @@
-import { ownWordOf } from '../terms/ownWord';
 import type { Amount, GroupStep, JoinStep, StitchStep } from '../syntax';
 import type { StitchTerm } from '../terms/readStitch';
+import { tellForeign } from './foreign';
 import { isAmount, readAmount } from './amount';
 import { takeToFormRing, takeToJoin, targetOf } from './join';
 import { amountOf, type ParseState } from './parseState';
@@ -82,23 +82,4 @@ const increases = (
 function withInsertion(state: ParseState, code: string): string {
   const insertion = state.insertionHere || state.insertion;
   return insertion && /^(e?sc|e?hdc|e?dc|e?tr|dtr|trtr)$/.test(code) ? insertion + code : code;
-}
-
-/** A stitch of the other set of terms is read as what it is, and told. */
-export function tellForeign(state: ParseState, term: StitchTerm): void {
-  if (term.foreign === null) return;
-  const token = state.tokens[term.foreign];
-  if (!token) return;
-  const { terms } = state.lexicon;
-  const [here, there] = terms === 'us' ? ['US', 'UK'] : ['UK', 'US'];
-  const own = ownWordOf(token.written, terms);
-  state.report.say(
-    'warning',
-    'terms-doubtful',
-    token,
-    `"${token.written}" is a ${there} term and the pattern is read in ${here} terms: is it written in ${there} terms?`,
-    own === null
-      ? undefined
-      : { label: `Write "${own}"`, begin: token.begin, end: token.end, replacement: own },
-  );
 }

@@ -110,6 +110,7 @@ function readEach(state: ParseState): Where | null {
   state.take('each');
   state.take('of');
   state.skipFillers();
+  correctWord(state);
   if (state.means('next')) return readNext(state);
   if (state.means('last')) return readLast(state);
   if (state.means('remaining')) return readRemaining(state);
