@@ -40,7 +40,8 @@ document.addEventListener('submit', (event) => {
     [name, button.value],
   ]);
   // The endpoint answers with a redirect, which a plain form would follow; here it only means "kept".
-  fetch(form.action, { method: 'POST', body, redirect: 'manual' }).then(
+  // Kept alive, so that a choice is not forgotten by whoever goes on to another page at once.
+  fetch(form.action, { method: 'POST', body, redirect: 'manual', keepalive: true }).then(
     (response) => {
       if (response.status >= 400) location.reload();
     },

@@ -427,7 +427,9 @@ test('shows inches and back without changing a figure', async ({ page }) => {
     swatch: EXAMPLE_PLAN.swatch && { ...EXAMPLE_PLAN.swatch, widthMm: widthMm(149) },
   };
   await expectFigures(page, plan);
+  const kept = page.waitForResponse((response) => response.url().endsWith('/preferences'));
   await unit('in: imperial').click();
+  await kept;
   await expectFigures(page, plan, 'imperial');
   const shown = async (title: string, label: string) =>
     Number(await field(page, title, label).inputValue());

@@ -1,4 +1,4 @@
-import type { AttachStep, JoinStep, Step, Where } from '../syntax';
+import type { AttachStep, JoinStep, Where } from '../syntax';
 import { readColour } from './colour';
 import type { ParseState } from './parseState';
 import { readWheres } from './where';

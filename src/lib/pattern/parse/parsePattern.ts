@@ -1,7 +1,7 @@
 import { PATTERN_LIMITS } from '../limits';
 import type { PatternText, RoundText, Step } from '../syntax';
 import { readAgain } from './again';
-import { isHeader, readHeader, type Header } from './header';
+import { readHeader, type Header } from './header';
 import type { ParseState } from './parseState';
 import { readSteps } from './steps';
 
