@@ -74,8 +74,7 @@ export function elementsOf(
     else if (first.role === 'picot') {
       const after = elements.at(-1)?.members.length ?? 0;
       picots.push({ members, on: elements.length - 1, after });
-    }
-    else if (first.role === 'space' || first.role === 'join') {
+    } else if (first.role === 'space' || first.role === 'join') {
       // A tall stitch that closes the round makes the last space, which has the last place.
       const place = first.place ?? (first.role === 'join' ? places.length - 1 : null);
       const corner = first.corner ?? (place === null ? null : (places[place]?.corner ?? null));

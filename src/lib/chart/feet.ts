@@ -3,7 +3,7 @@ import type { RoundElement } from './elements';
 
 /**
  * Places of the round below that each element stands in. A decrease gathers as many stitches as it has
- * legs, as far as no other stitch stands in them; a turning chain stands where the stitch after it does.
+ * legs, as far as no other stitch stands in them; chains hang on nothing unless they stand for a stitch.
  */
 export function feetOf(
   round: WorkedRound,
@@ -13,15 +13,10 @@ export function feetOf(
   const taken = new Set(
     round.stitches.flatMap(({ into }) => (into.kind === 'place' ? [into.index] : [])),
   );
-  const feet = elements.map((element): number[] => {
+  return elements.map((element): number[] => {
     const { into } = round.stitches[element.members[0] ?? -1] ?? {};
     if (element.kind === 'loop' || into?.kind !== 'place' || !below[into.index]) return [];
     return legPlaces(into.index, element.legs, round.turned ? -1 : 1, below, taken);
-  });
-  return feet.map((own, i) => {
-    const element = elements[i];
-    const isTurning = element?.kind === 'column' && element.beginning === 'turning';
-    return isTurning ? (feet.slice(i + 1).find(({ length }) => length > 0) ?? []) : own;
   });
 }
 

@@ -1,4 +1,4 @@
-import type { ArrangedRound } from './arrange';
+import type { ArrangedRound } from './arranged';
 import type { Ground } from './ground';
 import { add, towards, type Point } from './point';
 
@@ -7,6 +7,7 @@ const CLEAR = {
   stitch: 0.15,
   space: 0.3,
   ring: 0.3,
+  hook: 0.36,
   dotOnStitch: 0.2,
   dotOnSpace: 0.38,
   afterDot: 0.24,
@@ -14,6 +15,11 @@ const CLEAR = {
 } as const;
 /** How far apart the feet in one place stand, at most, and of the room that it has. */
 const FEET = { inStitch: 0.26, inSpace: 0.52, ofRoom: 0.8 } as const;
+
+interface Clear {
+  readonly stitch: number;
+  readonly space: number;
+}
 
 export interface FootSlots {
   /** Feet of an element; none where it hangs on nothing. */
@@ -37,12 +43,22 @@ export function footSlots(arranged: ArrangedRound, ground: Ground): FootSlots {
 
   const users = new Map<number, string[]>();
   const use = (place: number, key: string) => users.set(place, [...(users.get(place) ?? []), key]);
+  feet.forEach((places, i) => places.forEach((place) => use(place, `${i}`)));
+  // A round may begin and end in one place: what comes round to it last stands before what began there.
+  for (const keys of users.values()) keys.sort((a, b) => ahead(keys[0], a) - ahead(keys[0], b));
   travelPlaces.forEach((place, slot) => {
     if (place !== null && !(onWalk && slot === walkEnds)) use(place, `travel ${slot}`);
   });
-  feet.forEach((places, i) => places.forEach((place) => use(place, `${i}`)));
 
-  const pointOf = (place: number, key: string, clear: { stitch: number; space: number }) => {
+  /** How far an element comes after another along the round. */
+  function ahead(from: string | undefined, to: string): number {
+    const apart = (alongs[Number(to)] ?? 0) - (alongs[Number(from)] ?? 0);
+    return direction * (ground.isClosed ? apart - Math.round(apart) : apart);
+  }
+
+  const postClear = { stitch: CLEAR.hook, space: CLEAR.hook } as const;
+  const dotClear = { stitch: CLEAR.dotOnStitch, space: CLEAR.dotOnSpace } as const;
+  const pointOf = (place: number, key: string, clear: Clear) => {
     const drawn = ground.below[place];
     const keys = users.get(place) ?? [];
     if (!drawn) return null;
@@ -54,13 +70,13 @@ export function footSlots(arranged: ArrangedRound, ground: Ground): FootSlots {
     const side: Point = [outward[1], -outward[0]];
     return add(add(at, outward, (isSpace ? clear.space : clear.stitch) * w), side, offMm);
   };
-  const dotClear = { stitch: CLEAR.dotOnStitch, space: CLEAR.dotOnSpace };
-
   return {
     of: (index) => {
       const onDot = onWalk && index === 0;
+      const element = elements[index];
+      const isPost = element?.kind === 'column' && /^[FB]P/.test(element.code);
       const points = (feet[index] ?? [])
-        .map((place) => pointOf(place, `${index}`, onDot ? dotClear : CLEAR))
+        .map((place) => pointOf(place, `${index}`, onDot ? dotClear : isPost ? postClear : CLEAR))
         .filter((point) => point !== null);
       if (points.length > 0) {
         const head = ground.outer(alongs[index] ?? 0);

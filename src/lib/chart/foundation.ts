@@ -13,7 +13,12 @@ export function ringSymbols({ made }: WorkedRing, radiusMm: number, gauge: Gauge
   const w = gauge.stitchWidthMm;
   const chains = made['ch'] ?? 0;
   const slips = made['sl st'] ?? 0;
-  if (chains === 1) return [oval(0, [-OVAL * 0.3 * w, 0], [OVAL * 0.3 * w, 0], 0.7 * w)];
+  if (chains < 3 && slips === 0) {
+    return Array.from({ length: chains }, (_, i) => {
+      const y = (i - (chains - 1) / 2) * 0.32 * w;
+      return oval(i, [-0.25 * w, y], [0.25 * w, y], 0.6 * w);
+    });
+  }
   const gaps = chains + 0.35 * slips;
   const on = (step: number): Point => {
     const angle = (2 * Math.PI * (step + 0.175 * slips)) / gaps;

@@ -1,7 +1,7 @@
 import { roundHeightMm } from '../motifs/geometry';
 import type { Gauge } from '../gauge/gauge';
 import { stitch } from '../stitches/stitchTable';
-import type { ArrangedRound } from './arrange';
+import type { ArrangedRound } from './arranged';
 import type { Column } from './elements';
 import type { Ground } from './ground';
 import { add, between, distance, towards, type Point } from './point';

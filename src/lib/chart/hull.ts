@@ -14,7 +14,7 @@ export function hullOf({ glyph, feet, head, unitMm }: ChartSymbol): Point[] {
       return quad(foot, head, chainHalfMm(foot, head, unitMm), chainHalfMm(foot, head, unitMm));
     default: {
       const spreadMm = feet.length > 1 ? distance(feet[0] as Point, feet.at(-1) as Point) / 2 : 0;
-      const stand = glyph.insertion.endsWith('post') ? SIZES.hook : SIZES.footHalf;
+      const stand = glyph.insertion.endsWith('post') ? 2 * SIZES.hook : SIZES.footHalf;
       const top = glyph.legs > 1 ? SIZES.thickHalf : SIZES.cap;
       return quad(foot, head, spreadMm + stand * unitMm, top * unitMm);
     }

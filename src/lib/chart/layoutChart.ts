@@ -3,7 +3,9 @@ import type { Gauge } from '../gauge/gauge';
 import { motifOf } from '../pattern/motifOf';
 import type { Reading } from '../pattern/reading';
 import type { StitchOfTerm } from '../pattern/terms/stitchOfTerm';
-import { arrangeRounds, arrangeRows, type ArrangedRound } from './arrange';
+import { arrangeRounds } from './arrangeRounds';
+import { arrangeRows } from './arrangeRows';
+import type { ArrangedRound } from './arranged';
 import { foundationRow, ringSymbols } from './foundation';
 import { hullOf } from './hull';
 import type { DrawnPlace } from './ground';
@@ -48,12 +50,14 @@ type Own = ReadonlyMap<string, StitchOfTerm>;
 function motifChart(reading: Reading, gauge: Gauge, own: Own): Chart {
   const { sides, ring } = reading;
   const ringMm = ringRadiusMm(motifOf(reading, '', ''), gauge);
-  let apothemMm = ringMm;
+  const apothemsMm = [ringMm];
+  for (const round of reading.rounds)
+    apothemsMm.push((apothemsMm.at(-1) ?? 0) + roundHeightMm(round, gauge));
   let below: readonly DrawnPlace[] = [];
   let inner: Track = circleTrack(sides, ringMm);
   let isPolygon = false;
-  const rounds = arrangeRounds(reading, gauge).map((arranged, index) => {
-    apothemMm += roundHeightMm(arranged.round, gauge);
+  const rounds = arrangeRounds(reading, gauge, apothemsMm).map((arranged, index) => {
+    const apothemMm = apothemsMm[index + 1] ?? ringMm;
     const hasCorners = arranged.round.corner !== null && sides !== 0;
     const reshapes = hasCorners && !isPolygon && index > 0;
     isPolygon ||= hasCorners;
@@ -65,7 +69,8 @@ function motifChart(reading: Reading, gauge: Gauge, own: Own): Chart {
     inner = outer;
     return drawn.symbols;
   });
-  const box = isPolygon ? polygonBox(sides, apothemMm) : polygonBox(0, apothemMm);
+  const apothemMm = apothemsMm.at(-1) ?? ringMm;
+  const box = motifBox(isPolygon ? sides : 0, apothemMm);
   return withOver({
     ...box,
     magicRingMm: ring.kind === 'magic-ring' ? ringMm : null,
@@ -113,7 +118,10 @@ function extentOf(rows: readonly ArrangedRound[], w: number): [number, number] {
   return ends.length === 0 ? [0, w] : [Math.min(...ends), Math.max(...ends)];
 }
 
-function polygonBox(sides: number, apothemMm: number): Pick<Chart, 'widthMm' | 'heightMm' | 'originMm'> {
+function motifBox(
+  sides: number,
+  apothemMm: number,
+): Pick<Chart, 'widthMm' | 'heightMm' | 'originMm'> {
   if (sides === 0 || sides % 4 === 0)
     return { widthMm: 2 * apothemMm, heightMm: 2 * apothemMm, originMm: [apothemMm, apothemMm] };
   const reachMm = apothemMm / Math.cos(Math.PI / sides);

@@ -29,7 +29,11 @@ export function overlapsOf(chart: Chart, share: number): Overlap[] {
         const common = areaOf(clipped(hull, hulls[j] as Point[]));
         const covered = common / Math.max(1e-9, Math.min(areas[i] ?? 0, areas[j] ?? 0));
         if (covered > share)
-          overlaps.push({ a: symbols[j] as ChartSymbol, b: symbols[i] as ChartSymbol, share: covered });
+          overlaps.push({
+            a: symbols[j] as ChartSymbol,
+            b: symbols[i] as ChartSymbol,
+            share: covered,
+          });
       }
       cells.set(key, [...others, i]);
     }

@@ -25,7 +25,10 @@ export function arcBetween(
   const middle = between(begin, end, 0.5);
   const lengthMm = chains * CHAIN.length * w;
   const wantedMm = Math.sqrt(Math.max(0, (3 / 8) * chordMm * (lengthMm - chordMm)));
-  const reach = outline[0] * outward[0] + outline[1] * outward[1] - (middle[0] * outward[0] + middle[1] * outward[1]);
+  const reach =
+    outline[0] * outward[0] +
+    outline[1] * outward[1] -
+    (middle[0] * outward[0] + middle[1] * outward[1]);
   const bowMm = Math.min(wantedMm, Math.max(0, reach + CHAIN.beyond * w));
   const control = add(middle, outward, 2 * bowMm);
   return (share) => {

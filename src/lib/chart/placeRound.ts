@@ -1,4 +1,4 @@
-import type { ArrangedRound } from './arrange';
+import type { ArrangedRound } from './arranged';
 import type { Column } from './elements';
 import { footSlots } from './footSlots';
 import { glyphOf } from './glyph';
@@ -18,6 +18,9 @@ const JOIN_ROOM = 0.36;
 /** How far before the first head it lies where no chain begins the round. */
 const JOIN_BEFORE = 0.5;
 
+/** Room below a chain that stands on nothing. */
+const CLEAR_OF_BELOW = 0.1;
+
 type Arc = (share: number) => Point;
 
 /** Draws one round: every stitch it makes once, from its foot to its head. */
@@ -27,6 +30,8 @@ export function placeRound(arranged: ArrangedRound, ground: Ground): DrawnRound 
   const heads = headsOf(arranged, ground);
   const units = unitsOf(arranged, heads, ground);
   const slots = footSlots(arranged, ground);
+  const [first] = elements;
+  const beginsUpright = first?.kind === 'column' && first.beginning !== null;
   const symbols: ChartSymbol[] = [];
   const put: Put = (member, feet, head, unitMm) => {
     const { code } = round.stitches[member] ?? { code: 'ch' };
@@ -40,7 +45,9 @@ export function placeRound(arranged: ArrangedRound, ground: Ground): DrawnRound 
       columnSymbols(element, i, heads[i] as Point, units[i] ?? w, closes);
       return null;
     }
-    const [from, to] = loopEnds(i, arranged, heads, ground);
+    const [from, end] = loopEnds(i, arranged, heads, ground);
+    const closes = i === elements.length - 1 && join !== null && !beginsUpright;
+    const to = closes ? between(end, from, (JOIN_BEFORE * w) / distance(from, end)) : end;
     const outline = ground.outer(alongs[i] ?? 0);
     const arc = arcBetween(from, to, element.members.length, outline, outwardAt(i), w);
     chainSymbols(element.members, round.stitches, arc, distance(from, to), w, put);
@@ -78,8 +85,9 @@ export function placeRound(arranged: ArrangedRound, ground: Ground): DrawnRound 
     // A chain that stands for nothing stands straight beside the stitch it reaches up to.
     const inner = ground.inner(alongs[index] ?? 0);
     const isTurning = beginning === 'turning';
+    const roomMm = distance(head, inner) - CLEAR_OF_BELOW * w;
     const foot = isTurning
-      ? add(head, towards(head, inner), UPRIGHT_CHAIN * w * members.length)
+      ? add(head, towards(head, inner), Math.min(UPRIGHT_CHAIN * w * members.length, roomMm))
       : middleOf(feet);
     const top = closes === null ? head : add(head, towards(head, foot), JOIN_ROOM * w);
     members.forEach((member, j, { length }) =>
@@ -92,8 +100,7 @@ export function placeRound(arranged: ArrangedRound, ground: Ground): DrawnRound 
   }
 
   function joinWithoutChain(): void {
-    const [first] = elements;
-    if (join === null || (first?.kind === 'column' && first.beginning !== null)) return;
+    if (join === null || beginsUpright) return;
     const begin = heads[0] ?? ground.outer(0);
     const last = heads.findLast((_, i) => elements[i]?.kind === 'column') ?? begin;
     const share = Math.min(0.5, (JOIN_BEFORE * w) / Math.max(1e-9, distance(begin, last)));

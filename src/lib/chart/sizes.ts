@@ -7,6 +7,6 @@ export const SIZES = {
   footHalf: 0.1,
   chainHalf: 0.21,
   bar: 0.2,
-  hook: 0.2,
+  hook: 0.14,
   line: 0.09,
 } as const;

@@ -10,7 +10,7 @@ export interface SymbolPath {
 }
 
 /** How far the outer legs of a stitch of many legs bow out, in stitch widths: ours. */
-const LEG_BOW = { legs: 0.34, puff: 0.36, popcorn: 0.4 } as const;
+const LEG_BOW = { legs: 0.34, puff: 0.36, popcorn: 0.46 } as const;
 
 /** Path data of a symbol, in the coordinates of the chart. */
 export function symbolPath(symbol: ChartSymbol): SymbolPath {
@@ -64,7 +64,9 @@ function legsPath({ glyph, feet, head, unitMm, ...rest }: ChartSymbol, foot: Poi
 
 /** A stem with its strokes, which slant as they are printed. */
 function stem(foot: Point, head: Point, bars: number, unitMm: number): string {
-  return segment(foot, head) + barsOn((share) => between(foot, head, share), foot, head, bars, unitMm);
+  return (
+    segment(foot, head) + barsOn((share) => between(foot, head, share), foot, head, bars, unitMm)
+  );
 }
 
 function barsOn(
@@ -99,10 +101,10 @@ function bowedLegs({ glyph, unitMm }: ChartSymbol, foot: Point, head: Point, bow
         u ** 3 * foot[k] + 3 * u * u * t * begin[k] + 3 * u * t * t * end[k] + t ** 3 * head[k];
       return [mix(0), mix(1)];
     };
-    // Many legs leave room for short strokes only.
-    const barUnit = Math.min(1, 3 / glyph.legs) * 0.62 * unitMm;
+    // Of many legs only the outermost have room for strokes.
+    const hasBars = glyph.legs <= 3 || i === 0 || i === glyph.legs - 1;
     const curve = `M${xy(foot)}C${xy(begin)} ${xy(end)} ${xy(head)}`;
-    return curve + barsOn(at, foot, head, Math.min(glyph.bars, 3), barUnit);
+    return curve + barsOn(at, foot, head, hasBars ? glyph.bars : 0, 0.6 * unitMm);
   }).join('');
 }
 
@@ -146,11 +148,9 @@ function insertionMark(
   const side = across(up);
   const isFront = insertion.startsWith('front');
   if (insertion.endsWith('post')) {
-    const turn = isFront ? 1 : -1;
     const r = SIZES.hook * unitMm;
-    const low = add(foot, up, -r * 0.6);
-    const far = add(add(foot, side, turn * 1.5 * r), up, -r * 0.2);
-    return `M${xy(foot)}Q${xy(add(low, up, -r * 0.6))} ${xy(add(low, side, turn * 0.8 * r))}T${xy(far)}`;
+    const end = add(foot, side, (isFront ? 2 : -2) * r);
+    return `M${xy(foot)}A${rounded(r)} ${rounded(r)} 0 0 ${isFront ? 0 : 1} ${xy(end)}`;
   }
   const r = 0.26 * unitMm;
   const at = add(foot, up, -0.06 * unitMm);
