@@ -36,8 +36,12 @@ export async function startCluster(given) {
       userPassword: newSecret(),
     }));
     if (!existsSync(place.data)) await makeCluster(place, programs, passwords.adminPassword);
-    const port = runningPort(place) ?? (await launch(place, programs));
-    await waitUntilReady(place, programs, port);
+    const found = runningPort(place);
+    const answers = found !== undefined && (await becomesReady(place, programs, found));
+    const port = answers ? found : await launch(place, programs);
+    if (!answers && !(await becomesReady(place, programs, port))) {
+      throw new RunError(`PostgreSQL ended at once:\n${logTail(place)}`);
+    }
     return { port, ...passwords };
   });
 }
@@ -128,14 +132,19 @@ async function launch(place, programs) {
   }
 }
 
-/** A server just started may be recovering from a crash. */
-async function waitUntilReady(place, programs, port) {
+/**
+ * True once the server answers: one just started may be recovering from a crash. False when its
+ * process goes instead: one that was being killed when it was found looks alive for a moment.
+ */
+async function becomesReady(place, programs, port) {
   const args = ['-h', LOOPBACK, '-p', String(port), '-q', '-t', '2'];
   const until = Date.now() + START_PATIENCE_S * 1000;
   while ((await run(join(programs, 'pg_isready'), args, asOwner(place))).code !== 0) {
+    if (runningPort(place) === undefined) return false;
     if (Date.now() > until) throw new RunError(`PostgreSQL does not answer:\n${logTail(place)}`);
     await sleep(200);
   }
+  return true;
 }
 
 /** @param {ClusterPlace} place */
