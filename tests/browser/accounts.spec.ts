@@ -104,14 +104,23 @@ test('a forgotten password is replaced, which ends every other session', async (
   await expect(page).toHaveURL(/\/sign-in/);
 });
 
-test('signing out ends the session of this browser', async ({ page }) => {
+test('signing out ends the session of this browser', async ({ page, isMobile }) => {
   const person = await signedUp(page, somebody('Joost Lind'));
   await page.goto('/settings');
   await expect(page).toHaveURL(/\/settings$/);
-  await page.getByRole('button', { name: person.name }).click();
+  await openAccountMenu(page, isMobile, person.name);
   await page.getByRole('button', { name: 'Sign out' }).click();
   await page.waitForURL('**/');
+  if (isMobile) await openAccountMenu(page, isMobile, person.name);
   await expect(page.getByRole('link', { name: 'Sign in' })).toBeVisible();
   await page.goto('/settings');
   await expect(page).toHaveURL(/\/sign-in/);
 });
+
+/** On a phone the person's menu is part of the site's. */
+const openAccountMenu = (page: Page, isMobile: boolean, name: string): Promise<void> =>
+  page
+    .getByRole('banner')
+    .getByText(isMobile ? 'Menu' : name, { exact: true })
+    .first()
+    .click();
