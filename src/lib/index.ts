@@ -16,6 +16,12 @@ export { READY_PATTERNS } from './motifs/ready/readyPatterns';
 export { motifGeometry } from './motifs/geometry';
 // Patterns
 export * from './pattern';
+// Charts
+export { layoutChart, type Chart } from './chart/layoutChart';
+export type { ChartSymbol } from './chart/symbol';
+export { overlapsOf } from './chart/overlap';
+export { chartSvg } from './chart/chartSvg';
+export { stitchRuns } from './chart/stitchRuns';
 // Yarn, gauge and the maker's hand
 export { YARN_CATEGORIES, expectedStitchWidthMm, stitchWidthRangeMm } from './yarnCategories';
 export { gaugeOf } from './gauge/gauge';

@@ -1,8 +1,7 @@
 import { useEffect, useState } from 'react';
 import type { Plan } from '../../lib/plan/plan';
+import { storedPlan, storePlan } from './planStorage';
 import type { PlanEditing } from './usePlan';
-
-const KEY = 'ellwise.plan';
 
 /**
  * Keeps the plan on this device while it differs from the example, and brings it back on the next
@@ -29,26 +28,7 @@ export function useStoredPlan(
 
   const own = JSON.stringify(plan) !== JSON.stringify(example);
   useEffect(() => {
-    if (!ready) return;
-    try {
-      if (own) localStorage.setItem(KEY, JSON.stringify(plan));
-      else localStorage.removeItem(KEY);
-    } catch {
-      // A browser without storage (private mode, full disk) still estimates; it only cannot remember.
-    }
+    if (ready) storePlan(own ? plan : null);
   }, [ready, own, plan]);
   return own;
-}
-
-/** What is stored may be of an older edition or edited by hand: it is checked like any stranger's plan. */
-async function storedPlan(): Promise<Plan | null> {
-  try {
-    const text = localStorage.getItem(KEY);
-    if (!text) return null;
-    const { planSchema } = await import('../../schemas/plan');
-    const parsed = planSchema.safeParse(JSON.parse(text));
-    return parsed.success ? parsed.data : null;
-  } catch {
-    return null;
-  }
 }

@@ -1,0 +1,57 @@
+import type { Reading, WorkedStitch } from '../../lib/pattern/reading';
+import type { StitchRun } from '../../lib/chart/stitchRuns';
+import type { ChartSymbol } from '../../lib/chart/symbol';
+import { codeWord, type Terms } from '../planner/stitchWord';
+
+const NB = '\u00a0';
+
+/** Codes of places in the person's terms: "dc", "ch-2 space". */
+export const placeWord = (code: string, terms: Terms): string =>
+  /^ch-\d+$/.test(code) ? `${code}${NB}space` : codeWord(code, terms);
+
+/** "Rnd 2, stitch 5 of 24: dc in ch-2 space, side 1" */
+export function symbolInWords(symbol: ChartSymbol, reading: Reading, terms: Terms): string {
+  const round = reading.rounds[symbol.round];
+  const stitch = round?.stitches[symbol.stitch];
+  if (!round || !stitch)
+    return symbol.glyph.body === 'chain' ? 'Foundation: a chain' : 'Foundation: joined';
+  const below = reading.rounds[symbol.round - 1]?.places ?? reading.ring.places;
+  const { into } = stitch;
+  const where =
+    into.kind === 'place'
+      ? ` in ${placeWord(below[into.index]?.code ?? '', terms)}`
+      : INTO[into.kind];
+  const side = sideWords(stitch, reading.sides !== 0 && round.corner !== null);
+  return `${round.label}, ${symbol.stitch + 1} of ${round.stitches.length}: ${codeWord(stitch.code, terms)}${where}${ROLE[stitch.role]}${side && `, ${side}`}`;
+}
+
+const INTO = {
+  ring: ' in the ring',
+  'round-start': ' in the first stitch',
+  'own-chain': ' in its own chain',
+  none: '',
+} as const;
+
+const ROLE: Readonly<Record<WorkedStitch['role'], string>> = {
+  stitch: '',
+  standing: ', for the first stitch',
+  turning: ', to reach the height',
+  space: ', of a space',
+  picot: ', of a picot',
+  travel: ', on the way',
+  join: ', closes the round',
+};
+
+export const sideWords = (
+  { side, corner }: Pick<WorkedStitch, 'side' | 'corner'>,
+  hasSides: boolean,
+): string => (!hasSides ? '' : corner === null ? `side ${side + 1}` : `corner ${corner + 1}`);
+
+/** What a run of stitches is worked into: "ch-2 space, all in one", "dc, one in each". */
+export function runInto({ into, count }: StitchRun, terms: Terms): string {
+  if (into.kind !== 'place') return INTO[into.kind].replace(/^ in /, '') || 'nothing';
+  const each = count === 1 ? '' : into.inOne ? ', all in one' : ', one in each';
+  return placeWord(into.code, terms) + each;
+}
+
+export const runRole = ({ role }: StitchRun): string => ROLE[role].replace(/^, /, '');

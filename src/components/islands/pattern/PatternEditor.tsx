@@ -1,0 +1,201 @@
+import { useDeferredValue, useId, useMemo, useRef, useState, type ReactNode } from 'react';
+import { gaugeOf } from '../../../lib/gauge/gauge';
+import { motifGeometry } from '../../../lib/motifs/geometry';
+import type { MotifSides } from '../../../lib/motifs/motif';
+import { motifOf } from '../../../lib/pattern/motifOf';
+import { convertTerms } from '../../../lib/pattern/print/convertTerms';
+import { readPattern } from '../../../lib/pattern/readPattern';
+import type { Terms } from '../../../lib/pattern/reading';
+import type { Span } from '../../../lib/pattern/span';
+import type { StitchOfTerm } from '../../../lib/pattern/terms/stitchOfTerm';
+import type { GaugeSwatch } from '../../../lib/swatches/swatchRecord';
+import type { Units } from '../../../lib/units/display';
+import { SymbolChart } from '../../chart/SymbolChart';
+import { classNames } from '../../ui/classNames';
+import { SegmentedControl } from '../../ui/SegmentedControl';
+import { Select } from '../../ui/Select';
+import { useTerms, useUnits } from '../../ui/useUnits';
+import { gaugeChoices } from '../motifs/gaugeChoices';
+import { CleanPattern } from './CleanPattern';
+import { editText } from './editText';
+import { instructionSpans, stitchesAt } from './instructions';
+import { PatternField } from './PatternField';
+import { PatternOptions } from './PatternOptions';
+import { PatternAnswer, PatternBar } from './PatternAnswer';
+import { sizeCount } from './patternSizes';
+import { Problems } from './Problems';
+import { ReadRounds } from './ReadRounds';
+import { usePlanning } from './usePlanning';
+
+export interface PatternChange {
+  text?: string;
+  terms?: Terms;
+  sides?: MotifSides;
+}
+
+export interface PatternEditorProps {
+  name: string;
+  text: string;
+  /** Terms that the text is written in. */
+  terms: Terms;
+  sides: MotifSides;
+  onChange: (change: PatternChange) => void;
+  /** The person's own choices, for everything but the text. */
+  units: Units;
+  shownTerms: Terms;
+  swatches: GaugeSwatch[];
+  ownStitches?: readonly StitchOfTerm[];
+  /** Above the text, such as the motif's name. */
+  heading?: ReactNode;
+  /** Acts beside "Plan a blanket", such as keeping the motif. */
+  actions?: ReactNode;
+}
+
+type Panel = 'text' | 'chart' | 'rounds';
+const PANELS = [
+  { value: 'text', word: 'Text' },
+  { value: 'chart', word: 'Chart' },
+  { value: 'rounds', word: 'Rounds' },
+] as const;
+
+/** A pattern read as it is typed: its problems, its chart, its rounds, and a clean page of it. */
+export function PatternEditor(props: PatternEditorProps) {
+  const { name, text, terms, sides, onChange, swatches, ownStitches } = props;
+  const { heading, actions } = props;
+  const units = useUnits(props.units);
+  const shownTerms = useTerms(props.shownTerms);
+  const [size, setSize] = useState(0);
+  const [panel, setPanel] = useState<Panel>('text');
+  const [lit, setLit] = useState<Span | null>(null);
+  const [offset, setOffset] = useState<number | null>(null);
+  const [gaugeKey, setGaugeKey] = useState(swatches[0]?.id ?? 'weight-4');
+  const field = useRef<HTMLTextAreaElement>(null);
+  const problemsId = useId();
+
+  const reading = useMemo(
+    () => readPattern(text, { terms, sides, size, ...(ownStitches && { ownStitches }) }),
+    [text, terms, sides, size, ownStitches],
+  );
+  // The chart may lag a keystroke behind the text; the text never waits for the chart.
+  const drawn = useDeferredValue(reading);
+  const instructions = useMemo(() => instructionSpans(reading), [reading]);
+  const marked = useMemo(() => (offset === null ? [] : stitchesAt(drawn, offset)), [drawn, offset]);
+
+  const choices = useMemo(() => gaugeChoices(swatches, units), [swatches, units]);
+  const choice = choices.find(({ key }) => key === gaugeKey) ?? choices[0];
+  const gauge = useMemo(
+    () => gaugeOf(choice?.swatch ?? null, choice?.category ?? 4),
+    [choice?.swatch, choice?.category],
+  );
+  const geometry = useMemo(
+    () => motifGeometry(motifOf(drawn, '', name), gauge, null),
+    [drawn, gauge, name],
+  );
+  const planning = usePlanning(reading, name);
+  const sizes = sizeCount(reading.pattern);
+  const isEmpty = drawn.rounds.length === 0;
+  const only = (which: Panel) =>
+    classNames('min-w-0 print:block', panel !== which && 'max-lg:hidden');
+
+  function edit(begin: number, end: number, replacement: string) {
+    if (field.current) editText(field.current, begin, end, replacement);
+  }
+
+  function go({ begin, end }: Span) {
+    setPanel('text');
+    requestAnimationFrame(() => {
+      field.current?.focus();
+      field.current?.setSelectionRange(begin, end);
+      document.querySelector(`[data-begin="${begin}"]`)?.scrollIntoView({ block: 'nearest' });
+    });
+  }
+
+  function convert() {
+    const other = terms === 'us' ? 'uk' : 'us';
+    edit(0, text.length, convertTerms(text, terms, other));
+    onChange({ terms: other });
+  }
+
+  return (
+    <>
+      <SegmentedControl
+        label="Show"
+        className="not-printed mb-4 lg:hidden"
+        options={PANELS}
+        value={panel}
+        onChange={setPanel}
+      />
+      <div className="grid gap-x-10 gap-y-8 lg:grid-cols-2">
+        <div className={classNames(only('text'), 'not-printed')}>
+          {heading}
+          <PatternOptions
+            {...{ terms, sides, size, sizes }}
+            onTerms={(next) => onChange({ terms: next })}
+            onSides={(next) => onChange({ sides: next })}
+            onSize={setSize}
+            onConvert={text.trim() === '' ? null : convert}
+          />
+          <PatternField
+            {...{ text, instructions, lit }}
+            fieldRef={field}
+            problems={reading.diagnostics}
+            onText={(next) => onChange({ text: next })}
+            onOffset={setOffset}
+            describedBy={problemsId}
+          />
+          {text.trim() !== '' && (
+            <Problems
+              id={problemsId}
+              problems={reading.diagnostics}
+              onGo={go}
+              onFix={({ begin, end, replacement }) => edit(begin, end, replacement)}
+            />
+          )}
+        </div>
+        <div className={only('chart')}>
+          <div className="mb-3 flex flex-wrap items-end justify-between gap-3">
+            <PatternAnswer reading={drawn} {...{ geometry, units, planning, actions }} />
+            {!isEmpty && (
+              <Select
+                label="At the gauge of"
+                className="not-printed w-full sm:w-72"
+                value={choice?.key}
+                onChange={(event) => setGaugeKey(event.target.value)}
+                options={choices.map(({ key, word }) => ({ value: key, word }))}
+              />
+            )}
+          </div>
+          {!isEmpty && (
+            <SymbolChart
+              {...{ gauge, name, units, marked }}
+              reading={drawn}
+              terms={shownTerms}
+              ownStitches={ownStitches}
+              onPoint={(at) =>
+                setLit(at && (drawn.rounds[at.round]?.stitches[at.stitch]?.span ?? drawn.ring.span))
+              }
+            />
+          )}
+        </div>
+      </div>
+      {!isEmpty && (
+        <>
+          <section aria-labelledby="read-rounds" className={classNames(only('rounds'), 'mt-10')}>
+            <h2 id="read-rounds" className="mb-2">
+              Rounds
+            </h2>
+            <ReadRounds
+              {...{ reading: drawn, geometry, gauge, units, ownStitches }}
+              terms={shownTerms}
+              onRound={(round) => setLit(round && round.span)}
+            />
+          </section>
+          <div className={classNames(only('rounds'), 'mt-10')}>
+            <CleanPattern key={terms} reading={drawn} ownStitches={ownStitches} />
+          </div>
+        </>
+      )}
+      <PatternBar reading={drawn} {...{ geometry, units, planning }} />
+    </>
+  );
+}

@@ -1,0 +1,85 @@
+import { CircleAlert, CircleCheck, Info, TriangleAlert, Wand, type LucideIcon } from 'lucide-react';
+import type { Diagnostic, Fix, Severity } from '../../../lib/pattern/diagnostic';
+import { Button } from '../../ui/Button';
+
+interface ProblemsProps {
+  id: string;
+  problems: readonly Diagnostic[];
+  onGo: (problem: Diagnostic) => void;
+  onFix: (fix: Fix) => void;
+}
+
+const LOOKS: Readonly<Record<Severity, { icon: LucideIcon; word: string; ink: string }>> = {
+  error: { icon: CircleAlert, word: 'Error', ink: 'text-madder' },
+  warning: { icon: TriangleAlert, word: 'Check', ink: 'text-amber-ink' },
+  note: { icon: Info, word: 'Note', ink: 'text-teal' },
+};
+
+/** Everything there is to say about the text, in its order; none hidden behind the first. */
+export function Problems({ id, problems, onGo, onFix }: ProblemsProps) {
+  return (
+    <section aria-labelledby={id} className="not-printed mt-4">
+      <h2 id={id} aria-live="polite" className="flex items-center gap-2">
+        {problems.every(({ severity }) => severity === 'note') && (
+          <CircleCheck size={18} aria-hidden className="text-teal" />
+        )}
+        {problemsInWords(problems)}
+      </h2>
+      {problems.length > 0 && (
+        <ol className="mt-2 max-h-80 overflow-y-auto" tabIndex={0} aria-labelledby={id}>
+          {problems.map((problem) => (
+            <Problem
+              key={`${problem.code} ${problem.begin} ${problem.end}`}
+              {...{ problem, onGo, onFix }}
+            />
+          ))}
+        </ol>
+      )}
+    </section>
+  );
+}
+
+function Problem({
+  problem,
+  onGo,
+  onFix,
+}: Pick<ProblemsProps, 'onGo' | 'onFix'> & { problem: Diagnostic }) {
+  const { severity, line, column, message, fix } = problem;
+  const { icon: Icon, word, ink } = LOOKS[severity];
+  return (
+    <li className="grid grid-cols-[1.5rem_1fr] border-t border-line py-2">
+      <Icon size={18} aria-hidden className={`mt-0.5 ${ink}`} />
+      <div>
+        <p>
+          <b className={ink}>{word}</b>{' '}
+          <button
+            type="button"
+            className="link min-h-6 font-normal coarse:min-h-11"
+            onClick={() => onGo(problem)}
+          >
+            line {line}, column {column}
+          </button>
+          : {message}
+        </p>
+        {fix && (
+          <Button small icon={Wand} className="mt-1.5" onClick={() => onFix(fix)}>
+            {fix.label}
+          </Button>
+        )}
+      </div>
+    </li>
+  );
+}
+
+/** "2 errors, 1 to check", "Reads without a problem" */
+export function problemsInWords(problems: readonly Diagnostic[]): string {
+  const count = (wanted: Severity) => problems.filter(({ severity }) => severity === wanted).length;
+  const [errors, warnings, notes] = [count('error'), count('warning'), count('note')];
+  const parts = [
+    errors > 0 && `${errors} ${errors === 1 ? 'error' : 'errors'}`,
+    warnings > 0 && `${warnings} to check`,
+    notes > 0 && `${notes} ${notes === 1 ? 'note' : 'notes'}`,
+  ].filter(Boolean);
+  if (errors + warnings > 0) return parts.join(', ');
+  return notes > 0 ? `Reads well, ${parts.join('')}` : 'Reads without a problem';
+}
