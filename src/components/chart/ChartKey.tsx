@@ -1,7 +1,7 @@
 import { jisName } from '../../lib/chart/symbolName';
 import { sampleSymbol } from '../../lib/chart/sampleSymbol';
 import { symbolPath } from '../../lib/chart/symbolPath';
-import type { StitchOfTerm } from '../../lib/pattern/terms/stitchOfTerm';
+import { ownStitchCode, type OwnStitch } from '../../lib/stitches/ownStitch';
 import { SIZES } from '../../lib/chart/sizes';
 import { stitch } from '../../lib/stitches/stitchTable';
 import { codeWord, type Terms } from '../planner/stitchWord';
@@ -9,7 +9,7 @@ import { codeWord, type Terms } from '../planner/stitchWord';
 interface ChartKeyProps {
   codes: readonly string[];
   terms: Terms;
-  ownStitches?: readonly StitchOfTerm[];
+  ownStitches?: readonly OwnStitch[];
 }
 
 /** The symbols that a chart uses, each with its abbreviation and name. */
@@ -17,7 +17,7 @@ export function ChartKey({ codes, terms, ownStitches }: ChartKeyProps) {
   return (
     <ul aria-label="Symbols of this chart" className="flex flex-wrap gap-x-7 gap-y-2">
       {codes.map((code) => {
-        const own = ownStitches?.find((each) => each.code === code);
+        const own = ownStitches?.find((each) => ownStitchCode(each) === code);
         const sample = sampleSymbol(code, own);
         const { line, solid } = symbolPath(sample);
         const middle = Math.min(-0.45, sample.head[1] / 2);

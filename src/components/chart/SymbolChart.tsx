@@ -6,7 +6,7 @@ import { layoutChart } from '../../lib/chart/layoutChart';
 import type { ChartSymbol } from '../../lib/chart/symbol';
 import type { Gauge } from '../../lib/gauge/gauge';
 import type { Reading } from '../../lib/pattern/reading';
-import type { StitchOfTerm } from '../../lib/pattern/terms/stitchOfTerm';
+import type { OwnStitch } from '../../lib/stitches/ownStitch';
 import type { Units } from '../../lib/units/display';
 import type { Terms } from '../planner/stitchWord';
 import { Button } from '../ui/Button';
@@ -34,7 +34,7 @@ interface SymbolChartProps {
   name: string;
   units: Units;
   terms: Terms;
-  ownStitches?: readonly StitchOfTerm[];
+  ownStitches?: readonly OwnStitch[];
   /** Stitches that the text points at. */
   marked: readonly StitchAddress[];
   /** The stitch that the chart points at, or none. */

@@ -1,3 +1,4 @@
+import { abbreviationOf } from '../../lib/stitches/ownStitch';
 import type { Stitch } from '../../lib/stitches/stitch';
 import { stitch } from '../../lib/stitches/stitchTable';
 
@@ -7,7 +8,7 @@ export type Terms = 'us' | 'uk';
 export const stitchWord = (
   { code, ukCode }: Pick<Stitch, 'code' | 'ukCode'>,
   terms: Terms,
-): string => (terms === 'us' ? code : ukCode);
+): string => (terms === 'us' ? abbreviationOf(code) : ukCode);
 
 /** The same by US code. */
 export function codeWord(code: string, terms: Terms): string {

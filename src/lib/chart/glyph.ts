@@ -1,4 +1,4 @@
-import type { StitchOfTerm } from '../pattern/terms/stitchOfTerm';
+import type { OwnStitch, SymbolBody } from '../stitches/ownStitch';
 import type { Moves, StitchCode } from '../stitches/stitch';
 import { stitch } from '../stitches/stitchTable';
 
@@ -11,7 +11,7 @@ export type Insertion = 'both-loops' | 'front-loop' | 'back-loop' | 'front-post'
  * popcorn: legs under an oval; puff: plain curved legs; picot: a small ring of ovals.
  */
 export interface Glyph {
-  readonly body: 'chain' | 'dot' | 'cross' | 'legs' | 'popcorn' | 'puff' | 'picot';
+  readonly body: SymbolBody;
   /** Stems side by side; of a picot, its chains. */
   readonly legs: number;
   /** Strokes across each stem: the wraps that are drawn off one by one. */
@@ -31,12 +31,12 @@ const INSERTIONS: Readonly<Record<string, Insertion>> = {
 /**
  * The symbol of a stitch: chain an oval, slip stitch a dot, sc a cross, hdc a T, and a T with one
  * stroke more for each step of height from dc on (published crochet chart symbols; JIS L 0201 draws
- * them alike). A stitch of one's own is drawn from its moves in the same way.
+ * them alike). A stitch of one's own is drawn from its moves in the same way, or as it asks to be.
  *
  * Example: `glyphOf('tr').bars` is 2.
  */
-export function glyphOf(code: StitchCode, own?: StitchOfTerm): Glyph {
-  if (own) return glyphOfMoves(own.moves);
+export function glyphOf(code: StitchCode, own?: OwnStitch): Glyph {
+  if (own?.symbol) return { ...PLAIN, ...own.symbol };
   const insertion = INSERTIONS[code.slice(0, 2)] ?? 'both-loops';
   const picot = /^picot-(\d+)$/.exec(code);
   if (picot) return { ...PLAIN, body: 'picot', legs: Number(picot[1]) };

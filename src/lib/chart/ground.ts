@@ -1,5 +1,5 @@
 import type { Gauge } from '../gauge/gauge';
-import type { StitchOfTerm } from '../pattern/terms/stitchOfTerm';
+import type { OwnStitch } from '../stitches/ownStitch';
 import type { Point } from './point';
 import type { Track } from './track';
 
@@ -22,5 +22,5 @@ export interface Ground {
   readonly isClosed: boolean;
   readonly below: readonly DrawnPlace[];
   readonly gauge: Gauge;
-  readonly own: ReadonlyMap<string, StitchOfTerm>;
+  readonly own: ReadonlyMap<string, OwnStitch>;
 }

@@ -2,7 +2,7 @@ import { ringRadiusMm, roundHeightMm } from '../motifs/geometry';
 import type { Gauge } from '../gauge/gauge';
 import { motifOf } from '../pattern/motifOf';
 import type { Reading } from '../pattern/reading';
-import type { StitchOfTerm } from '../pattern/terms/stitchOfTerm';
+import { ownStitchCode, type OwnStitch } from '../stitches/ownStitch';
 import { arrangeRounds } from './arrangeRounds';
 import { arrangeRows } from './arrangeRows';
 import type { ArrangedRound } from './arranged';
@@ -37,15 +37,15 @@ export interface Chart {
 export function layoutChart(
   reading: Reading,
   gauge: Gauge,
-  ownStitches: readonly StitchOfTerm[] = [],
+  ownStitches: readonly OwnStitch[] = [],
 ): Chart {
-  const own = new Map(ownStitches.map((each) => [each.code, each]));
+  const own = new Map(ownStitches.map((each) => [ownStitchCode(each), each]));
   return reading.rounds[0]?.kind === 'row'
     ? rowsChart(reading, gauge, own)
     : motifChart(reading, gauge, own);
 }
 
-type Own = ReadonlyMap<string, StitchOfTerm>;
+type Own = ReadonlyMap<string, OwnStitch>;
 
 function motifChart(reading: Reading, gauge: Gauge, own: Own): Chart {
   const { sides, ring } = reading;

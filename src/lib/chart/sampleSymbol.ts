@@ -1,4 +1,4 @@
-import type { StitchOfTerm } from '../pattern/terms/stitchOfTerm';
+import type { OwnStitch } from '../stitches/ownStitch';
 import { stitch } from '../stitches/stitchTable';
 import { glyphOf } from './glyph';
 import type { ChartSymbol } from './symbol';
@@ -7,7 +7,7 @@ import type { ChartSymbol } from './symbol';
 const MOST_TALL = 2.4;
 
 /** One symbol on its own, for a key: upright on 0,0, in stitch widths. */
-export function sampleSymbol(code: string, own?: StitchOfTerm): ChartSymbol {
+export function sampleSymbol(code: string, own?: OwnStitch): ChartSymbol {
   const glyph = glyphOf(code, own);
   const tall = Math.min(MOST_TALL, Math.max(0.9, stitch(code)?.heightOverWidth ?? 1.4));
   const common = { round: 0, stitch: 0, glyph, unitMm: 1 };

@@ -40,6 +40,8 @@ export interface Ring {
 export interface Motif {
   /** Stable address of a ready-made motif or the id of one's own. */
   readonly key: string;
+  /** Which save of one's own motif this is; null for one that has never been saved. */
+  readonly version: number | null;
   readonly name: string;
   readonly sides: MotifSides;
   readonly ring: Ring;

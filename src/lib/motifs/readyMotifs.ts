@@ -12,6 +12,7 @@ function readWhenAsked({ key, name, sides, text }: ReadyPattern): Motif {
     (read ??= motifOf(readPattern(text, { terms: 'us', sides }), key, name));
   return {
     key,
+    version: null,
     name,
     sides,
     get ring() {

@@ -11,4 +11,4 @@ export type * from './reading';
 export type * from './span';
 export type * from './syntax';
 export type * from './token';
-export type { StitchOfTerm } from './terms/stitchOfTerm';
+export { ownStitchCode, type OwnStitch } from '../stitches/ownStitch';

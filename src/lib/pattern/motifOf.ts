@@ -5,6 +5,7 @@ import type { Reading, WorkedRound } from './reading';
 export function motifOf({ ring, rounds, sides }: Reading, key: string, name: string): Motif {
   return {
     key,
+    version: null,
     name,
     sides,
     ring: { chains: ring.chains, made: ring.made },

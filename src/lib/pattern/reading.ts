@@ -3,7 +3,7 @@ import type { StitchCode, StitchCounts } from '../stitches/stitch';
 import type { Diagnostic } from './diagnostic';
 import type { Span } from './span';
 import type { CountNote, PatternText } from './syntax';
-import type { StitchOfTerm } from './terms/stitchOfTerm';
+import type { OwnStitch } from '../stitches/ownStitch';
 
 export type Terms = 'us' | 'uk';
 
@@ -14,7 +14,7 @@ export interface ReadOptions {
   /** Which of the sizes "10 (12, 14)"; 0 is the first. */
   readonly size?: number;
   /** Stitches of one's own by the abbreviation they are written with. */
-  readonly ownStitches?: readonly StitchOfTerm[];
+  readonly ownStitches?: readonly OwnStitch[];
 }
 
 /**

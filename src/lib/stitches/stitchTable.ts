@@ -1,4 +1,5 @@
 import { DomainError } from '../errors';
+import { ownStitchOf } from './ownStitch';
 import type { Moves, Stitch, StitchCode } from './stitch';
 
 type Row = readonly [
@@ -102,12 +103,12 @@ const INSERTIONS: Readonly<Record<string, string>> = {
  * The stitch with this US abbreviation, or null when it is not in the table.
  * Knows the basic stitches, decreases ("sc2tog"), clusters and bobbles ("dc3cl"), popcorns ("5-dc pc"),
  * puffs ("3-hdc puff") and picots ("picot-3") of up to 20 legs, and any basic stitch worked round the
- * post or into one loop ("FPdc", "BPtr", "BLsc", "FLdc").
+ * post or into one loop ("FPdc", "BPtr", "BLsc", "FLdc"), and stitches of one's own by their code.
  *
  * Example: `stitch('dc')?.throughs` is 2.
  */
 export function stitch(code: StitchCode): Stitch | null {
-  return BASIC.get(code) ?? insertedStitch(code) ?? compoundStitch(code);
+  return BASIC.get(code) ?? insertedStitch(code) ?? compoundStitch(code) ?? ownStitchOf(code);
 }
 
 /** Like `stitch`, for codes already checked. Throws DomainError for one that is not in the table. */

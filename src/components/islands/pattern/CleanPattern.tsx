@@ -2,13 +2,13 @@ import { Copy, Printer } from 'lucide-react';
 import { useMemo, useState } from 'react';
 import { printPattern } from '../../../lib/pattern/print/printPattern';
 import type { Reading, Terms } from '../../../lib/pattern/reading';
-import type { StitchOfTerm } from '../../../lib/pattern/terms/stitchOfTerm';
+import type { OwnStitch } from '../../../lib/stitches/ownStitch';
 import { Button } from '../../ui/Button';
 import { SegmentedControl } from '../../ui/SegmentedControl';
 
 interface CleanPatternProps {
   reading: Reading;
-  ownStitches?: readonly StitchOfTerm[];
+  ownStitches?: readonly OwnStitch[];
 }
 
 const TERMS = [

@@ -7,7 +7,7 @@ import { convertTerms } from '../../../lib/pattern/print/convertTerms';
 import { readPattern } from '../../../lib/pattern/readPattern';
 import type { Terms } from '../../../lib/pattern/reading';
 import type { Span } from '../../../lib/pattern/span';
-import type { StitchOfTerm } from '../../../lib/pattern/terms/stitchOfTerm';
+import type { OwnStitch } from '../../../lib/stitches/ownStitch';
 import type { GaugeSwatch } from '../../../lib/swatches/swatchRecord';
 import type { Units } from '../../../lib/units/display';
 import { SymbolChart } from '../../chart/SymbolChart';
@@ -44,7 +44,7 @@ export interface PatternEditorProps {
   units: Units;
   shownTerms: Terms;
   swatches: GaugeSwatch[];
-  ownStitches?: readonly StitchOfTerm[];
+  ownStitches?: readonly OwnStitch[];
   /** Above the text, such as the motif's name. */
   heading?: ReactNode;
   /** Acts beside "Plan a blanket", such as keeping the motif. */
@@ -185,7 +185,7 @@ export function PatternEditor(props: PatternEditorProps) {
               Rounds
             </h2>
             <ReadRounds
-              {...{ reading: drawn, geometry, gauge, units, ownStitches }}
+              {...{ reading: drawn, geometry, gauge, units }}
               terms={shownTerms}
               onRound={(round) => setLit(round && round.span)}
             />

@@ -2,7 +2,6 @@ import { Check, TriangleAlert } from 'lucide-react';
 import type { Gauge } from '../../../lib/gauge/gauge';
 import type { MotifGeometry } from '../../../lib/motifs/geometry';
 import type { Reading, WorkedRound } from '../../../lib/pattern/reading';
-import type { StitchOfTerm } from '../../../lib/pattern/terms/stitchOfTerm';
 import { showFabric, showYarn, type Units } from '../../../lib/units/display';
 import { acrossWord, countsInWords, spacesInWords } from '../../motifs/motifWords';
 import type { Terms } from '../../planner/stitchWord';
@@ -17,16 +16,15 @@ interface ReadRoundsProps {
   gauge: Gauge;
   units: Units;
   terms: Terms;
-  ownStitches?: readonly StitchOfTerm[];
   /** Lights the text of a round. */
   onRound: (round: WorkedRound | null) => void;
 }
 
 /** Every round as worked: what is made and counted, what the note claims, size, fullness and yarn. */
 export function ReadRounds(props: ReadRoundsProps) {
-  const { reading, geometry, gauge, units, terms, ownStitches, onRound } = props;
+  const { reading, geometry, gauge, units, terms, onRound } = props;
   const { rounds, sides } = reading;
-  const { rounds: yarn, byColour } = patternYarn(reading, gauge, ownStitches);
+  const { rounds: yarn, byColour } = patternYarn(reading, gauge);
   const isFlat = rounds[0]?.kind === 'row';
   const total = yarn.reduce(
     (sum, { loops, lengthM }) => ({ loops: sum.loops + loops, lengthM: sum.lengthM + lengthM }),

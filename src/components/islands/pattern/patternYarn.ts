@@ -1,7 +1,6 @@
 import type { Gauge } from '../../../lib/gauge/gauge';
 import { expectedM, learnHand } from '../../../lib/hand/hand';
 import type { Reading } from '../../../lib/pattern/reading';
-import type { StitchOfTerm } from '../../../lib/pattern/terms/stitchOfTerm';
 import { addCounts } from '../../../lib/stitches/counts';
 import { loopsOf } from '../../../lib/stitches/loops';
 import type { StitchCounts } from '../../../lib/stitches/stitch';
@@ -20,19 +19,13 @@ export interface PatternYarn {
 }
 
 /** Loops that a pattern lays, and the yarn they take in a hand of this gauge. */
-export function patternYarn(
-  { ring, rounds }: Reading,
-  gauge: Gauge,
-  ownStitches: readonly StitchOfTerm[] = [],
-): PatternYarn {
-  const own = new Map(ownStitches.map(({ code, moves }) => [code, moves]));
-  const moves = (code: string) => own.get(code) ?? stitch(code);
+export function patternYarn({ ring, rounds }: Reading, gauge: Gauge): PatternYarn {
   const codes = new Set([ring, ...rounds].flatMap(({ made }) => Object.keys(made)));
   const hand = learnHand(gauge.stitchWidthMm, [...codes], []);
   const taken = (...counted: StitchCounts[]): YarnTaken => {
     const loops = new Map<string, number>();
     for (const [code, count] of Object.entries(counted.reduce(addCounts, {}))) {
-      const each = moves(code);
+      const each = stitch(code);
       if (each) loops.set(code, count * loopsOf(each));
     }
     return {

@@ -1,6 +1,6 @@
 import type { Terms } from '../reading';
 import type { CountEntry, CountNote, PatternText, RoundText } from '../syntax';
-import type { StitchOfTerm } from '../terms/stitchOfTerm';
+import { ownStitchCode, type OwnStitch } from '../../stitches/ownStitch';
 import { printAmount } from './printPlace';
 import { printStandsFor, printSteps } from './printStep';
 import { Vocabulary, type KeyLine } from './vocabulary';
@@ -9,7 +9,7 @@ export interface PrintOptions {
   readonly terms: Terms;
   /** Whole words instead of abbreviations: "double crochet". */
   readonly fullWords?: boolean;
-  readonly ownStitches?: readonly StitchOfTerm[];
+  readonly ownStitches?: readonly OwnStitch[];
 }
 
 /** A pattern as a clean page: one line for each round, and the abbreviations it uses. */
@@ -26,7 +26,7 @@ export interface PrintedPattern {
  * terms and words, "Round 1: 2 treble in next chain-2 space."
  */
 export function printPattern(pattern: PatternText, options: PrintOptions): PrintedPattern {
-  const own = new Map(options.ownStitches?.map(({ code, name }) => [code, name]));
+  const own = new Map(options.ownStitches?.map((own) => [ownStitchCode(own), own.name]));
   const words = new Vocabulary(options.terms, options.fullWords ?? false, own);
   const lines = [
     ...pattern.chainRules.map(({ chains, standsFor }) => {

@@ -1,3 +1,4 @@
+import { abbreviationOf } from '../../stitches/ownStitch';
 import { stitch } from '../../stitches/stitchTable';
 import type { Terms } from '../reading';
 
@@ -68,10 +69,10 @@ export class Vocabulary {
     const compound = /^(\w+?)(\d+)(tog|cl)$/.exec(code) ?? /^(\d+)-(\w+) (pc|puff)$/.exec(code);
     if (compound) return this.compound(code, compound);
     const found = stitch(code);
-    if (!found) return this.remember(code, this.ownNames.get(code) ?? code);
-    const name = this.terms === 'us' ? found.us : found.uk;
+    if (!found) return code;
+    const name = this.ownNames.get(code) ?? (this.terms === 'us' ? found.us : found.uk);
     if (this.fullWords && !code.startsWith('picot')) return name;
-    return this.remember(this.terms === 'us' ? found.code : found.ukCode, name);
+    return this.remember(abbreviationOf(this.terms === 'us' ? found.code : found.ukCode), name);
   }
 
   private compound(

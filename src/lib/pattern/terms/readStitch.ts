@@ -1,3 +1,4 @@
+import { ownStitchCode } from '../../stitches/ownStitch';
 import type { StitchCode } from '../../stitches/stitch';
 import { stitch } from '../../stitches/stitchTable';
 import type { Token } from '../token';
@@ -44,7 +45,7 @@ export function readStitch(
 function ownStitch(token: Token, at: number, lexicon: Lexicon): StitchTerm | null {
   const own = lexicon.own.get(token.text);
   return own
-    ? { code: own.code, perPlace: 1, takes: own.takes ?? 1, next: at + 1, foreign: null }
+    ? { code: ownStitchCode(own), perPlace: 1, takes: own.takes, next: at + 1, foreign: null }
     : null;
 }
 
