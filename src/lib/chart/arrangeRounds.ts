@@ -4,7 +4,7 @@ import { directionOf, placeAlongsOf, type ArrangedRound } from './arranged';
 import { cornersOf, type Anchor, type Order } from './corners';
 import { elementsOf } from './elements';
 import { feetOf } from './feet';
-import { spread, type Standing } from './spread';
+import { FOOT_PULL, spread, type Standing } from './spread';
 import { meanTurn, nearestTurn } from './turns';
 
 /**
@@ -45,7 +45,7 @@ export function arrangeRounds(
     };
     const roundMm = perimeterMm(apothemsMm[index + 1] ?? 1, isPolygon ? sides : 0);
     const isOpen = anchors.length === 0 && isUnfinished(order, round.joined, roundMm);
-    const alongs = isOpen ? openFrom(order, roundMm) : aroundFrom(order, anchors);
+    const alongs = isOpen ? openFrom(order, roundMm) : aroundFrom(order, anchors, roundMm);
     const placeAlongs = placeAlongsOf(round.places, made.elements, alongs);
     arranged.push({ ...made, round, direction, isOpen, alongs, placeAlongs, feet });
     places = round.places;
@@ -62,12 +62,15 @@ interface FullOrder extends Order {
 }
 
 /** Places of all elements round the motif, from corner to corner, or evenly where nothing holds them. */
-function aroundFrom(order: FullOrder, anchors: readonly Anchor[]): number[] {
+function aroundFrom(order: FullOrder, anchors: readonly Anchor[], roundMm: number): number[] {
   const { elements, foots, free, sharing, direction } = order;
   const count = elements.length;
   if (count === 0) return [];
   const held = anchors.length > 0 ? anchors : [{ element: 0, at: evenly(order)[0] ?? 0 }];
   const first = held[0] as Anchor;
+  // Where there is more room than stitches, feet decide more than widths do.
+  const widthMm = elements.reduce((sum, element) => sum + element.widthMm, 0);
+  const pull = FOOT_PULL * Math.max(1, roundMm / widthMm) ** 2;
   const alongs: number[] = [];
   held.forEach(({ element, at }, i) => {
     const end = held[i + 1] ?? { element: first.element + count, at: first.at + 1 };
@@ -85,6 +88,7 @@ function aroundFrom(order: FullOrder, anchors: readonly Anchor[]): number[] {
       standing,
       { at, width: elements[element]?.widthMm ?? 1 },
       { at: end.at, width: elements[end.element % count]?.widthMm ?? 1 },
+      pull,
     );
     alongs[element] = direction * at;
     between.forEach((each, j) => (alongs[each % count] = direction * (places[j] ?? 0)));

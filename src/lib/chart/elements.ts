@@ -46,8 +46,8 @@ export interface RoundElements {
 
 /** Width along the round of a chain that stands upright before a stitch, in stitch widths: ours. */
 const TURNING_WIDTH = 0.6;
-/** Width of stitches of many legs: ours. */
-const THICK_WIDTH = 1.25;
+/** Width of stitches of many legs, and of those whose legs bulge: ours. */
+const THICK_WIDTH = { legs: 1.25, popcorn: 1.5 } as const;
 /** A long loop bows out instead of taking all of its length along the round: ours. */
 const LOOP_WIDTHS = { most: 2.7, share: 0.55 } as const;
 
@@ -133,7 +133,8 @@ function columnOf(
   const code =
     beginning === 'standing' ? (places[first.place ?? -1]?.code ?? first.code) : first.code;
   const isThick = beginning === null && (stitch(code)?.draws ?? 1) > 2;
-  const widths = beginning === 'turning' ? TURNING_WIDTH : isThick ? THICK_WIDTH : 1;
+  const thick = code.endsWith(' pc') ? THICK_WIDTH.popcorn : THICK_WIDTH.legs;
+  const widths = beginning === 'turning' ? TURNING_WIDTH : isThick ? thick : 1;
   return {
     kind: 'column',
     members,

@@ -11,10 +11,11 @@ const CLEAR = {
   dotOnStitch: 0.2,
   dotOnSpace: 0.38,
   afterDot: 0.24,
-  besideDot: 0.2,
+  besideDot: 0.34,
+  beforeHead: 0.16,
 } as const;
 /** How far apart the feet in one place stand, at most, and of the room that it has. */
-const FEET = { inStitch: 0.26, inSpace: 0.52, ofRoom: 0.8 } as const;
+const FEET = { inStitch: 0.3, inSpace: 0.52, ofRoom: 0.8 } as const;
 
 interface Clear {
   readonly stitch: number;
@@ -66,7 +67,10 @@ export function footSlots(arranged: ArrangedRound, ground: Ground): FootSlots {
     const most = isSpace ? FEET.inSpace : FEET.inStitch;
     const stepMm = Math.min(most * w, (FEET.ofRoom * roomMm) / Math.max(1, keys.length));
     const slot = keys.indexOf(key) - (keys.length - 1) / 2;
-    const offMm = direction * (slot * stepMm - (onWalk && key === '0' ? CLEAR.besideDot * w : 0));
+    // On its way a slip stitch lies before the head it is worked into, clear of the next.
+    const isOnWay = key.startsWith('travel') && !isSpace && slot === 0;
+    const before = onWalk && key === '0' ? CLEAR.besideDot : isOnWay ? CLEAR.beforeHead : 0;
+    const offMm = direction * (slot * stepMm - before * w);
     const side: Point = [outward[1], -outward[0]];
     return add(add(at, outward, (isSpace ? clear.space : clear.stitch) * w), side, offMm);
   };

@@ -6,6 +6,8 @@ import { add, towards, type Point } from './point';
 import type { ChartSymbol } from './symbol';
 
 const OVAL = 0.84;
+/** How far from the end of the row its turning chains stand: clear of the first stitch. */
+const ASIDE = 0.16;
 const RING = -1;
 
 /** The chains of a ring and the stitch that joins them, round the middle; a single chain lies in it. */
@@ -50,7 +52,7 @@ export function foundationRow({ made, places }: WorkedRing, gauge: Gauge) {
       return oval(i, [x - (OVAL / 2) * w, 0], [x + (OVAL / 2) * w, 0], w);
     }
     const up = (i - lying) * 0.75 * w + 0.2 * w;
-    return oval(i, [-0.05 * w, -up], [-0.05 * w, -up - 0.7 * w], w);
+    return oval(i, [ASIDE * w, -up], [ASIDE * w, -up - 0.7 * w], w);
   });
   const drawn = places.map((_, i): DrawnPlace => ({
     at: [-(i + 0.5) * w, -0.15 * w],

@@ -8,24 +8,35 @@ import { add, between, distance, towards, type Point } from './point';
 
 /** Room between a head and the outline, in stitch widths: ours. */
 const BELOW_OUTLINE = 0.07;
+/** Room that the end of a loop takes beside a head, in stitch widths: ours. */
+const LOOP_END = 1.3;
+/** How much higher a turning chain stands over the slip stitches that led to it. */
+const OVER_WALK = 0.5;
 /** Height of a chain that stands for nothing, in stitch widths: ours. */
 export const UPRIGHT_CHAIN = 0.75;
 
 /** Where each element of a round ends: as high as its own stitch, the tallest on the outline. */
-export function headsOf({ elements, alongs, round }: ArrangedRound, ground: Ground): Point[] {
+export function headsOf(arranged: ArrangedRound, ground: Ground): Point[] {
+  const { elements, alongs, round, travel } = arranged;
   const { gauge } = ground;
   const roundMm = roundHeightMm(round, gauge);
   return elements.map((element, i) => {
     const inner = ground.inner(alongs[i] ?? 0);
     const isFull = ground.reshapes || element.kind === 'loop';
-    const level = isFull ? 1 : Math.min(1, heightMm(element, gauge, roundMm) / roundMm);
+    const overMm = travel.length > 0 ? OVER_WALK * gauge.stitchWidthMm : 0;
+    const level = isFull ? 1 : Math.min(1, heightMm(element, gauge, roundMm, overMm) / roundMm);
     const head = between(inner, ground.outer(alongs[i] ?? 0), level);
     return add(head, towards(head, inner), BELOW_OUTLINE * gauge.stitchWidthMm);
   });
 }
 
-function heightMm({ beginning, members, code }: Column, gauge: Gauge, roundMm: number): number {
-  if (beginning === 'turning') return UPRIGHT_CHAIN * gauge.stitchWidthMm * members.length;
+function heightMm(
+  { beginning, members, code }: Column,
+  gauge: Gauge,
+  roundMm: number,
+  overMm: number,
+): number {
+  if (beginning === 'turning') return UPRIGHT_CHAIN * gauge.stitchWidthMm * members.length + overMm;
   return stitch(code) ? gauge.heightMm(code) : roundMm;
 }
 
@@ -39,7 +50,9 @@ export function unitsOf(
   const roomBeside = (i: number, j: number): number => {
     if (count < 2 || (!isClosed && (j < 0 || j >= count))) return 1;
     const [own, other] = [elements[i], elements[(j + count) % count]];
-    const naturalMm = ((own?.widthMm ?? 0) + (other?.widthMm ?? 0)) / 2;
+    // Of a loop only its end is beside: its chains give way.
+    const mostMm = other?.kind === 'loop' ? LOOP_END * gauge.stitchWidthMm : Infinity;
+    const naturalMm = ((own?.widthMm ?? 0) + Math.min(mostMm, other?.widthMm ?? 0)) / 2;
     return distance(heads[i] as Point, heads[(j + count) % count] as Point) / naturalMm;
   };
   return elements.map((_, i) => {

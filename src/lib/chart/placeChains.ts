@@ -4,19 +4,34 @@ import { add, across, between, distance, middleOf, towards, type Point } from '.
 export type Put = (member: number, feet: readonly Point[], head: Point, unitMm: number) => void;
 
 /** Lengths in stitch widths: ours. */
-const CHAIN = { length: 0.9, oval: 0.84, below: 0.16, beyond: 0.3, besideHead: 0.4 } as const;
-const PICOT = { oval: 0.5, gap: 0.12 } as const;
+const CHAIN = {
+  length: 0.9,
+  oval: 0.84,
+  below: 0.1,
+  beyond: 0.3,
+  besideHead: 0.4,
+  intoCorner: 0.5,
+} as const;
+const PICOT = { oval: 0.64, gap: 0.12 } as const;
+
+/** What a loop hangs between. */
+export interface Span {
+  readonly from: Point;
+  readonly to: Point;
+  /** The outline of the round over it, and which way that is. */
+  readonly outline: Point;
+  readonly outward: Point;
+  readonly isCorner: boolean;
+}
 
 /**
  * The line that the chains of a space lie on: straight where they just reach, bowed outwards where
- * there are more of them, as far as the outline of the round and a little beyond.
+ * there are more of them, as far as the outline of the round and a little beyond. The loop of a
+ * corner is drawn out towards it.
  */
 export function arcBetween(
-  from: Point,
-  to: Point,
+  { from, to, outline, outward, isCorner }: Span,
   chains: number,
-  outline: Point,
-  outward: Point,
   w: number,
 ): (share: number) => Point {
   const low = add([0, 0], outward, -CHAIN.below * w);
@@ -29,7 +44,8 @@ export function arcBetween(
     outline[0] * outward[0] +
     outline[1] * outward[1] -
     (middle[0] * outward[0] + middle[1] * outward[1]);
-  const bowMm = Math.min(wantedMm, Math.max(0, reach + CHAIN.beyond * w));
+  const leastMm = isCorner && chains > 1 ? CHAIN.intoCorner * Math.max(0, reach) : 0;
+  const bowMm = Math.max(leastMm, Math.min(wantedMm, Math.max(0, reach + CHAIN.beyond * w)));
   const control = add(middle, outward, 2 * bowMm);
   return (share) => {
     const a = between(begin, control, share);
@@ -44,10 +60,11 @@ export function chainSymbols(
   stitches: readonly WorkedStitch[],
   arc: (share: number) => Point,
   chordMm: number,
+  bulge: number,
   w: number,
   put: Put,
 ): void {
-  const trim = Math.min(0.28, (CHAIN.besideHead * w) / Math.max(1e-9, chordMm));
+  const trim = Math.min(0.28, ((CHAIN.besideHead + bulge) * w) / Math.max(1e-9, chordMm));
   const at = (share: number): Point => arc(trim + (1 - 2 * trim) * share);
   const count = members.length;
   members.forEach((member, i) => {

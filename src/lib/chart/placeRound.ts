@@ -16,7 +16,12 @@ export interface DrawnRound {
 /** Room for the stitch that closes the round, on the chain that begins it, in stitch widths: ours. */
 const JOIN_ROOM = 0.36;
 /** How far before the first head it lies where no chain begins the round. */
-const JOIN_BEFORE = 0.5;
+const JOIN_BEFORE = 0.6;
+/** How far out it lies there, clear of what stands to either side. */
+const JOIN_OUT = 0.14;
+
+/** How much wider a popcorn is than other stitches, to each side. */
+const BULGE = 0.26;
 
 /** Room below a chain that stands on nothing. */
 const CLEAR_OF_BELOW = 0.1;
@@ -49,8 +54,13 @@ export function placeRound(arranged: ArrangedRound, ground: Ground): DrawnRound 
     const closes = i === elements.length - 1 && join !== null && !beginsUpright;
     const to = closes ? between(end, from, (JOIN_BEFORE * w) / distance(from, end)) : end;
     const outline = ground.outer(alongs[i] ?? 0);
-    const arc = arcBetween(from, to, element.members.length, outline, outwardAt(i), w);
-    chainSymbols(element.members, round.stitches, arc, distance(from, to), w, put);
+    const bulge = bulgeBeside(i);
+    const arc = arcBetween(
+      { from, to, outline, outward: outwardAt(i), isCorner: element.corner !== null },
+      element.members.length,
+      w,
+    );
+    chainSymbols(element.members, round.stitches, arc, distance(from, to), bulge, w, put);
     return arc;
   });
   joinWithoutChain();
@@ -66,6 +76,13 @@ export function placeRound(arranged: ArrangedRound, ground: Ground): DrawnRound 
   }
   symbols.sort((a, b) => a.stitch - b.stitch);
   return { symbols, places: drawnPlaces() };
+
+  /** How much farther the chains of a loop keep from a stitch whose legs bulge, in stitch widths. */
+  function bulgeBeside(loop: number): number {
+    const count = elements.length;
+    const beside = [elements[(loop + count - 1) % count], elements[(loop + 1) % count]];
+    return beside.some((each) => each?.kind === 'column' && each.code.endsWith(' pc')) ? BULGE : 0;
+  }
 
   function outwardAt(element: number): Point {
     const along = alongs[element] ?? 0;
@@ -104,7 +121,7 @@ export function placeRound(arranged: ArrangedRound, ground: Ground): DrawnRound 
     const begin = heads[0] ?? ground.outer(0);
     const last = heads.findLast((_, i) => elements[i]?.kind === 'column') ?? begin;
     const share = Math.min(0.5, (JOIN_BEFORE * w) / Math.max(1e-9, distance(begin, last)));
-    const at = between(begin, last, share);
+    const at = add(between(begin, last, share), outwardAt(0), JOIN_OUT * w);
     put(join, [at], at, w);
   }
 

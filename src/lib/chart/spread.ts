@@ -8,7 +8,7 @@ export interface Standing {
 }
 
 /** How strongly a foot pulls, against the spring between neighbours one width apart: ours. */
-const FOOT_PULL = 0.3;
+export const FOOT_PULL = 0.3;
 
 /**
  * Places of things in a row between two fixed ends: as far apart as they are wide, scaled to the

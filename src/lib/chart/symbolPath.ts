@@ -10,7 +10,7 @@ export interface SymbolPath {
 }
 
 /** How far the outer legs of a stitch of many legs bow out, in stitch widths: ours. */
-const LEG_BOW = { legs: 0.34, puff: 0.36, popcorn: 0.46 } as const;
+const LEG_BOW = { twoLegs: 0.22, legs: 0.34, puff: 0.36, popcorn: 0.42 } as const;
 
 /** Path data of a symbol, in the coordinates of the chart. */
 export function symbolPath(symbol: ChartSymbol): SymbolPath {
@@ -54,8 +54,9 @@ function legsPath({ glyph, feet, head, unitMm, ...rest }: ChartSymbol, foot: Poi
   const side = across(up);
   const capHalf = (glyph.legs > 1 ? SIZES.cap * 0.8 : SIZES.cap) * unitMm;
   const cap = segment(add(head, side, -capHalf), add(head, side, capHalf));
+  const bow = glyph.legs > 2 ? LEG_BOW.legs : LEG_BOW.twoLegs;
   if (glyph.legs > 1 && feet.length === 1)
-    return { line: cap + bowedLegs(symbol, foot, head, LEG_BOW.legs), solid: '' };
+    return { line: cap + bowedLegs(symbol, foot, head, bow), solid: '' };
   const legs = feet.map((each) => stem(each, head, glyph.bars, unitMm)).join('');
   const mark = insertionMark(glyph.insertion, foot, up, unitMm);
   const oval = glyph.footChains > 0 ? footOval(foot, up, unitMm) : '';
