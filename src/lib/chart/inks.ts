@@ -1,10 +1,14 @@
-/** Inks of the rounds in turn, on a light and on a dark ground; 4.5:1 on the grounds of both. */
+/**
+ * Inks of the rounds in turn, on a light and on a dark ground; 4.5:1 on the grounds of both. Deep and
+ * paler inks take turns, so that rounds beside one another stay apart to whoever sees fewer colours.
+ */
 export const CHART_INKS = [
-  { light: '#17353a', dark: '#e2eceb' },
-  { light: '#0d6670', dark: '#6fc9cc' },
-  { light: '#8a3a1e', dark: '#f0a581' },
-  { light: '#4d3f86', dark: '#b7abf0' },
-  { light: '#5d5a10', dark: '#cfc66a' },
+  { light: '#10292d', dark: '#f6fbfa' },
+  { light: '#08767f', dark: '#3fa3b4' },
+  { light: '#5e1d0c', dark: '#fbcdb2' },
+  { light: '#6a55b5', dark: '#9384e2' },
+  { light: '#393707', dark: '#efe8a6' },
+  { light: '#a84f24', dark: '#d8775a' },
 ] as const;
 
 export type ChartInk = (typeof CHART_INKS)[number];
