@@ -7,7 +7,7 @@ export const CHART_INKS = [
   { light: '#08767f', dark: '#3fa3b4' },
   { light: '#5e1d0c', dark: '#fbcdb2' },
   { light: '#6a55b5', dark: '#9384e2' },
-  { light: '#393707', dark: '#efe8a6' },
+  { light: '#333106', dark: '#efe8a6' },
   { light: '#a84f24', dark: '#d8775a' },
 ] as const;
 
