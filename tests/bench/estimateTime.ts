@@ -1,7 +1,7 @@
-import { performance } from 'node:perf_hooks';
 import { estimate, readyMotif, type Motif, type Plan } from '../../src/lib';
 import { buildPlan } from '../support/plans';
 import { heading, line } from './report.ts';
+import { exponent, leastMs } from './timing.ts';
 
 const SIDES = [10, 20, 50, 100, 200] as const;
 const MANY = [1, 2, 5, 10, 20, 50, 100, 200] as const;
@@ -13,7 +13,7 @@ const FIT_FROM = 10;
 /** Time of an estimate against motifs of one kind, and against kinds of motif. */
 export function benchEstimateTime(): void {
   heading('Time of an estimate');
-  const byArea = leastMs(
+  const byArea = estimateMs(
     SIDES.map((side) => buildPlan({ size: { by: 'grid', rows: side, columns: side } })),
   );
   SIDES.forEach((side, i) => {
@@ -27,44 +27,27 @@ export function benchEstimateTime(): void {
 }
 
 function growth(what: string, planOf: (count: number) => Plan): void {
-  const times = leastMs(MANY.map(planOf));
+  const times = estimateMs(MANY.map(planOf));
   line(`estimate, the first of the ${what}`, times[0] as number, 'ms');
   MANY.slice(1).forEach((count, i) => {
     const perEach = (times[i + 1] as number) / count / (times[0] as number);
     line(`estimate, ${count} ${what}, each over one`, perEach, 'times');
   });
   const linear = { most: 1.2, why: 'linear is 1' };
-  line(`estimate, exponent of ${what} from ${FIT_FROM}`, exponent(MANY, times), '', linear);
+  line(
+    `estimate, exponent of ${what} from ${FIT_FROM}`,
+    exponent(MANY, times, FIT_FROM),
+    '',
+    linear,
+  );
 }
 
-/**
- * Every plan timed once in each round, so that a busy moment hits all alike; the least of the
- * rounds, which is the one that other work on the machine disturbed least.
- */
-function leastMs(plans: readonly Plan[]): number[] {
-  const least = plans.map(() => Infinity);
-  for (let round = -WARM_UP; round < ROUNDS; round += 1) {
-    plans.forEach((plan, i) => {
-      const startMs = performance.now();
-      estimate(plan);
-      const tookMs = performance.now() - startMs;
-      if (round >= 0) least[i] = Math.min(least[i] as number, tookMs);
-    });
-  }
-  return least;
-}
-
-/** Slope of log time over log count, by least squares. */
-function exponent(counts: readonly number[], times: readonly number[]): number {
-  const points = counts
-    .map((count, i) => [Math.log(count), Math.log(times[i] as number)] as const)
-    .filter((_, i) => (counts[i] as number) >= FIT_FROM);
-  const mean = (axis: 0 | 1): number =>
-    points.reduce((sum, point) => sum + point[axis], 0) / points.length;
-  const [meanX, meanY] = [mean(0), mean(1)];
-  const along = points.reduce((sum, [x, y]) => sum + (x - meanX) * (y - meanY), 0);
-  return along / points.reduce((sum, [x]) => sum + (x - meanX) ** 2, 0);
-}
+const estimateMs = (plans: readonly Plan[]): number[] =>
+  leastMs(
+    plans.map((plan) => () => void estimate(plan)),
+    ROUNDS,
+    WARM_UP,
+  );
 
 const COLOURS = ['c1', 'c2', 'c3', 'c4', 'c5'] as const;
 const colourOf = (i: number): string => COLOURS[i % COLOURS.length] as string;

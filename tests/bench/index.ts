@@ -1,12 +1,16 @@
 import { benchCalibration } from './calibration.ts';
 import { benchEstimateTime } from './estimateTime.ts';
+import { benchPatternTime } from './patternTime.ts';
 import { benchPages } from './pages.ts';
 import { heading } from './report.ts';
 import { benchRequests } from './requests.ts';
+import { benchTyping } from './typing.ts';
 
 /** `npm run bench`, or `npm run bench -- time pages` for some parts; BASE_URL is the built site. */
 const parts = {
   time: benchEstimateTime,
+  pattern: benchPatternTime,
+  typing: withSite(benchTyping),
   calibration: benchCalibration,
   requests: withSite(benchRequests),
   pages: withSite(benchPages),
