@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { jisName } from '../../lib/chart/symbolName';
 import { sampleSymbol } from '../../lib/chart/sampleSymbol';
 import { symbolPath } from '../../lib/chart/symbolPath';
@@ -13,7 +14,7 @@ interface ChartKeyProps {
 }
 
 /** The symbols that a chart uses, each with its abbreviation and name. */
-export function ChartKey({ codes, terms, ownStitches }: ChartKeyProps) {
+export const ChartKey = memo(({ codes, terms, ownStitches }: ChartKeyProps) => {
   return (
     <ul aria-label="Symbols of this chart" className="flex flex-wrap gap-x-7 gap-y-2">
       {codes.map((code) => {
@@ -58,4 +59,5 @@ export function ChartKey({ codes, terms, ownStitches }: ChartKeyProps) {
       })}
     </ul>
   );
-}
+});
+ChartKey.displayName = 'ChartKey';

@@ -1,5 +1,5 @@
 import { Download, Maximize, ZoomIn, ZoomOut } from 'lucide-react';
-import { useMemo, useState, type KeyboardEvent } from 'react';
+import { memo, useMemo, useState, type KeyboardEvent } from 'react';
 import { download, downloadBlob } from '../../client/download';
 import { chartSvg } from '../../lib/chart/chartSvg';
 import { layoutChart } from '../../lib/chart/layoutChart';
@@ -47,7 +47,7 @@ const KEYS =
   'Arrow keys walk from stitch to stitch, plus and minus look closer or farther, 0 shows it whole.';
 
 /** A pattern in symbols: under the rule, looked at as closely as one likes, and in words beside it. */
-export function SymbolChart(props: SymbolChartProps) {
+export const SymbolChart = memo((props: SymbolChartProps) => {
   const {
     reading,
     gauge,
@@ -64,8 +64,11 @@ export function SymbolChart(props: SymbolChartProps) {
     [reading, gauge, ownStitches],
   );
   const inks = useMemo(() => roundInks(reading), [reading]);
+  const codes = useMemo(() => codesOf(reading), [reading]);
   const [pointed, setPointed] = useState<StitchAddress | null>(null);
   const [failed, setFailed] = useState(false);
+  // A large chart has thousands of lines of table, which most people never open.
+  const [hasTable, setHasTable] = useState(false);
   const marginMm = marginMmOf(chart);
   const room = { widthMm: chart.widthMm + 2 * marginMm, heightMm: chart.heightMm + 2 * marginMm };
   const zoom = useZoom(room);
@@ -119,12 +122,6 @@ export function SymbolChart(props: SymbolChartProps) {
     }
   }
 
-  const codes = [
-    ...new Set([
-      ...Object.keys(reading.ring.made),
-      ...reading.rounds.flatMap(({ made }) => Object.keys(made)),
-    ]),
-  ];
   return (
     <section aria-label="Chart">
       <div className="not-printed mb-2 flex flex-wrap items-center gap-2">
@@ -176,12 +173,22 @@ export function SymbolChart(props: SymbolChartProps) {
       <div className="mt-3">
         <ChartKey {...{ codes, terms, ownStitches }} />
       </div>
-      <Disclosure className="not-printed mt-3" summary="The chart as a table">
-        <ChartTable {...{ reading, terms }} />
+      <Disclosure
+        className="not-printed mt-3"
+        summary="The chart as a table"
+        onToggle={setHasTable}
+      >
+        {hasTable && <ChartTable {...{ reading, terms }} />}
       </Disclosure>
     </section>
   );
-}
+});
+SymbolChart.displayName = 'SymbolChart';
+
+/** Every stitch that the pattern makes, in the order of its first. */
+const codesOf = ({ ring, rounds }: Reading): string[] => [
+  ...new Set([...Object.keys(ring.made), ...rounds.flatMap(({ made }) => Object.keys(made))]),
+];
 
 /** The stitch that an arrow key leads to: along the round, or to the like place of the next. */
 function walked(

@@ -7,13 +7,19 @@ interface DisclosureProps {
   summary: ReactNode;
   children: ReactNode;
   open?: boolean;
+  /** Told when it opens and closes. */
+  onToggle?: (isOpen: boolean) => void;
   className?: string;
 }
 
 /** The browser's own details: works without script, and find-in-page opens it. */
-export function Disclosure({ summary, children, open, className }: DisclosureProps) {
+export function Disclosure({ summary, children, open, onToggle, className }: DisclosureProps) {
   return (
-    <details className={classNames('group', className)} open={open}>
+    <details
+      className={classNames('group', className)}
+      open={open}
+      onToggle={(event) => onToggle?.(event.currentTarget.open)}
+    >
       <summary className="-ms-1 inline-flex min-h-8 list-none items-center gap-1 rounded-control px-1 font-bold text-teal coarse:min-h-11 [&::-webkit-details-marker]:hidden">
         <ChevronRight
           size={16}

@@ -26,6 +26,11 @@ const show = (terms: 'us' | 'uk' = 'us', onPoint = vi.fn()) =>
 describe('SymbolChart', () => {
   it('says in a table all that it draws', () => {
     show();
+    const details = screen
+      .getByText('The chart as a table')
+      .closest('details') as HTMLDetailsElement;
+    details.open = true;
+    fireEvent(details, new Event('toggle'));
     const table = screen.getByRole('table', { name: 'Rnd 1', hidden: true });
     const rows = within(table).getAllByRole('row', { hidden: true }).slice(1);
     expect(

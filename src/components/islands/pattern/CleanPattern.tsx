@@ -1,5 +1,5 @@
 import { Copy, Printer } from 'lucide-react';
-import { useMemo, useState } from 'react';
+import { memo, useMemo, useState } from 'react';
 import { printPattern } from '../../../lib/pattern/print/printPattern';
 import type { Reading, Terms } from '../../../lib/pattern/reading';
 import type { OwnStitch } from '../../../lib/stitches/ownStitch';
@@ -21,7 +21,7 @@ const WORDS = [
 ] as const;
 
 /** The pattern as a clean page, in either terms, short or in full, with the key of its abbreviations. */
-export function CleanPattern({ reading, ownStitches }: CleanPatternProps) {
+export const CleanPattern = memo(({ reading, ownStitches }: CleanPatternProps) => {
   const [terms, setTerms] = useState<Terms>(reading.terms);
   const [words, setWords] = useState<'short' | 'full'>('short');
   const [copied, setCopied] = useState(false);
@@ -74,4 +74,5 @@ export function CleanPattern({ reading, ownStitches }: CleanPatternProps) {
       </div>
     </section>
   );
-}
+});
+CleanPattern.displayName = 'CleanPattern';

@@ -1,16 +1,24 @@
-import { useDeferredValue, useId, useMemo, useRef, useState, type ReactNode } from 'react';
+import {
+  useCallback,
+  useDeferredValue,
+  useId,
+  useMemo,
+  useRef,
+  useState,
+  type ReactNode,
+} from 'react';
 import { gaugeOf } from '../../../lib/gauge/gauge';
 import { motifGeometry } from '../../../lib/motifs/geometry';
 import type { MotifSides } from '../../../lib/motifs/motif';
 import { motifOf } from '../../../lib/pattern/motifOf';
 import { convertTerms } from '../../../lib/pattern/print/convertTerms';
 import { readPattern } from '../../../lib/pattern/readPattern';
-import type { Terms } from '../../../lib/pattern/reading';
+import type { Terms, WorkedRound } from '../../../lib/pattern/reading';
 import type { Span } from '../../../lib/pattern/span';
 import type { OwnStitch } from '../../../lib/stitches/ownStitch';
 import type { GaugeSwatch } from '../../../lib/swatches/swatchRecord';
 import type { Units } from '../../../lib/units/display';
-import { SymbolChart } from '../../chart/SymbolChart';
+import { SymbolChart, type StitchAddress } from '../../chart/SymbolChart';
 import { classNames } from '../../ui/classNames';
 import { SegmentedControl } from '../../ui/SegmentedControl';
 import { Select } from '../../ui/Select';
@@ -91,6 +99,13 @@ export function PatternEditor(props: PatternEditorProps) {
     () => motifGeometry(motifOf(drawn, '', name), gauge, null),
     [drawn, gauge, name],
   );
+  // Chart and table are drawn again only with a new reading, and so must be given the same functions.
+  const lightStitch = useCallback(
+    (at: StitchAddress | null) =>
+      setLit(at && (drawn.rounds[at.round]?.stitches[at.stitch]?.span ?? drawn.ring.span)),
+    [drawn],
+  );
+  const lightRound = useCallback((round: WorkedRound | null) => setLit(round && round.span), []);
   const planning = usePlanning(reading, name);
   const sizes = sizeCount(reading.pattern);
   const isEmpty = drawn.rounds.length === 0;
@@ -171,9 +186,7 @@ export function PatternEditor(props: PatternEditorProps) {
               reading={drawn}
               terms={shownTerms}
               ownStitches={ownStitches}
-              onPoint={(at) =>
-                setLit(at && (drawn.rounds[at.round]?.stitches[at.stitch]?.span ?? drawn.ring.span))
-              }
+              onPoint={lightStitch}
             />
           )}
         </div>
@@ -187,7 +200,7 @@ export function PatternEditor(props: PatternEditorProps) {
             <ReadRounds
               {...{ reading: drawn, geometry, gauge, units }}
               terms={shownTerms}
-              onRound={(round) => setLit(round && round.span)}
+              onRound={lightRound}
             />
           </section>
           <div className={classNames(only('rounds'), 'mt-10')}>

@@ -1,4 +1,5 @@
 import { Check, TriangleAlert } from 'lucide-react';
+import { memo } from 'react';
 import type { Gauge } from '../../../lib/gauge/gauge';
 import type { MotifGeometry } from '../../../lib/motifs/geometry';
 import type { Reading, WorkedRound } from '../../../lib/pattern/reading';
@@ -21,7 +22,7 @@ interface ReadRoundsProps {
 }
 
 /** Every round as worked: what is made and counted, what the note claims, size, fullness and yarn. */
-export function ReadRounds(props: ReadRoundsProps) {
+export const ReadRounds = memo((props: ReadRoundsProps) => {
   const { reading, geometry, gauge, units, terms, onRound } = props;
   const { rounds, sides } = reading;
   const { rounds: yarn, byColour } = patternYarn(reading, gauge);
@@ -134,7 +135,8 @@ export function ReadRounds(props: ReadRoundsProps) {
       </table>
     </div>
   );
-}
+});
+ReadRounds.displayName = 'ReadRounds';
 
 /** The bracketed note of a round, and whether the round agrees with it. */
 interface ClaimProps {
