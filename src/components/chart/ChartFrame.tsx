@@ -4,7 +4,7 @@ import { GUTTER_TOP_PX, gutterLeftPx, Rule } from '../ui/Rule';
 import type { RuleUnits } from '../ui/ruleTicks';
 import { useWidthPx } from '../ui/useWidthPx';
 import { usePointers, useWheel } from './usePointers';
-import type { Zoom } from './useZoom';
+import type { InSight, Zoom } from './useZoom';
 
 interface ChartFrameProps {
   chart: Chart;
@@ -41,16 +41,24 @@ export function ChartFrame(props: ChartFrameProps) {
   const drawn = { width: wholeMm.width * wholePxPerMm, height: wholeMm.height * wholePxPerMm };
   const frame = useRef<SVGSVGElement>(null);
 
-  function toMm(clientX: number, clientY: number): readonly [number, number] {
+  function inSight(clientX: number, clientY: number): InSight {
     const box = frame.current?.getBoundingClientRect();
     const scale = box && box.width > 0 ? (gutterPx + drawn.width) / box.width : 1;
     return [
-      leftMm + ((clientX - (box?.left ?? 0)) * scale - gutterPx) / pxPerMm,
-      topMm + ((clientY - (box?.top ?? 0)) * scale - GUTTER_TOP_PX) / pxPerMm,
+      ((clientX - (box?.left ?? 0)) * scale - gutterPx) / drawn.width,
+      ((clientY - (box?.top ?? 0)) * scale - GUTTER_TOP_PX) / drawn.height,
     ];
   }
-  const pointers = usePointers({ zoom, pxPerMm, toMm, onHover, onTap });
-  useWheel(frame, zoom, toMm);
+  const toMm = ([across, down]: InSight): readonly [number, number] => [
+    leftMm + (across * wholeMm.width) / times,
+    topMm + (down * wholeMm.height) / times,
+  ];
+  const pointers = usePointers({
+    ...{ zoom, inSight },
+    onHover: (at) => onHover(at && toMm(at)),
+    onTap: (at) => onTap(toMm(at)),
+  });
+  useWheel(frame, zoom, inSight);
 
   return (
     <div ref={ref}>

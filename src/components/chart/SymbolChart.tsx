@@ -89,10 +89,6 @@ export const SymbolChart = memo((props: SymbolChartProps) => {
     x - marginMm - chart.originMm[0],
     y - marginMm - chart.originMm[1],
   ];
-  const middleMm = (): readonly [number, number] => [
-    zoom.view.leftMm + room.widthMm / zoom.view.zoom / 2,
-    zoom.view.topMm + room.heightMm / zoom.view.zoom / 2,
-  ];
 
   function onKeyDown(event: KeyboardEvent) {
     const next = walked(
@@ -105,8 +101,8 @@ export const SymbolChart = memo((props: SymbolChartProps) => {
       point(symbol);
       const [x, y] = symbol.head;
       zoom.show([x + marginMm + chart.originMm[0], y + marginMm + chart.originMm[1]]);
-    } else if (event.key === '+' || event.key === '=') zoom.zoomBy(STEP, middleMm());
-    else if (event.key === '-') zoom.zoomBy(1 / STEP, middleMm());
+    } else if (event.key === '+' || event.key === '=') zoom.zoomBy(STEP);
+    else if (event.key === '-') zoom.zoomBy(1 / STEP);
     else if (event.key === '0') zoom.whole();
     else if (event.key === 'Escape') point(null);
     else return;
@@ -125,14 +121,14 @@ export const SymbolChart = memo((props: SymbolChartProps) => {
   return (
     <section aria-label="Chart">
       <div className="not-printed mb-2 flex flex-wrap items-center gap-2">
-        <Button small icon={ZoomIn} onClick={() => zoom.zoomBy(STEP, middleMm())}>
+        <Button small icon={ZoomIn} onClick={() => zoom.zoomBy(STEP)}>
           Closer
         </Button>
         <Button
           small
           icon={ZoomOut}
           aria-disabled={zoom.view.zoom === 1}
-          onClick={() => zoom.zoomBy(1 / STEP, middleMm())}
+          onClick={() => zoom.zoomBy(1 / STEP)}
         >
           Farther
         </Button>

@@ -12,9 +12,12 @@ interface Room {
   heightMm: number;
 }
 
+/** A place in what is in sight, or a way across it: shares of its width and height, from its top left. */
+export type InSight = readonly [across: number, down: number];
+
 type Move =
-  | { by: 'zoom'; factor: number; atMm: readonly [number, number] }
-  | { by: 'pan'; xMm: number; yMm: number }
+  | { by: 'zoom'; factor: number; at: InSight }
+  | { by: 'pan'; way: InSight }
   | { by: 'show'; atMm: readonly [number, number] }
   | { by: 'whole' };
 
@@ -29,12 +32,12 @@ export function moved(view: View, move: Move, room: Room): View {
   const seen = { width: room.widthMm / zoom, height: room.heightMm / zoom };
   let { leftMm, topMm } = view;
   if (move.by === 'pan') {
-    leftMm += move.xMm;
-    topMm += move.yMm;
+    leftMm += move.way[0] * seen.width;
+    topMm += move.way[1] * seen.height;
   } else if (move.by === 'zoom') {
     // What is under the finger stays there.
-    leftMm = move.atMm[0] - (move.atMm[0] - leftMm) * (view.zoom / zoom);
-    topMm = move.atMm[1] - (move.atMm[1] - topMm) * (view.zoom / zoom);
+    leftMm += move.at[0] * (room.widthMm / view.zoom - seen.width);
+    topMm += move.at[1] * (room.heightMm / view.zoom - seen.height);
   } else {
     const [x, y] = move.atMm;
     const isSeen = x > leftMm && x < leftMm + seen.width && y > topMm && y < topMm + seen.height;
@@ -57,18 +60,13 @@ export function useZoom({ widthMm, heightMm }: Room) {
     WHOLE,
   );
   // The drawing may have shrunk since: what is out of it now is not shown.
-  const { zoom, leftMm, topMm } = moved(
-    stored,
-    { by: 'pan', xMm: 0, yMm: 0 },
-    { widthMm, heightMm },
-  );
+  const { zoom, leftMm, topMm } = moved(stored, { by: 'pan', way: [0, 0] }, { widthMm, heightMm });
   return useMemo(
     () => ({
       view: { zoom, leftMm, topMm },
-      zoomBy: (factor: number, atMm: readonly [number, number]) =>
-        act({ move: { by: 'zoom', factor, atMm }, room: { widthMm, heightMm } }),
-      pan: (xMm: number, yMm: number) =>
-        act({ move: { by: 'pan', xMm, yMm }, room: { widthMm, heightMm } }),
+      zoomBy: (factor: number, at: InSight = [0.5, 0.5]) =>
+        act({ move: { by: 'zoom', factor, at }, room: { widthMm, heightMm } }),
+      pan: (way: InSight) => act({ move: { by: 'pan', way }, room: { widthMm, heightMm } }),
       show: (atMm: readonly [number, number]) =>
         act({ move: { by: 'show', atMm }, room: { widthMm, heightMm } }),
       whole: () => act({ move: { by: 'whole' }, room: { widthMm, heightMm } }),

@@ -1,9 +1,10 @@
 import { inkOf } from './inks';
 import type { Chart } from './layoutChart';
 import { SIZES } from './sizes';
+import type { ChartSymbol } from './symbol';
 import { symbolPath } from './symbolPath';
 
-/** The chart as a drawing of its own, dark on white, in mm: for print and for other programs; `inks` of the rounds. */
+/** The chart as a drawing of its own, dark on white, in mm: for print and for other programs; `inks` of the rounds; each stitch has an id. */
 export function chartSvg(chart: Chart, title: string, inks: readonly number[] = []): string {
   const { widthMm, heightMm, overMm, originMm, stitchWidthMm } = chart;
   const marginMm = overMm + 0.5 * stitchWidthMm;
@@ -11,12 +12,9 @@ export function chartSvg(chart: Chart, title: string, inks: readonly number[] = 
   const [width, height] = [widthMm + 2 * marginMm, heightMm + 2 * marginMm];
   const number = (value: number): string => String(Math.round(value * 100) / 100 + 0);
   const groups = [chart.ring, ...chart.rounds].map((symbols, i) => {
-    const paths = symbols.map(symbolPath);
-    const line = paths.map((path) => path.line).join('');
-    const solid = paths.map((path) => path.solid).join('');
     const ink = inkOf(inks[i - 1] ?? i - 1).light;
-    const filled = solid && `<path d="${solid}" fill="${ink}" stroke="none"/>`;
-    return `<g stroke="${ink}">${line && `<path d="${line}"/>`}${filled}</g>`;
+    const drawn = symbols.map((symbol) => symbolElement(symbol, ink)).join('');
+    return `<g id="round-${i}" stroke="${ink}">${drawn}</g>`;
   });
   const ring =
     chart.magicRingMm === null
@@ -30,6 +28,17 @@ export function chartSvg(chart: Chart, title: string, inks: readonly number[] = 
     ring + groups.join(''),
     '</g></svg>',
   ].join('\n');
+}
+
+/** One object for each stitch, so that drawing programs can take hold of it. */
+function symbolElement(symbol: ChartSymbol, ink: string): string {
+  const { line, solid } = symbolPath(symbol);
+  const id = `id="stitch-${symbol.round + 1}-${symbol.stitch + 1}"`;
+  const filled = `d="${solid}" fill="${ink}" stroke="none"`;
+  if (solid === '') return `<path ${id} d="${line}"/>`;
+  return line === ''
+    ? `<path ${id} ${filled}/>`
+    : `<g ${id}><path d="${line}"/><path ${filled}/></g>`;
 }
 
 const escaped = (text: string): string =>

@@ -1,4 +1,4 @@
-import type { OwnStitch, SymbolBody } from '../stitches/ownStitch';
+import { OWN_STITCH_LIMITS, type OwnStitch, type SymbolBody } from '../stitches/ownStitch';
 import type { Moves, StitchCode } from '../stitches/stitch';
 import { stitch } from '../stitches/stitchTable';
 
@@ -62,12 +62,8 @@ function glyphOfMoves({ wraps, draws, throughs }: Moves): Glyph {
   const footChains = Math.max(0, throughs - wrapsEach - 1);
   if (wraps === 0) return { ...PLAIN, body: 'cross', footChains };
   // A half double draws off its wrap with the rest, and so has no stroke.
-  return {
-    ...PLAIN,
-    body: 'legs',
-    bars: throughs === 1 ? 0 : wraps,
-    footChains: throughs === 1 ? 0 : footChains,
-  };
+  const bars = Math.min(wraps, throughs - 1, OWN_STITCH_LIMITS.bars);
+  return { ...PLAIN, body: 'legs', bars, footChains };
 }
 
 /** A popcorn is whole stitches, closed by one more draw: its legs are those of the stitch it names. */
