@@ -4,6 +4,7 @@ export { printPattern, type PrintedPattern, type PrintOptions } from './print/pr
 export { convertTerms } from './print/convertTerms';
 export type { KeyLine } from './print/vocabulary';
 export { motifOf } from './motifOf';
+export { isTakenWord } from './terms/takenWord';
 export { tokenize } from './tokenize';
 export { PATTERN_LIMITS } from './limits';
 export type * from './diagnostic';

@@ -52,7 +52,7 @@ export function ownStitchCode({
   return `${abbreviation}{${figures.join(',')}}`;
 }
 
-const CODE = /^([a-z]{1,12})\{(\d{1,2}),(\d{1,2}),(\d{1,2})(?:,(\d{1,2}(?:\.\d{1,4})?))?\}$/;
+const CODE = /^([a-z]{2,12})\{(\d{1,2}),(\d{1,2}),(\d{1,2})(?:,(\d{1,2}(?:\.\d{1,4})?))?\}$/;
 
 /** What a code of `ownStitchCode` says, or null where it is none or beyond `OWN_STITCH_LIMITS`. */
 export function ownStitchOf(code: StitchCode): Stitch | null {
@@ -64,15 +64,17 @@ export function ownStitchOf(code: StitchCode): Stitch | null {
   );
   const moves = { wraps, draws, throughs };
   const { wraps: w, draws: d, throughs: t, heightOverWidth: tall } = OWN_STITCH_LIMITS;
-  if (wraps > w || draws > d || throughs > t || wraps + draws + throughs === 0) return null;
+  if (wraps > w || draws > d || throughs > t || draws + throughs === 0) return null;
   if (height !== undefined && (height < tall.least || height > tall.most)) return null;
+  // "lst{01,1,3}" would be a second code of the same stitch.
+  if (ownStitchCode({ abbreviation, moves, heightOverWidth: height ?? null }) !== code) return null;
   return {
     ...moves,
     code,
     us: abbreviation,
     uk: abbreviation,
     ukCode: abbreviation,
-    turningChains: turningChainsOf(moves),
+    turningChains: height === undefined ? usualTurningChains(moves) : chainsAsTall(moves, height),
     heightOverWidth: height ?? usualHeightOverWidth(moves),
   };
 }
@@ -87,17 +89,24 @@ export function usualHeightOverWidth({ wraps, draws, throughs }: Moves): number 
   if (draws === 0) return 0.9;
   if (throughs === 0) return 0.18;
   const legThroughs = (throughs - 1) / draws + 1;
-  return Math.round((0.52 + (0.43 * wraps) / draws + 0.4 * legThroughs) * 100) / 100;
+  const fit = 0.52 + (0.43 * wraps) / draws + 0.4 * legThroughs;
+  return Math.min(OWN_STITCH_LIMITS.heightOverWidth.most, Math.round(fit * 100) / 100);
 }
 
 /** Chains that reach as high: those of sc, hdc, dc and on, and one more for each chain that lengthens it. */
-function turningChainsOf({ wraps, draws, throughs }: Moves): number {
+function usualTurningChains({ wraps, draws, throughs }: Moves): number {
   if (draws === 0 || throughs === 0) return 0;
   const legWraps = Math.round(wraps / draws);
   const legThroughs = Math.round((throughs - 1) / draws + 1);
   if (legThroughs === 1 || legWraps === 0) return legWraps + legThroughs;
   return legWraps + 2 + Math.max(0, legThroughs - legWraps - 1);
 }
+
+/** A chain that begins a round adds 0.65 of a stitch width to its height: what the whole stitch table agrees with (ours). */
+const WIDTHS_A_CHAIN = 0.65;
+
+const chainsAsTall = ({ draws }: Moves, heightOverWidth: number): number =>
+  draws === 0 ? 0 : Math.round(heightOverWidth / WIDTHS_A_CHAIN);
 
 /** The abbreviation in a code of one's own stitch, or the code itself: "lst" of "lst{1,1,3}". */
 export const abbreviationOf = (code: StitchCode): string => code.split('{', 1)[0] ?? code;

@@ -1,4 +1,6 @@
-import { abbreviationOf } from '../../stitches/ownStitch';
+import { abbreviationOf, ownStitchOf } from '../../stitches/ownStitch';
+import { movesInWords } from '../../stitches/movesInWords';
+import type { Stitch } from '../../stitches/stitch';
 import { stitch } from '../../stitches/stitchTable';
 import type { Terms } from '../reading';
 
@@ -66,13 +68,24 @@ export class Vocabulary {
   /** A stitch by its US code. */
   stitch(code: string): string {
     if (code === 'ch') return this.chain();
+    const own = ownStitchOf(code);
+    if (own) return this.own(own);
     const compound = /^(\w+?)(\d+)(tog|cl)$/.exec(code) ?? /^(\d+)-(\w+) (pc|puff)$/.exec(code);
     if (compound) return this.compound(code, compound);
     const found = stitch(code);
     if (!found) return code;
-    const name = this.ownNames.get(code) ?? (this.terms === 'us' ? found.us : found.uk);
+    const name = this.terms === 'us' ? found.us : found.uk;
     if (this.fullWords && !code.startsWith('picot')) return name;
-    return this.remember(abbreviationOf(this.terms === 'us' ? found.code : found.ukCode), name);
+    return this.remember(this.terms === 'us' ? found.code : found.ukCode, name);
+  }
+
+  /** Nobody knows a stitch of one's own by its name: the key says how it is made, whole words or not. */
+  private own(own: Stitch): string {
+    const abbreviation = abbreviationOf(own.code);
+    const name = this.ownNames.get(own.code) ?? abbreviation;
+    const moves = movesInWords(own);
+    if (this.fullWords) return this.remember(name, moves);
+    return this.remember(abbreviation, name === abbreviation ? moves : `${name} (${moves})`);
   }
 
   private compound(

@@ -38,12 +38,20 @@ export function readStitch(
     ownStitch(token, at, lexicon) ??
     inserted(tokens, at, lexicon) ??
     named(tokens, at, lexicon) ??
-    loneCompound(tokens, at)
+    loneCompound(tokens, at) ??
+    ownStitch(token, at, lexicon, true)
   );
 }
 
-function ownStitch(token: Token, at: number, lexicon: Lexicon): StitchTerm | null {
-  const own = lexicon.own.get(token.text);
+/** A stitch of one's own, or several of it: "lsts". */
+function ownStitch(
+  { text }: Token,
+  at: number,
+  lexicon: Lexicon,
+  isPlural = false,
+): StitchTerm | null {
+  const singular = isPlural && text.endsWith('s') ? text.slice(0, -1) : text;
+  const own = lexicon.own.get(singular);
   return own
     ? { code: ownStitchCode(own), perPlace: 1, takes: own.takes, next: at + 1, foreign: null }
     : null;

@@ -1,3 +1,4 @@
+import { abbreviationOf } from '../../stitches/ownStitch';
 import type { Report } from '../report';
 import type { Span } from '../span';
 import type { WorkedRound } from '../reading';
@@ -119,5 +120,6 @@ function madeOf(
   const same = stitches.filter(({ code }) => code === of.code);
   const family = stitches.filter(({ code }) => familyOf(code) === familyOf(of.code));
   const values = [same.length + picots.length, family.length].map(share);
-  return { values, noun: perSide ? `${of.code} on each side` : of.code };
+  const noun = abbreviationOf(of.code);
+  return { values, noun: perSide ? `${noun} on each side` : noun };
 }

@@ -4,6 +4,7 @@ import type { Report } from '../report';
 import type { Span } from '../span';
 import type { Corner } from '../reading';
 import type { ChainRule } from '../syntax';
+import type { OwnTakes } from './takes';
 
 /** A stitch while its round is being worked. */
 export interface DraftStitch {
@@ -46,6 +47,7 @@ export class Budget {
     readonly report: Report,
     readonly chainRules: readonly ChainRule[],
     readonly terms: Terms,
+    readonly ownTakes: OwnTakes,
   ) {}
 
   /** Counts one step of work; false when there is too much, which is told once. */

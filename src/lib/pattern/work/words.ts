@@ -1,3 +1,4 @@
+import { abbreviationOf } from '../../stitches/ownStitch';
 import type { PlaceFilter } from '../syntax';
 
 /** A kind of place in the trade's words: "ch-2 sp", "dc", "sts". */
@@ -5,7 +6,7 @@ export function filterInWords({ of, code, chains }: PlaceFilter, count = 1): str
   const s = count === 1 ? '' : 's';
   if (of === 'corner') return `corner${s}`;
   const corner = of === 'corner-space' ? 'corner ' : '';
-  if (of === 'stitch') return code ?? `st${s}`;
+  if (of === 'stitch') return code === null ? `st${s}` : abbreviationOf(code);
   if (of === 'stitch-or-space') return `st${s} or sp${s}`;
   return chains === null ? `${corner}${corner ? '' : 'ch-'}sp${s}` : `${corner}ch-${chains} sp${s}`;
 }

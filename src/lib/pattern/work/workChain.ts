@@ -1,3 +1,4 @@
+import { abbreviationOf } from '../../stitches/ownStitch';
 import type { Stitch } from '../../stitches/stitch';
 import { BASIC_STITCHES, knownStitch, stitch } from '../../stitches/stitchTable';
 import type { ChainStep, StandsFor, Step, StitchStep } from '../syntax';
@@ -90,7 +91,9 @@ function tellHeight(
   spaceChains: number,
 ): void {
   const base = stitch(baseOf(code));
-  if (!base || base.turningChains === 0 || base.turningChains === chains) return;
+  // How tall a stitch of one's own stands is guessed from its moves: a chain more or less may be right.
+  const leeway = abbreviationOf(code) === code ? 0 : 1;
+  if (!base || base.turningChains === 0 || Math.abs(base.turningChains - chains) <= leeway) return;
   tellTerms(hand, step, base, chains);
   const right = base.turningChains + spaceChains;
   const short = chains < base.turningChains;
@@ -98,7 +101,7 @@ function tellHeight(
     'warning',
     'turning-chain',
     step,
-    `A chain of ${chains} is too ${short ? 'short' : 'tall'} for the ${code} it stands for, which is ${base.turningChains} chains tall.`,
+    `A chain of ${chains} is too ${short ? 'short' : 'tall'} for the ${abbreviationOf(code)} it stands for, which is ${base.turningChains} chains tall.`,
     { label: `Write ${right}`, ...step.amountSpan, replacement: amountText(step, right) },
   );
 }

@@ -1,3 +1,4 @@
+import { ownStitchCode } from '../../stitches/ownStitch';
 import type { Place, ReadOptions, WorkedRing, WorkedRound } from '../reading';
 import type { Report } from '../report';
 import type { PatternText, RoundText, Step } from '../syntax';
@@ -21,10 +22,11 @@ export interface WorkedPattern {
 /** Works a pattern as a hand does, round by round, and reports what cannot be worked. */
 export function workPattern(
   pattern: PatternText,
-  { sides, terms }: Pick<ReadOptions, 'sides' | 'terms'>,
+  { sides, terms, ownStitches = [] }: Pick<ReadOptions, 'sides' | 'terms' | 'ownStitches'>,
   report: Report,
 ): WorkedPattern {
-  const budget = new Budget(report, pattern.chainRules, terms);
+  const ownTakes = new Map(ownStitches.map((each) => [ownStitchCode(each), each.takes]));
+  const budget = new Budget(report, pattern.chainRules, terms, ownTakes);
   const { ring, firstSteps } = foundationOf(pattern, budget);
   const rounds: WorkedRound[] = [];
   const texts: RoundText[] = [];

@@ -1,3 +1,4 @@
+import { abbreviationOf } from '../../stitches/ownStitch';
 import type { StitchStep, Where } from '../syntax';
 import type { Hand } from './hand';
 import { takesOf } from './takes';
@@ -8,7 +9,8 @@ const ONE_STITCH = { of: 'stitch', code: null, chains: null } as const;
 
 /** "3 dc in next ch-2 sp", "dc in each st around", "5 dc": false when a repeat tries and a place is missing. */
 export function workStitch(hand: Hand, step: StitchStep): boolean {
-  if (step.code.startsWith('picot-')) return picots(hand, step);
+  const takesNone = takesOf(step.code, hand.budget.ownTakes) === 0 && step.where.length === 0;
+  if (takesNone || step.code.startsWith('picot-')) return picots(hand, step);
   const [first] = step.where;
   if (first?.kind === 'chain-from-hook' && hand.pending.length >= first.nth)
     return closePicot(hand, step, first.nth);
@@ -46,7 +48,7 @@ function workWhere(hand: Hand, step: StitchStep, where: Where): boolean {
       'No ring has been made: begin with "Ch 4, join with sl st to form ring" or a magic ring.',
     );
   }
-  const takes = takesOf(step.code);
+  const takes = takesOf(step.code, hand.budget.ownTakes);
   // "dc3tog in next ch-2 sp" gathers its legs in one place.
   const onePlace = hand.isRing || (where.kind === 'next' && where.filter.of !== 'stitch');
   const isTravel = travels(hand, step, where);
@@ -100,7 +102,7 @@ function placeAll(
   }
   const over = positions.length % takes;
   if (over > 0) {
-    const message = `${step.code} takes ${takes} stitches each time: ${over} of ${positions.length} are left over.`;
+    const message = `${abbreviationOf(step.code)} takes ${takes} stitches each time: ${over} of ${positions.length} are left over.`;
     tell(hand, 'unworked', step, message);
   }
   return true;
@@ -113,7 +115,7 @@ function into(hand: Hand, step: StitchStep, position: Position, count: number): 
   }
 }
 
-/** A picot stands on the stitch before it, and nothing is worked into it. */
+/** A picot, or a stitch of one's own that takes up none, stands on the stitch before it; nothing is worked into it. */
 function picots(hand: Hand, step: StitchStep): boolean {
   hand.begun = true;
   for (let i = 0; i < step.amount.value && !hand.budget.spent; i += 1) {

@@ -120,7 +120,12 @@ describe('readStitch', () => {
 
   it('knows stitches of one\u2019s own by their abbreviation', () => {
     const moves = { wraps: 2, draws: 2, throughs: 3 };
-    const lexicon = lexiconOf('us', [{ code: 'lst', name: 'linked stitch', moves, takes: 2 }]);
-    expect(readStitch(tokenize('Lst'), 0, lexicon)).toMatchObject({ code: 'lst', takes: 2 });
+    const rest = { heightOverWidth: null, takes: 2, symbol: null };
+    const own = { abbreviation: 'lst', name: 'linked stitch', moves, ...rest };
+    const lexicon = lexiconOf('us', [own]);
+    const code = 'lst{2,2,3}';
+    expect(readStitch(tokenize('Lst'), 0, lexicon)).toMatchObject({ code, takes: 2 });
+    expect(readStitch(tokenize('lsts'), 0, lexicon)).toMatchObject({ code, takes: 2 });
+    expect(readStitch(tokenize('lstss'), 0, lexicon)).toBeNull();
   });
 });
