@@ -80,14 +80,16 @@ export function PatternEditor(props: PatternEditorProps) {
   const field = useRef<HTMLTextAreaElement>(null);
   const problemsId = useId();
 
+  // A key is on the screen before a long pattern is read again, and read before it is drawn again.
+  const readText = useDeferredValue(text);
   const reading = useMemo(
-    () => readPattern(text, { terms, sides, size, ...(ownStitches && { ownStitches }) }),
-    [text, terms, sides, size, ownStitches],
+    () => readPattern(readText, { terms, sides, size, ...(ownStitches && { ownStitches }) }),
+    [readText, terms, sides, size, ownStitches],
   );
-  // The chart may lag a keystroke behind the text; the text never waits for the chart.
   const drawn = useDeferredValue(reading);
   const instructions = useMemo(() => instructionSpans(reading), [reading]);
-  const marked = useMemo(() => (offset === null ? [] : stitchesAt(drawn, offset)), [drawn, offset]);
+  const at = useDeferredValue(offset);
+  const marked = useMemo(() => (at === null ? [] : stitchesAt(drawn, at)), [drawn, at]);
 
   const choices = useMemo(() => gaugeChoices(swatches, units), [swatches, units]);
   const choice = choices.find(({ key }) => key === gaugeKey) ?? choices[0];
@@ -151,7 +153,7 @@ export function PatternEditor(props: PatternEditorProps) {
             onConvert={text.trim() === '' ? null : convert}
           />
           <PatternField
-            {...{ text, instructions, lit }}
+            {...{ text, readText, instructions, lit }}
             fieldRef={field}
             problems={reading.diagnostics}
             onText={(next) => onChange({ text: next })}

@@ -6,6 +6,8 @@ import { textPieces, type TextPiece } from './textPieces';
 
 interface PatternFieldProps {
   text: string;
+  /** The text that the problems are of: the same, or that of a moment ago. */
+  readText: string;
   onText: (text: string) => void;
   problems: readonly Diagnostic[];
   instructions: readonly Span[];
@@ -32,11 +34,8 @@ const UNDERLINE: Readonly<Record<Severity, string>> = {
  * underlines, so that typing, selecting and undoing are the browser's own.
  */
 export function PatternField(props: PatternFieldProps) {
-  const { text, onText, problems, instructions, lit, onOffset, fieldRef, describedBy } = props;
-  const lines = useMemo(
-    () => textPieces(text, problems, lit, instructions),
-    [text, problems, lit, instructions],
-  );
+  const { text, readText, onText, problems, instructions, lit, onOffset, fieldRef, describedBy } =
+    props;
 
   function onPointerMove(event: PointerEvent) {
     if (event.pointerType !== 'mouse') return;
@@ -48,11 +47,7 @@ export function PatternField(props: PatternFieldProps) {
   return (
     <div className="max-h-[min(70vh,44rem)] overflow-y-auto rounded-control border border-edge bg-surface focus-within:outline-2 focus-within:outline-offset-1 focus-within:outline-teal">
       <div className="relative grid min-h-72">
-        <div aria-hidden className={classNames(TYPE, 'text-transparent [counter-reset:line]')}>
-          {lines.map((pieces, i) => (
-            <Line key={i} pieces={pieces} text={text} isLast={i === lines.length - 1} />
-          ))}
-        </div>
+        <Underlines text={readText} {...{ problems, instructions, lit }} />
         <textarea
           ref={fieldRef}
           aria-label="Pattern text"
@@ -75,6 +70,24 @@ export function PatternField(props: PatternFieldProps) {
     </div>
   );
 }
+
+type UnderlinesProps = Pick<PatternFieldProps, 'text' | 'problems' | 'instructions' | 'lit'>;
+
+/** The drawing beneath. */
+const Underlines = memo(({ text, problems, instructions, lit }: UnderlinesProps) => {
+  const lines = useMemo(
+    () => textPieces(text, problems, lit, instructions),
+    [text, problems, lit, instructions],
+  );
+  return (
+    <div aria-hidden className={classNames(TYPE, 'text-transparent [counter-reset:line]')}>
+      {lines.map((pieces, i) => (
+        <Line key={i} pieces={pieces} text={text} isLast={i === lines.length - 1} />
+      ))}
+    </div>
+  );
+});
+Underlines.displayName = 'Underlines';
 
 interface LineProps {
   pieces: readonly TextPiece[];
