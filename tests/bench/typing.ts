@@ -12,9 +12,9 @@ const WARM_UP = 6;
 const PAUSE_MS = 700;
 
 interface Key {
-  /** Handlers, reading, React and layout, until the next frame could be painted. */
+  /** Handlers, React and layout, until the next frame could be painted. */
   readonly untilPaintMs: number;
-  /** All that the main thread did for the key, the chart that is drawn after it included. */
+  /** All that the main thread did for the key, reading and drawing after it included. */
   readonly allMs: number;
 }
 
@@ -39,8 +39,8 @@ export async function benchTyping(baseUrl: string): Promise<void> {
       inFrame,
     );
     line('until it can be painted, 95th percentile', quantile(untilPaint, 0.95), '', inFrame);
-    line('the chart after it, which waits for the keys, median', quantile(later, 0.5), '');
-    line('the chart after it, 95th percentile', quantile(later, 0.95), '');
+    line('read and drawn after it, waiting for the keys, median', quantile(later, 0.5), '');
+    line('read and drawn after it, 95th percentile', quantile(later, 0.95), '');
   } finally {
     await browser.close();
   }
