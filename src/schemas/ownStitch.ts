@@ -33,6 +33,9 @@ const ownStitchFields = {
 /** A stitch of one's own by its moves; the library's `OwnStitch`. */
 export const ownStitchInput = strict('Stitch', ownStitchFields);
 export type OwnStitchInput = z.output<typeof ownStitchInput>;
+/** What the form of a stitch holds; its fields' ids begin with "stitch". */
+export const ownStitchForm = strict('Form', { stitch: ownStitchInput });
+export type OwnStitchForm = z.output<typeof ownStitchForm>;
 export const ownStitchUpdate = strict('Stitch', { ...ownStitchFields, version });
 
 export const presentedOwnStitchSchema = z.strictObject({
