@@ -1,4 +1,6 @@
 import {
+  lazy,
+  Suspense,
   useCallback,
   useDeferredValue,
   useId,
@@ -18,7 +20,7 @@ import type { Span } from '../../../lib/pattern/span';
 import type { OwnStitch } from '../../../lib/stitches/ownStitch';
 import type { GaugeSwatch } from '../../../lib/swatches/swatchRecord';
 import type { Units } from '../../../lib/units/display';
-import { SymbolChart, type StitchAddress } from '../../chart/SymbolChart';
+import type { StitchAddress } from '../../chart/SymbolChart';
 import { classNames } from '../../ui/classNames';
 import { SegmentedControl } from '../../ui/SegmentedControl';
 import { Select } from '../../ui/Select';
@@ -34,6 +36,11 @@ import { sizeCount } from './patternSizes';
 import { Problems } from './Problems';
 import { ReadRounds } from './ReadRounds';
 import { usePlanning } from './usePlanning';
+
+/** Fetched once there is something to draw. */
+const SymbolChart = lazy(async () => ({
+  default: (await import('../../chart/SymbolChart')).SymbolChart,
+}));
 
 export interface PatternChange {
   text?: string;
@@ -183,13 +190,15 @@ export function PatternEditor(props: PatternEditorProps) {
             )}
           </div>
           {!isEmpty && (
-            <SymbolChart
-              {...{ gauge, name, units, marked }}
-              reading={drawn}
-              terms={shownTerms}
-              ownStitches={ownStitches}
-              onPoint={lightStitch}
-            />
+            <Suspense fallback={<p className="min-h-130 text-ink-2">Drawing the chart …</p>}>
+              <SymbolChart
+                {...{ gauge, name, units, marked }}
+                reading={drawn}
+                terms={shownTerms}
+                ownStitches={ownStitches}
+                onPoint={lightStitch}
+              />
+            </Suspense>
           )}
         </div>
       </div>

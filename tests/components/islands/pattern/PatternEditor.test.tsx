@@ -71,9 +71,9 @@ describe('PatternEditor', () => {
     expect(screen.getByRole('heading', { name: 'Reads without a problem' })).toBeTruthy();
   });
 
-  it('lights the text of the stitch that the chart points at', () => {
+  it('lights the text of the stitch that the chart points at', async () => {
     const { container } = render(<Editor text={RIGHT} />);
-    const chart = screen.getByRole('group', { name: /^Chart of Mine, 1 rounds/ });
+    const chart = await screen.findByRole('group', { name: /^Chart of Mine, 1 rounds/ });
     fireEvent.keyDown(chart, { key: 'ArrowLeft' });
     const lit = () => container.querySelector('[data-begin].outline')?.textContent;
     expect(lit()).toBe('Ch 3 (counts as dc)');
@@ -82,8 +82,9 @@ describe('PatternEditor', () => {
     expect(screen.getByText('Rnd 1, 4 of 23: dc in the ring, side 1')).toBeTruthy();
   });
 
-  it('marks in the chart what the cursor stands in', () => {
+  it('marks in the chart what the cursor stands in', async () => {
     const { container } = render(<Editor text={RIGHT} />);
+    await screen.findByRole('group', { name: /^Chart of/ });
     const mark = () => container.querySelector('path.stroke-amber')?.getAttribute('d');
     expect(mark()).toBe('');
     const at = RIGHT.indexOf('2 dc in ring') + 3;
