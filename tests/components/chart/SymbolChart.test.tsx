@@ -45,6 +45,27 @@ describe('SymbolChart', () => {
     expect(within(key).getByText('長編み').getAttribute('lang')).toBe('ja');
   });
 
+  it("names a stitch of one's own as its person does", () => {
+    const own = {
+      abbreviation: 'lst',
+      name: 'long stitch',
+      moves: { wraps: 2, draws: 1, throughs: 3 },
+      ...{ heightOverWidth: null, takes: 1, symbol: null },
+    };
+    const options = { terms: 'us', sides: 0, ownStitches: [own] } as const;
+    const mine = readPattern('Rnd 1: 12 lst in magic ring; join.', options);
+    render(
+      <SymbolChart
+        {...{ gauge, marked: [], reading: mine, onPoint: vi.fn(), ownStitches: [own] }}
+        name="Disc"
+        units="metric"
+        terms="us"
+      />,
+    );
+    const key = screen.getByRole('list', { name: 'Symbols of this chart' });
+    expect(within(key).getByText('lst').parentElement?.textContent).toBe('lst long stitch');
+  });
+
   it('walks from stitch to stitch by the keyboard, looks closer and shows all again', () => {
     const onPoint = vi.fn();
     show('us', onPoint);
