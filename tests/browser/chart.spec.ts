@@ -225,6 +225,9 @@ test('on paper it keeps its key, in inks that are dark enough without colour', a
   await expect(drawing(page)).toBeVisible();
   await expect(page.getByRole('list', { name: 'Symbols of this chart' })).toBeVisible();
   await expect(zoomBar(page, 'Closer')).toBeHidden();
+  // A4 between its margins: paper does not scroll sideways.
+  await page.setViewportSize({ width: 672, height: 1000 });
+  await expectNoSidewaysScroll(page);
   const inks = await drawing(page)
     .locator('path[stroke=currentColor]')
     .evaluateAll((paths) => paths.map((path) => getComputedStyle(path).color));
