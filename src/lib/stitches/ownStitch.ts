@@ -81,7 +81,8 @@ export function ownStitchOf(code: StitchCode): Stitch | null {
 
 /**
  * Height over width that moves usually come to: 0.52 and 0.43 a wrap and 0.40 a through of each leg,
- * which meets the heights of the stitch table within 7 % (a fit; ours).
+ * which meets the heights of the stitch table within 7 % (a fit; ours). Wraps that are drawn off many
+ * at once, as of a bullion, lie flat: 0.1 each (from memory).
  *
  * Example: 1 wrap, 1 draw and 2 throughs, a dc, come to 1.75; the table says 1.85.
  */
@@ -89,15 +90,18 @@ export function usualHeightOverWidth({ wraps, draws, throughs }: Moves): number 
   if (draws === 0) return 0.9;
   if (throughs === 0) return 0.18;
   const legThroughs = (throughs - 1) / draws + 1;
-  const fit = 0.52 + (0.43 * wraps) / draws + 0.4 * legThroughs;
+  const standing = Math.min(wraps / draws, legThroughs);
+  const fit = 0.52 + 0.43 * standing + 0.1 * (wraps / draws - standing) + 0.4 * legThroughs;
   return Math.min(OWN_STITCH_LIMITS.heightOverWidth.most, Math.round(fit * 100) / 100);
 }
 
 /** Chains that reach as high: those of sc, hdc, dc and on, and one more for each chain that lengthens it. */
-function usualTurningChains({ wraps, draws, throughs }: Moves): number {
+function usualTurningChains(moves: Moves): number {
+  const { wraps, draws, throughs } = moves;
   if (draws === 0 || throughs === 0) return 0;
   const legWraps = Math.round(wraps / draws);
   const legThroughs = Math.round((throughs - 1) / draws + 1);
+  if (legWraps > legThroughs) return chainsAsTall(moves, usualHeightOverWidth(moves));
   if (legThroughs === 1 || legWraps === 0) return legWraps + legThroughs;
   return legWraps + 2 + Math.max(0, legThroughs - legWraps - 1);
 }

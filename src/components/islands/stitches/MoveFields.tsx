@@ -68,7 +68,7 @@ function Step({ sign, words, disabled, onClick }: StepProps) {
   return (
     <button
       type="button"
-      className="segment min-h-[38px] min-w-[38px] font-mono text-lg aria-disabled:text-ink-2"
+      className="segment min-h-[38px] min-w-[38px] font-mono text-lg aria-disabled:text-ink-2 coarse:min-h-[42px] coarse:min-w-[42px]"
       aria-label={words}
       // Not `disabled`: the focus would be lost at the last step down.
       aria-disabled={disabled || undefined}

@@ -26,9 +26,10 @@ export interface OwnStitchesPanelProps extends OwnStitchesState {
 
 /** A stitch to look at and change. */
 const EXAMPLE: Partial<OwnStitch> = {
-  abbreviation: 'lst',
-  name: 'long stitch',
-  moves: { wraps: 1, draws: 1, throughs: 3 },
+  abbreviation: 'bul',
+  name: 'bullion of seven wraps',
+  moves: { wraps: 7, draws: 1, throughs: 1 },
+  symbol: { body: 'legs', legs: 1, bars: 5 },
 };
 
 /**

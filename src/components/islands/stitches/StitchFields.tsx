@@ -56,17 +56,17 @@ export function StitchFields({ stitch, terms }: StitchFieldsProps) {
         <NumberInput
           control={control}
           name="stitch.heightOverWidth"
-          label="Height, if you have measured it"
+          label="Measured height"
           unit="widths"
           step={0.05}
-          hint="height of a row over width of a stitch"
+          hint="row height over stitch width, where you know it"
         />
         <NumberInput
           control={control}
           name="stitch.takes"
-          label="Stitches it takes up"
+          label="Stitches taken up"
           whole
-          hint="2 where it gathers two, 0 where it stands on the last stitch as a picot does"
+          hint="2 where it gathers two, 0 where it stands on the last stitch like a picot"
         />
       </div>
       <SymbolFields stitch={stitch} />
@@ -84,7 +84,7 @@ function ComesTo({ stitch, terms }: StitchFieldsProps) {
       <p>
         {isMade ? (
           <>
-            <b className="figures block text-lg">{movesComeTo(moves, heightOverWidth)}</b>
+            <b className="block text-lg">{movesComeTo(moves, heightOverWidth)}</b>
             {like && <span className="text-ink-2">{like}</span>}
           </>
         ) : (
