@@ -1,6 +1,7 @@
 import type { Reading, WorkedStitch } from '../../lib/pattern/reading';
 import type { StitchRun } from '../../lib/chart/stitchRuns';
 import type { ChartSymbol } from '../../lib/chart/symbol';
+import { abbreviationOf } from '../../lib/stitches/ownStitch';
 import { codeWord, type Terms } from '../planner/stitchWord';
 
 const NB = '\u00a0';
@@ -20,9 +21,11 @@ export function symbolInWords(symbol: ChartSymbol, reading: Reading, terms: Term
   const where =
     into.kind === 'place'
       ? ` in ${placeWord(below[into.index]?.code ?? '', terms)}`
-      : INTO[into.kind];
+      : isOnLast(stitch)
+        ? ON_LAST
+        : INTO[into.kind];
   const side = sideWords(stitch, reading.sides !== 0 && round.corner !== null);
-  return `${round.label}, ${symbol.stitch + 1} of ${round.stitches.length}: ${codeWord(stitch.code, terms)}${where}${ROLE[stitch.role]}${side && `, ${side}`}`;
+  return `${round.label}, ${symbol.stitch + 1} of ${round.stitches.length}: ${codeWord(stitch.code, terms)}${where}${roleOf(stitch)}${side && `, ${side}`}`;
 }
 
 const INTO = {
@@ -42,16 +45,27 @@ const ROLE: Readonly<Record<WorkedStitch['role'], string>> = {
   join: ', closes the round',
 };
 
+const ON_LAST = ' on the stitch before it';
+
+/** A stitch of one's own that takes up none stands as a picot does, and is none. */
+const isOnLast = ({ code, role }: Pick<WorkedStitch, 'code' | 'role'>): boolean =>
+  role === 'picot' && abbreviationOf(code) !== code;
+
+const roleOf = (stitch: Pick<WorkedStitch, 'code' | 'role'>): string =>
+  isOnLast(stitch) ? '' : ROLE[stitch.role];
+
 export const sideWords = (
   { side, corner }: Pick<WorkedStitch, 'side' | 'corner'>,
   hasSides: boolean,
 ): string => (!hasSides ? '' : corner === null ? `side ${side + 1}` : `corner ${corner + 1}`);
 
 /** What a run of stitches is worked into: "ch-2 space, all in one", "dc, one in each". */
-export function runInto({ into, count }: StitchRun, terms: Terms): string {
+export function runInto(run: StitchRun, terms: Terms): string {
+  const { into, count } = run;
+  if (isOnLast(run)) return ON_LAST.trim();
   if (into.kind !== 'place') return INTO[into.kind].replace(/^ in /, '') || 'nothing';
   const each = count === 1 ? '' : into.inOne ? ', all in one' : ', one in each';
   return placeWord(into.code, terms) + each;
 }
 
-export const runRole = ({ role }: StitchRun): string => ROLE[role].replace(/^, /, '');
+export const runRole = (run: StitchRun): string => roleOf(run).replace(/^, /, '');

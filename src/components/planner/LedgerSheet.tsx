@@ -3,6 +3,7 @@ import { download } from '../../client/download';
 import { toCsv } from '../../lib/csv/toCsv';
 import { PARTS, type Estimate, type LedgerLine } from '../../lib/ledger/ledger';
 import type { Plan } from '../../lib/plan/plan';
+import { abbreviationOf } from '../../lib/stitches/ownStitch';
 import { showYarn, YARN_UNIT, yarnFigure, type Units } from '../../lib/units/display';
 import { DataTable } from '../ui/DataTable';
 import { Sheet } from '../ui/Dialog';
@@ -120,7 +121,7 @@ function ledgerCsv(lines: readonly LedgerLine[], nameOf: (key: string) => string
       nameOf(line.colour),
       line.part,
       line.label,
-      line.stitch,
+      line.stitch && abbreviationOf(line.stitch),
       line.count,
       line.loopsEach,
       line.loops,

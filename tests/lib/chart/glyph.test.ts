@@ -1,5 +1,13 @@
 import { describe, expect, it } from 'vitest';
 import { glyphOf } from '../../../src/lib/chart/glyph';
+import { sampleSymbol } from '../../../src/lib/chart/sampleSymbol';
+import { symbolPath } from '../../../src/lib/chart/symbolPath';
+import {
+  OWN_STITCH_LIMITS,
+  SYMBOL_BODIES,
+  type OwnStitch,
+} from '../../../src/lib/stitches/ownStitch';
+import { BASIC_STITCHES } from '../../../src/lib/stitches/stitchTable';
 
 describe('glyphOf', () => {
   // published: crochet chart symbols, and JIS L 0201: oval, dot, cross, T, and a stroke more from dc on.
@@ -42,4 +50,58 @@ describe('glyphOf', () => {
     expect(glyphOf('edc')).toMatchObject({ body: 'legs', bars: 1, footChains: 1 });
     expect(glyphOf('dc').footChains).toBe(0);
   });
+
+  it('draws moves that the table has as the table does, whatever they are called', () => {
+    const drawn = BASIC_STITCHES.filter(({ code }) => code !== 'ehdc');
+    for (const { code, wraps, draws, throughs } of drawn) {
+      expect(glyphOf(`own{${wraps},${draws},${throughs}}`)).toEqual(glyphOf(code));
+    }
+    // Made as a dc is, which is what is drawn: only the name tells an extended hdc.
+    expect(glyphOf('own{1,1,2}')).toEqual(glyphOf('dc'));
+    expect(glyphOf('own{3,3,4}')).toEqual(glyphOf('dc3tog'));
+  });
+
+  it('draws a stroke only for a wrap that is drawn off by itself, and no more than there is room for', () => {
+    expect(glyphOf('bul{7,1,1}')).toMatchObject({ body: 'legs', legs: 1, bars: 0 });
+    expect(glyphOf('tall{20,1,60}').bars).toBe(OWN_STITCH_LIMITS.bars);
+  });
+
+  it('draws a stitch of one’s own as it asks to be', () => {
+    const symbol = { body: 'puff', legs: 4, bars: 0 } as const;
+    const own = { ...LST, symbol };
+    expect(glyphOf('lst{1,1,3}', own)).toMatchObject(symbol);
+    expect(glyphOf('lst{1,1,3}', LST)).toEqual(glyphOf('edc'));
+  });
 });
+
+describe('sampleSymbol', () => {
+  it('stands as tall as the stitch, up to what a key has room for', () => {
+    // Heights of the table; 2.4 is the key's own limit.
+    expect(sampleSymbol('dc').head).toEqual([0, -1.85]);
+    expect(sampleSymbol('lst{1,1,3,2.2}').head).toEqual([0, -2.2]);
+    expect(sampleSymbol('lst{1,1,3,9}').head).toEqual([0, -2.4]);
+  });
+
+  it('draws every body that can be chosen, with any stems and strokes, and nothing that is no number', () => {
+    for (const body of SYMBOL_BODIES) {
+      for (const [legs, bars] of [
+        [1, 0],
+        [2, 3],
+        [OWN_STITCH_LIMITS.legs, OWN_STITCH_LIMITS.bars],
+      ] as const) {
+        const { line, solid } = symbolPath(
+          sampleSymbol('lst{1,1,3}', { ...LST, symbol: { body, legs, bars } }),
+        );
+        expect(line + solid).toMatch(/^M/);
+        expect(line + solid).not.toContain('NaN');
+      }
+    }
+  });
+});
+
+const LST: OwnStitch = {
+  abbreviation: 'lst',
+  name: 'long stitch',
+  moves: { wraps: 1, draws: 1, throughs: 3 },
+  ...{ heightOverWidth: null, takes: 1, symbol: null },
+};
