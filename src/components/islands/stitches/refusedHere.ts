@@ -13,16 +13,14 @@ export function refusedHere(
   if (isTakenWord(abbreviation)) return refusal(takenWords(abbreviation));
   const others = kept.filter(({ id }) => id !== from?.id);
   if (others.some((each) => each.abbreviation === abbreviation))
-    return refusal(
-      `You have a stitch “${abbreviation}” already: change that one, or call this another`,
-    );
+    return refusal(`You have “${abbreviation}” already: choose other letters`);
   if (!from && others.length >= KEPT_LIMITS.stitches)
     return refusal(`At most ${KEPT_LIMITS.stitches} stitches are kept: delete one first`);
   return null;
 }
 
 export const takenWords = (abbreviation: string): string =>
-  `Patterns write “${abbreviation}” for something else already: choose other letters, such as “my${abbreviation.slice(0, 9)}”`;
+  `Patterns use “${abbreviation}” already: choose other letters`;
 
 const refusal = (message: string): ApiError =>
   new ApiError(400, { code: 'invalid', message, fields: { abbreviation: message } });

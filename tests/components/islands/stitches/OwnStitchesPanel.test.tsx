@@ -143,7 +143,7 @@ describe('the form of a stitch', () => {
     press('Add a stitch');
     await form();
     type('Abbreviation', 'htr');
-    expect(screen.getByText(/Patterns write “htr” for something else already/)).toBeTruthy();
+    expect(screen.getByText(/Patterns use “htr” already/)).toBeTruthy();
     type('Name', 'mine');
     press('Add the stitch');
     expect(await screen.findByText('One thing to put right')).toBeTruthy();
@@ -187,9 +187,7 @@ describe('the form of a stitch', () => {
     await form();
     type('Name', 'another');
     press('Add the stitch');
-    expect((await screen.findAllByText(/You have a stitch “lst” already/)).length).toBeGreaterThan(
-      0,
-    );
+    expect((await screen.findAllByText(/You have “lst” already/)).length).toBeGreaterThan(0);
     expect(stitches).toEqual([content]);
   });
 
