@@ -35,9 +35,9 @@ export function StitchItem({ kept, isUsed, onInsert, onEdit, onDelete }: StitchI
               small
               icon={CornerDownLeft}
               onClick={() => onInsert(abbreviation)}
-              aria-label={`Put ${abbreviation} into the text`}
+              aria-label={`Insert ${abbreviation} into the text`}
             >
-              Put into the text
+              Insert
             </Button>
           )}
           <Button

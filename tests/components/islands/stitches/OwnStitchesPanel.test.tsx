@@ -91,7 +91,7 @@ describe('a stranger’s stitches', () => {
     localStorage.setItem('ellwise.stitches', JSON.stringify([content]));
     show(null);
     await waitFor(() => expect(stitches).toEqual([content]));
-    press('Put lst into the text');
+    press('Insert lst into the text');
     expect(onInsert).toHaveBeenCalledWith('lst');
   });
 
