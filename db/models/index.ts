@@ -7,6 +7,7 @@ import { Colourway, init as initColourway } from './Colourway';
 import { DyeLot, init as initDyeLot } from './DyeLot';
 import { EmailToken, init as initEmailToken } from './EmailToken';
 import { MotifRow, init as initMotifRow } from './MotifRow';
+import { OwnStitchRow, init as initOwnStitchRow } from './OwnStitchRow';
 import { PartSkein, init as initPartSkein } from './PartSkein';
 import { ShoppingList, init as initShoppingList } from './ShoppingList';
 import { Swatch, init as initSwatch } from './Swatch';
@@ -24,6 +25,7 @@ for (const init of [
   initDyeLot,
   initEmailToken,
   initMotifRow,
+  initOwnStitchRow,
   initPartSkein,
   initShoppingList,
   initSwatch,
@@ -58,6 +60,7 @@ export {
   DyeLot,
   EmailToken,
   MotifRow,
+  OwnStitchRow,
   PartSkein,
   sequelize,
   ShoppingList,

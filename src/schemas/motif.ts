@@ -1,10 +1,7 @@
 import * as z from './zod';
 import { MOTIF_SIDES } from '../lib/motifs/motif';
-import { PATTERN_LIMITS } from '../lib/pattern/limits';
 import { choice, counted, list, moment, name, strict, version } from './fields';
-import { KEPT_LIMITS, PLAN_LIMITS } from './limits';
-import { ownStitchInput } from './ownStitch';
-import { patternText } from './pattern';
+import { PLAN_LIMITS } from './limits';
 import { knownStitch, stitchCounts } from './stitchCounts';
 
 const { stitchesPerRound } = PLAN_LIMITS;
@@ -49,10 +46,7 @@ const roundSchema = strict('Round', {
   }
 });
 
-/** A motif as rounds of counted stitches, as a plan holds it. Plans kept before motifs had versions name none. */
-export const motifSchema = strict('Motif', {
-  key: name('Key of a motif', PLAN_LIMITS.keyLength),
-  version: version.nullable().default(null),
+const motifFields = {
   name: name('Motif name'),
   sides: choice('Sides of a motif', MOTIF_SIDES),
   ring: strict('Ring', {
@@ -60,48 +54,26 @@ export const motifSchema = strict('Motif', {
     made: stitchCounts('Stitches of the ring', stitchesPerRound),
   }),
   rounds: list('Rounds of a motif', roundSchema, 1, PLAN_LIMITS.roundsPerMotif),
-});
-
-/** A motif of one's own as it is written; the server works its rounds. */
-const patternFields = {
-  name: name('Motif name'),
-  text: patternText,
-  terms: choice('Terms', ['us', 'uk']),
-  sides: choice('Sides of a motif', MOTIF_SIDES),
-  /** Which of the sizes "10 (12, 14)"; 0 is the first. */
-  size: counted('Size', 0, PATTERN_LIMITS.sizes - 1),
-  /** The stitches of one's own that the text uses. */
-  stitches: list('Own stitches', ownStitchInput, 0, KEPT_LIMITS.stitchesPerMotif),
 };
 
-export const motifInput = strict('Motif', patternFields);
+/** A motif as rounds of counted stitches, as a plan holds it; plans kept before motifs had versions name none. */
+export const motifSchema = strict('Motif', {
+  key: name('Key of a motif', PLAN_LIMITS.keyLength),
+  version: version.nullable().default(null),
+  ...motifFields,
+});
+
+/** A motif of one's own as it is sent; its key is the id it is kept under. */
+export const motifInput = strict('Motif', motifFields);
 export type MotifInput = z.output<typeof motifInput>;
-export const motifUpdate = strict('Motif', { ...patternFields, version });
+export const motifUpdate = strict('Motif', { ...motifFields, version });
 
-const problemCounts = z.strictObject({ errors: z.number().int(), warnings: z.number().int() });
-
-/**
- * A motif with its pattern. `motif` is null where the text has no round that can be worked, or is
- * worked in rows; a ready-made motif has no version: it belongs to the program.
- */
+/** A ready-made motif has no version: it belongs to the program. */
 export const presentedMotifSchema = z.strictObject({
   key: z.string(),
   readyMade: z.boolean(),
   version: version.nullable(),
   updatedAt: moment.nullable(),
-  pattern: z.strictObject(patternFields),
-  motif: motifSchema.nullable(),
-  problems: problemCounts,
+  motif: motifSchema,
 });
 export type PresentedMotif = z.output<typeof presentedMotifSchema>;
-
-/** One save of a motif of one's own; `version` is its address. */
-export const motifVersionSchema = z.strictObject({
-  version,
-  name: z.string(),
-  savedAt: moment,
-  isCurrent: z.boolean(),
-  rounds: z.number().int(),
-  problems: problemCounts,
-});
-export type PresentedMotifVersion = z.output<typeof motifVersionSchema>;

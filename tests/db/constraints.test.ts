@@ -20,6 +20,7 @@ import {
   buildColourway,
   buildLot,
   buildMotif,
+  buildOwnStitch,
   buildSwatch,
   buildUser,
   buildYarn,
@@ -62,6 +63,9 @@ describe('constraints of the database itself', () => {
     ['swatch_measurements', 'width_mm = null, mass_g = 3, resolution_g = 1'],
     ['motifs', 'sides = 5'],
     ['motifs', "rounds = '[]'"],
+    ['own_stitches', "abbreviation = 'Lst'"],
+    ['own_stitches', 'draws = 0, throughs = 0'],
+    ['own_stitches', "symbol = '[]'"],
     ['blankets', "plan = '[]'"],
     ['blankets', "title = ''"],
     ['blanket_revisions', 'version = 0'],
@@ -142,6 +146,7 @@ async function buildEverything(): Promise<void> {
   await buildLot(user, { colourwayId: colourway.id, partSkeins: [{ massG: 41 }] });
   await buildSwatch(user, { yarnId: yarn.id });
   await buildMotif(user);
+  await buildOwnStitch(user);
   const blanket = await buildBlanket(user);
   await sequelize.transaction(async (transaction) => {
     await linkColour(user, blanket.id, 'c1', colourway.id, transaction);

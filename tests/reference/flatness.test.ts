@@ -9,6 +9,7 @@ const rules = referenceRows<'stitch' | 'least' | 'most'>('flat-circle.csv');
 /** A circle of one stitch that grows by so many stitches in every round. */
 const circleOf = (stitch: string, increase: number): Motif => ({
   key: 'test',
+  version: null,
   name: 'Test',
   sides: 0,
   ring: { chains: 0, made: {} },

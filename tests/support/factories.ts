@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import { sequelize, User, UserRole } from '../../db/models';
 import type { PresentedBlanket } from '../../src/schemas/blanket';
 import type { PresentedMotif } from '../../src/schemas/motif';
+import type { OwnStitchInput, PresentedOwnStitch } from '../../src/schemas/ownStitch';
 import { planSchema, type PlanInput } from '../../src/schemas/plan';
 import type { Role } from '../../src/schemas/roles';
 import type { LotInput, PresentedLot } from '../../src/schemas/stash';
@@ -11,9 +12,10 @@ import { createBlanket } from '../../src/server/commands/createBlanket';
 import { createColourway } from '../../src/server/commands/createColourway';
 import { createLot } from '../../src/server/commands/createLot';
 import { createMotif } from '../../src/server/commands/createMotif';
+import { createOwnStitch } from '../../src/server/commands/createOwnStitch';
 import { createSwatch } from '../../src/server/commands/createSwatch';
 import { createYarn } from '../../src/server/commands/createYarn';
-import { MOTIF_EXAMPLE, PLAN_EXAMPLE } from '../../src/server/examples';
+import { MOTIF_EXAMPLE, PLAN_EXAMPLE, STITCH_EXAMPLE } from '../../src/server/examples';
 import { hashPassword } from '../../src/server/passwordHash';
 import { presentCurrentUser } from '../../src/server/presenters/user';
 import type { CurrentUser } from '../../src/schemas/user';
@@ -122,6 +124,14 @@ export const buildSwatch = (
 export const buildMotif = (user: CurrentUser, name = 'Lattice'): Promise<PresentedMotif> =>
   sequelize.transaction((transaction) =>
     createMotif(user, { ...MOTIF_EXAMPLE, name }, transaction),
+  );
+
+export const buildOwnStitch = (
+  user: CurrentUser,
+  values?: Partial<OwnStitchInput>,
+): Promise<PresentedOwnStitch> =>
+  sequelize.transaction((transaction) =>
+    createOwnStitch(user, { ...STITCH_EXAMPLE, ...values }, transaction),
   );
 
 /** The front page's plan as JSON, with other values where given. */

@@ -10,7 +10,7 @@ export function presentOwnMotif(row: MotifRow): PresentedMotif {
     readyMade: false,
     version: row.version,
     updatedAt: row.updatedAt.toISOString(),
-    motif: { key, name, sides, ring, rounds },
+    motif: { key, version: row.version, name, sides, ring, rounds },
   };
 }
 

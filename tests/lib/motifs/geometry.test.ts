@@ -27,6 +27,7 @@ const buildRound = (perSide: number, height: MotifRound['height'], n = 1): Motif
 const buildMotif = (sides: MotifSides, perSide: number[], height = 'sc', chains = 0): Motif =>
   frozen({
     key: 'test',
+    version: null,
     name: 'Test',
     sides,
     ring: { chains, made: {} },

@@ -83,7 +83,7 @@ describe('POST /api/motifs', () => {
     expect(status).toBe(201);
     expect(json.motif.key).toBe(json.key);
     const again = await callRoute(motif.GET, { user, params: { id: json.key } });
-    expect(again.json.motif).toEqual({ ...body, key: json.key });
+    expect(again.json.motif).toEqual({ ...body, key: json.key, version: 1 });
     expect(Object.keys(again.json.motif.rounds[0].made)).toEqual(['sl st', 'dc', 'ch']);
   });
 });

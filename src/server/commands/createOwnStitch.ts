@@ -1,0 +1,19 @@
+import type { Transaction } from 'sequelize';
+import { OwnStitchRow } from '../../../db/models';
+import { KEPT_LIMITS } from '../../schemas/limits';
+import type { OwnStitchInput, PresentedOwnStitch } from '../../schemas/ownStitch';
+import type { CurrentUser } from '../../schemas/user';
+import { presentOwnStitch } from '../presenters/ownStitch';
+import { requireRoom } from './requireRoom';
+import { onceByAbbreviation, ownStitchColumns, requireFreeWord } from './saveOwnStitch';
+
+export async function createOwnStitch(
+  user: CurrentUser,
+  input: OwnStitchInput,
+  transaction: Transaction,
+): Promise<PresentedOwnStitch> {
+  await requireRoom(OwnStitchRow, user, KEPT_LIMITS.stitches, 'stitches', transaction);
+  requireFreeWord(input);
+  const columns = { ownerId: user.id, ...ownStitchColumns(input) };
+  return presentOwnStitch(await onceByAbbreviation(OwnStitchRow.create(columns, { transaction })));
+}
