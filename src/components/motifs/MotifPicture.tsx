@@ -23,7 +23,7 @@ export function MotifPicture({ motif, gauge, units, maxHeightPx, className }: Mo
       {...{ widthMm, heightMm, units, maxHeightPx, className }}
       label={`${motif.name}, a ${SHAPE_WORDS[motif.sides]} of ${motif.rounds.length} rounds, drawn to scale: ${showFabric(acrossMm, units)} ${acrossWord(motif.sides)}.`}
     >
-      <g transform={`translate(${widthMm / 2} ${topMm})`}>
+      <g transform={`translate(${widthMm / 2} ${topMm})${motif.sides === 3 ? ' rotate(180)' : ''}`}>
         <MotifDrawing {...{ motif, gauge, acrossMm }} roundHexes={roundHexes(motif)} />
       </g>
     </RuledFrame>
@@ -32,13 +32,13 @@ export function MotifPicture({ motif, gauge, units, maxHeightPx, className }: Mo
 
 /** The box round a motif that stands on a side, and how far down its middle lies, in mm. */
 export function boxOf(sides: number, acrossMm: number) {
-  if (sides === 0 || sides % 4 === 0) {
-    return { widthMm: acrossMm, heightMm: acrossMm, topMm: acrossMm / 2 };
-  }
-  const reachMm = acrossMm / 2 / Math.cos(Math.PI / sides);
   if (sides === 3) {
-    const widthMm = acrossMm * Math.tan(Math.PI / 3);
-    return { widthMm, heightMm: acrossMm / 2 + reachMm, topMm: acrossMm / 2 };
+    return {
+      widthMm: (acrossMm * 2) / Math.sqrt(3),
+      heightMm: acrossMm,
+      topMm: (2 * acrossMm) / 3,
+    };
   }
-  return { widthMm: 2 * reachMm, heightMm: acrossMm, topMm: acrossMm / 2 };
+  const widthMm = sides === 6 ? acrossMm / Math.cos(Math.PI / 6) : acrossMm;
+  return { widthMm, heightMm: acrossMm, topMm: acrossMm / 2 };
 }

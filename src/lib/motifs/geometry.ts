@@ -1,5 +1,5 @@
 import { chainLengthMm, type Gauge } from '../gauge/gauge';
-import type { Motif, MotifRound } from './motif';
+import type { Motif, MotifRound, MotifSides } from './motif';
 
 /** Under the first a motif cups, over the second it ruffles (common practice, no source). */
 export const FLAT_FULLNESS = [0.92, 1.08] as const;
@@ -11,14 +11,14 @@ const MEASURED_SIDE_SPREAD = 0.01;
 export interface RoundGeometry {
   readonly label: string;
   readonly heightMm: number;
-  /** Flat to flat (or diameter) after this round. */
+  /** As `MotifGeometry.acrossMm`, after this round. */
   readonly acrossMm: number;
   /** Side, or circumference of a circle, as its stitches would make it over as its height makes it. */
   readonly fullness: number;
 }
 
 export interface MotifGeometry {
-  /** Flat to flat for an even number of sides; diameter of a circle; finished side of a square. */
+  /** Flat to flat for an even number of sides; diameter of a circle; finished side of a square; height of a triangle. */
   readonly acrossMm: number;
   /** Length of one side; a quarter of the circumference of a circle. */
   readonly sideMm: number;
@@ -42,6 +42,7 @@ export function motifGeometry(
   measuredAcrossMm: number | null,
 ): MotifGeometry {
   const ringMm = ringRadiusMm(motif, gauge);
+  const apothems = apothemsAcross(motif.sides);
   const perApothem = motif.sides === 0 ? Math.PI / 2 : 2 * Math.tan(Math.PI / motif.sides);
   let apothemMm = ringMm;
   const rounds = motif.rounds.map((round): RoundGeometry => {
@@ -50,22 +51,25 @@ export function motifGeometry(
     return {
       label: round.label,
       heightMm,
-      acrossMm: 2 * apothemMm,
+      acrossMm: apothems * apothemMm,
       fullness: fullnessOf(motif, round, apothemMm, gauge),
     };
   });
-  const acrossMm = measuredAcrossMm ?? 2 * apothemMm;
+  const acrossMm = measuredAcrossMm ?? apothems * apothemMm;
   return {
     acrossMm,
-    sideMm: (acrossMm / 2) * perApothem,
+    sideMm: (acrossMm / apothems) * perApothem,
     acrossSdMm:
       measuredAcrossMm === null
-        ? 2 * heightSdMm(motif, gauge)
+        ? apothems * heightSdMm(motif, gauge)
         : MEASURED_SIDE_SPREAD * measuredAcrossMm,
     rounds,
     trouble: troubleOf(rounds),
   };
 }
+
+/** How often the apothem goes into the size across: a triangle's corner stands two above the middle. */
+export const apothemsAcross = (sides: MotifSides): number => (sides === 3 ? 3 : 2);
 
 /** Height of a round in mm: its stitch, or its chain loops as two sides of a flat triangle. */
 export function roundHeightMm({ height }: Pick<MotifRound, 'height'>, gauge: Gauge): number {

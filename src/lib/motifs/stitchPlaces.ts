@@ -1,5 +1,5 @@
 import type { Gauge } from '../gauge/gauge';
-import { roundHeightMm, ringRadiusMm } from './geometry';
+import { apothemsAcross, roundHeightMm, ringRadiusMm } from './geometry';
 import type { Motif, MotifRound } from './motif';
 import { totalCount } from '../stitches/counts';
 
@@ -21,14 +21,17 @@ export interface PlacedRound {
 /**
  * Places every counted stitch of a motif for drawing: along its sides with a gap at every chain
  * space, or round a circle where the round has no corners. Scaled so that the motif is
- * `acrossMm` flat to flat.
+ * `acrossMm` across, as `motifGeometry` means it. The first side is at the top.
  *
  * Example: the first round of the group square has 12 stitches, 3 to each side.
  */
 export function placedRounds(motif: Motif, gauge: Gauge, acrossMm: number): PlacedRound[] {
   let apothemMm = ringRadiusMm(motif, gauge);
   const heights = motif.rounds.map((round) => roundHeightMm(round, gauge));
-  const scale = acrossMm / (2 * heights.reduce((sum, height) => sum + height, apothemMm));
+  const scale =
+    acrossMm /
+    heights.reduce((sum, height) => sum + height, apothemMm) /
+    apothemsAcross(motif.sides);
   let wasCircle = true;
   return motif.rounds.map((round, i): PlacedRound => {
     const innerMm = apothemMm * scale;

@@ -1,6 +1,6 @@
 import { fn, col, type Transaction } from 'sequelize';
 import { MotifRow } from '../../../db/models';
-import { READY_MOTIFS, readyMotif } from '../../lib/motifs/readyMotifs';
+import { LIBRARY_MOTIFS, readyMotif } from '../../lib/motifs/readyMotifs';
 import type { ListQuery } from '../../schemas/fields';
 import { KEPT_LIMITS } from '../../schemas/limits';
 import type { PresentedMotif } from '../../schemas/motif';
@@ -8,14 +8,14 @@ import type { CurrentUser } from '../../schemas/user';
 import { presentOwnMotif, presentReadyMotif } from '../presenters/motif';
 import { loadOwn } from './own';
 
-const EVERYTHING: ListQuery = { limit: KEPT_LIMITS.motifs + READY_MOTIFS.length, offset: 0 };
+const EVERYTHING: ListQuery = { limit: KEPT_LIMITS.motifs + LIBRARY_MOTIFS.length, offset: 0 };
 
 /** The ready-made motifs, then one's own by name; without a user, the ready-made ones. */
 export async function listMotifs(
   user: CurrentUser | null,
   { limit, offset }: ListQuery = EVERYTHING,
 ): Promise<{ items: PresentedMotif[]; total: number }> {
-  const ready = READY_MOTIFS.map(presentReadyMotif);
+  const ready = LIBRARY_MOTIFS.map(presentReadyMotif);
   const own = user ? await ownMotifs(user) : [];
   const all = [...ready, ...own];
   return { items: all.slice(offset, offset + limit), total: all.length };

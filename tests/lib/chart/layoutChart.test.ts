@@ -89,8 +89,8 @@ describe('the scale of a chart', () => {
       const reading = read(text, sides);
       const chart = chartOf(reading);
       const { acrossMm } = motifGeometry(motifOf(reading, '', ''), gauge, null);
-      // By the model's geometry: twice from the middle to a side; a triangle is 3/2 of that high.
-      const apothemMm = acrossMm / 2;
+      // Textbook: twice from the middle to a side; a triangle is three times that high.
+      const apothemMm = acrossMm / (sides === 3 ? 3 : 2);
       const count = sides === 0 ? 4 : sides;
       // Heads lie on the outline but for the room they keep from it: 0.07 of a stitch, chains 0.1 more.
       for (let side = 0; side < count; side += 1) {
@@ -100,7 +100,7 @@ describe('the scale of a chart', () => {
         expect(mm).toBeGreaterThan(apothemMm - 0.2 * gauge.stitchWidthMm);
       }
       const lowMm = Math.min(chart.widthMm, chart.heightMm);
-      expect(lowMm).toBeCloseTo(sides === 3 ? 3 * apothemMm : acrossMm, 6);
+      expect(lowMm).toBeCloseTo(acrossMm, 6);
     },
   );
 });

@@ -53,8 +53,8 @@ describe('motifGeometry', () => {
   });
 
   it.each<[MotifSides, number]>([
-    // Textbook: side = across × tan(π / sides); a quarter of π × across for a circle
-    [3, Math.sqrt(3)],
+    // Textbook: side = across × tan(π / sides); a quarter of π × across for a circle; a triangle by its height
+    [3, 2 / Math.sqrt(3)],
     [4, 1],
     [6, 1 / Math.sqrt(3)],
     [8, Math.SQRT2 - 1],

@@ -1,6 +1,7 @@
-import { LayoutGrid } from 'lucide-react';
+import { BookOpen, LayoutGrid } from 'lucide-react';
 import { useMemo, useState } from 'react';
 import { gaugeOf } from '../../../lib/gauge/gauge';
+import { layoutFor } from '../../../lib/layout/layouts';
 import { joinStitches } from '../../../lib/ledger/blanketOf';
 import { motifGeometry } from '../../../lib/motifs/geometry';
 import type { Motif } from '../../../lib/motifs/motif';
@@ -22,6 +23,8 @@ import { RoundsTable } from './RoundsTable';
 
 interface MotifPageProps {
   motif: Motif;
+  /** It has a written pattern to open. */
+  isReadyMade: boolean;
   swatches: GaugeSwatch[];
   units: Units;
   terms: Terms;
@@ -44,7 +47,7 @@ export function MotifPage(props: MotifPageProps) {
   const { sides } = motif;
   const across = showFabric(geometry.acrossMm, units);
   const stitches = joinStitches(motif);
-  const plan = `/?motif=${motif.key}&rounds=${rounds}`;
+  const plan = layoutFor(sides) && `/?motif=${motif.key}&rounds=${rounds}`;
 
   return (
     <>
@@ -82,10 +85,20 @@ export function MotifPage(props: MotifPageProps) {
               disagree at this gauge. Work one and measure it.
             </Notice>
           )}
-          <div>
-            <ButtonLink kind="primary" icon={LayoutGrid} href={plan}>
-              Plan a blanket
-            </ButtonLink>
+          <div className="flex flex-wrap items-center gap-3">
+            {plan && (
+              <ButtonLink kind="primary" icon={LayoutGrid} href={plan}>
+                Plan a blanket
+              </ButtonLink>
+            )}
+            {props.isReadyMade && (
+              <ButtonLink icon={BookOpen} href={`/motifs/read?from=${motif.key}`}>
+                Pattern and chart
+              </ButtonLink>
+            )}
+            {!plan && (
+              <p className="text-ink-2">There is no layout for blankets of this shape yet.</p>
+            )}
           </div>
         </div>
       </div>
@@ -95,9 +108,11 @@ export function MotifPage(props: MotifPageProps) {
         answer={`${across} ${acrossWord(sides)}`}
         detail={`${rounds} ${rounds === 1 ? 'round' : 'rounds'} · ${stitches} stitches`}
         action={
-          <ButtonLink kind="primary" href={plan}>
-            Plan
-          </ButtonLink>
+          plan && (
+            <ButtonLink kind="primary" href={plan}>
+              Plan
+            </ButtonLink>
+          )
         }
       />
     </>

@@ -60,6 +60,10 @@ export interface PatternEditorProps {
   shownTerms: Terms;
   swatches: GaugeSwatch[];
   ownStitches?: readonly OwnStitch[];
+  /** Below the problems: the stitches of the person's own, given what writes one into the text. */
+  stitchesPanel?: (onInsert: (abbreviation: string) => void) => ReactNode;
+  /** Takes a word that is not understood for a stitch of the person's own. */
+  onAddStitch?: (word: string) => void;
   /** Above the text, such as the motif's name. */
   heading?: ReactNode;
   /** Acts beside "Plan a blanket", such as keeping the motif. */
@@ -76,7 +80,7 @@ const PANELS = [
 /** A pattern read as it is typed: its problems, its chart, its rounds, and a clean page of it. */
 export function PatternEditor(props: PatternEditorProps) {
   const { name, text, terms, sides, onChange, swatches, ownStitches } = props;
-  const { heading, actions } = props;
+  const { heading, actions, stitchesPanel, onAddStitch } = props;
   const units = useUnits(props.units);
   const shownTerms = useTerms(props.shownTerms);
   const [size, setSize] = useState(0);
@@ -86,6 +90,8 @@ export function PatternEditor(props: PatternEditorProps) {
   const [gaugeKey, setGaugeKey] = useState(swatches[0]?.id ?? 'weight-4');
   const field = useRef<HTMLTextAreaElement>(null);
   const problemsId = useId();
+  /** Terms of the texts that were rewritten, so that undoing the rewriting brings them back too. */
+  const rewritten = useRef(new Map<string, Terms>());
 
   // A key is on the screen before a long pattern is read again, and read before it is drawn again.
   const readText = useDeferredValue(text);
@@ -136,8 +142,15 @@ export function PatternEditor(props: PatternEditorProps) {
 
   function convert() {
     const other = terms === 'us' ? 'uk' : 'us';
-    edit(0, text.length, convertTerms(text, terms, other));
+    const converted = convertTerms(text, terms, other);
+    rewritten.current.set(text, terms).set(converted, other);
+    edit(0, text.length, converted);
     onChange({ terms: other });
+  }
+
+  function insert(abbreviation: string) {
+    const { selectionStart = text.length, selectionEnd = text.length } = field.current ?? {};
+    edit(selectionStart, selectionEnd, abbreviation);
   }
 
   return (
@@ -163,7 +176,10 @@ export function PatternEditor(props: PatternEditorProps) {
             {...{ text, readText, instructions, lit }}
             fieldRef={field}
             problems={reading.diagnostics}
-            onText={(next) => onChange({ text: next })}
+            onText={(next) => {
+              const known = rewritten.current.get(next);
+              onChange({ text: next, ...(known && { terms: known }) });
+            }}
             onOffset={setOffset}
             describedBy={problemsId}
           />
@@ -173,8 +189,12 @@ export function PatternEditor(props: PatternEditorProps) {
               problems={reading.diagnostics}
               onGo={go}
               onFix={({ begin, end, replacement }) => edit(begin, end, replacement)}
+              onAddStitch={
+                onAddStitch && (({ begin, end }) => onAddStitch(readText.slice(begin, end)))
+              }
             />
           )}
+          {stitchesPanel?.(insert)}
         </div>
         <div className={only('chart')}>
           <div className="mb-3 flex flex-wrap items-end justify-between gap-3">

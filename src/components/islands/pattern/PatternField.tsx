@@ -45,7 +45,7 @@ export function PatternField(props: PatternFieldProps) {
   }
 
   return (
-    <div className="max-h-[min(70vh,44rem)] overflow-y-auto rounded-control border border-edge bg-surface focus-within:outline-2 focus-within:outline-offset-1 focus-within:outline-teal">
+    <div className="max-h-[50svh] overflow-y-auto rounded-control border border-edge bg-surface focus-within:outline-2 focus-within:outline-offset-1 focus-within:outline-teal lg:max-h-[min(70vh,44rem)]">
       <div className="relative grid min-h-72">
         <Underlines text={readText} {...{ problems, instructions, lit }} />
         <textarea

@@ -1,4 +1,12 @@
-import { CircleAlert, CircleCheck, Info, TriangleAlert, Wand, type LucideIcon } from 'lucide-react';
+import {
+  CircleAlert,
+  CircleCheck,
+  Info,
+  Plus,
+  TriangleAlert,
+  Wand,
+  type LucideIcon,
+} from 'lucide-react';
 import type { Diagnostic, Fix, Severity } from '../../../lib/pattern/diagnostic';
 import { Button } from '../../ui/Button';
 
@@ -7,6 +15,8 @@ interface ProblemsProps {
   problems: readonly Diagnostic[];
   onGo: (problem: Diagnostic) => void;
   onFix: (fix: Fix) => void;
+  /** Takes a word that is not understood for a stitch of the person's own. */
+  onAddStitch?: (problem: Diagnostic) => void;
 }
 
 const LOOKS: Readonly<Record<Severity, { icon: LucideIcon; word: string; ink: string }>> = {
@@ -16,7 +26,7 @@ const LOOKS: Readonly<Record<Severity, { icon: LucideIcon; word: string; ink: st
 };
 
 /** Everything there is to say about the text, in its order; none hidden behind the first. */
-export function Problems({ id, problems, onGo, onFix }: ProblemsProps) {
+export function Problems({ id, problems, onGo, onFix, onAddStitch }: ProblemsProps) {
   return (
     <section aria-labelledby={id} className="not-printed mt-4">
       <h2 id={id} aria-live="polite" className="flex items-center gap-2">
@@ -30,7 +40,7 @@ export function Problems({ id, problems, onGo, onFix }: ProblemsProps) {
           {problems.map((problem) => (
             <Problem
               key={`${problem.code} ${problem.begin} ${problem.end}`}
-              {...{ problem, onGo, onFix }}
+              {...{ problem, onGo, onFix, onAddStitch }}
             />
           ))}
         </ol>
@@ -39,11 +49,9 @@ export function Problems({ id, problems, onGo, onFix }: ProblemsProps) {
   );
 }
 
-function Problem({
-  problem,
-  onGo,
-  onFix,
-}: Pick<ProblemsProps, 'onGo' | 'onFix'> & { problem: Diagnostic }) {
+type ProblemProps = Omit<ProblemsProps, 'id' | 'problems'> & { problem: Diagnostic };
+
+function Problem({ problem, onGo, onFix, onAddStitch }: ProblemProps) {
   const { severity, line, column, message, fix } = problem;
   const { icon: Icon, word, ink } = LOOKS[severity];
   return (
@@ -61,11 +69,18 @@ function Problem({
           </button>
           : {message}
         </p>
-        {fix && (
-          <Button small icon={Wand} className="mt-1.5" onClick={() => onFix(fix)}>
-            {fix.label}
-          </Button>
-        )}
+        <div className="mt-1.5 flex flex-wrap gap-2 empty:hidden">
+          {fix && (
+            <Button small icon={Wand} onClick={() => onFix(fix)}>
+              {fix.label}
+            </Button>
+          )}
+          {onAddStitch && problem.code === 'unknown-word' && (
+            <Button small icon={Plus} onClick={() => onAddStitch(problem)}>
+              Add it as a stitch of your own
+            </Button>
+          )}
+        </div>
       </div>
     </li>
   );

@@ -3,8 +3,13 @@ import type { Terms } from '../../../lib/pattern/reading';
 import type { MotifSides } from '../../../lib/motifs/motif';
 import type { GaugeSwatch } from '../../../lib/swatches/swatchRecord';
 import type { Units } from '../../../lib/units/display';
+import type { PresentedOwnStitch } from '../../../schemas/ownStitch';
 import { Button } from '../../ui/Button';
+import { Disclosure } from '../../ui/Disclosure';
 import { Field } from '../../ui/Field';
+import { OwnStitchesPanel } from '../stitches/OwnStitchesPanel';
+import { useOwnStitches } from '../stitches/useOwnStitches';
+import { WithQueries } from '../WithQueries';
 import { PatternEditor } from './PatternEditor';
 import { usePatternDraft } from './usePatternDraft';
 
@@ -17,14 +22,29 @@ export interface ExamplePattern {
 
 interface ReadPageProps {
   example: ExamplePattern;
+  /** The example was asked for: it is on the screen at once, in a draft of its own. */
+  asked: string | null;
+  signedIn: boolean;
+  stitches: PresentedOwnStitch[];
   units: Units;
   terms: Terms;
   swatches: GaugeSwatch[];
 }
 
 /** The page that reads any pattern: paste or type it, see it understood. */
-export function ReadPage({ example, units, terms, swatches }: ReadPageProps) {
-  const [draft, setDraft] = usePatternDraft({ name: '', text: '', terms, sides: 4 });
+export function ReadPage(props: ReadPageProps) {
+  return (
+    <WithQueries>
+      <Reader {...props} />
+    </WithQueries>
+  );
+}
+
+function Reader(props: ReadPageProps) {
+  const { example, asked, signedIn, units, terms, swatches } = props;
+  const empty = { name: '', text: '', terms, sides: 4 } as const;
+  const [draft, setDraft] = usePatternDraft(asked ? { ...example, terms: 'us' } : empty, asked);
+  const own = useOwnStitches({ signedIn, initial: props.stitches });
   const { name, ...pattern } = draft;
   const isEmpty = pattern.text.trim() === '';
 
@@ -46,6 +66,13 @@ export function ReadPage({ example, units, terms, swatches }: ReadPageProps) {
         {...pattern}
         {...{ name, units, swatches }}
         shownTerms={terms}
+        ownStitches={own.stitches}
+        onAddStitch={own.openWith}
+        stitchesPanel={(onInsert) => (
+          <Disclosure className="not-printed mt-5" summary={ownStitchesWord(own.stitches.length)}>
+            <OwnStitchesPanel {...own.panelProps} {...{ terms, onInsert }} />
+          </Disclosure>
+        )}
         onChange={(change) => setDraft((old) => ({ ...old, ...change }))}
         heading={
           !isEmpty && (
@@ -71,3 +98,6 @@ export function ReadPage({ example, units, terms, swatches }: ReadPageProps) {
     </>
   );
 }
+
+const ownStitchesWord = (count: number): string =>
+  count === 0 ? 'Stitches of your own' : `Stitches of your own: ${count}`;

@@ -25,7 +25,7 @@ const swatch = {
   },
 };
 const show = (motif = square, terms: 'us' | 'uk' = 'us') =>
-  render(<MotifPage motif={motif} swatches={[swatch]} units="metric" terms={terms} />);
+  render(<MotifPage isReadyMade motif={motif} swatches={[swatch]} units="metric" terms={terms} />);
 const choose = (label: string, value: string) =>
   fireEvent.change(screen.getByLabelText(label), { target: { value } });
 const rows = () =>

@@ -1,6 +1,6 @@
 import { cleanup, fireEvent, render, screen, within } from '@testing-library/react';
 import { useState } from 'react';
-import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
+import { afterEach, beforeAll, beforeEach, describe, expect, it, vi } from 'vitest';
 import {
   PatternEditor,
   type PatternChange,
@@ -8,6 +8,8 @@ import {
 import type { MotifSides, Terms } from '../../../../src/lib';
 import { stubWidth } from '../../resizeObserver';
 
+// The editor fetches its chart; fetched once here, it is there at once in every test.
+beforeAll(() => import('../../../../src/components/chart/SymbolChart'));
 beforeEach(() => stubWidth(400));
 afterEach(() => {
   cleanup();

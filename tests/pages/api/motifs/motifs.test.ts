@@ -1,5 +1,5 @@
 import { beforeEach, describe, expect, it } from 'vitest';
-import { READY_MOTIFS } from '../../../../src/lib/motifs/readyMotifs';
+import { LIBRARY_MOTIFS } from '../../../../src/lib/motifs/readyMotifs';
 import { GET, POST } from '../../../../src/pages/api/motifs';
 import * as motif from '../../../../src/pages/api/motifs/[id]';
 import type { CurrentUser } from '../../../../src/schemas/user';
@@ -19,13 +19,13 @@ describe('GET /api/motifs', () => {
   it('lists the ready-made ones to anyone', async () => {
     await buildMotif(user);
     const { status, json } = await callRoute(GET);
-    expect([status, json.total]).toEqual([200, READY_MOTIFS.length]);
+    expect([status, json.total]).toEqual([200, LIBRARY_MOTIFS.length]);
     expect(json.items[0]).toEqual({
-      key: READY_MOTIFS[0]?.key,
+      key: LIBRARY_MOTIFS[0]?.key,
       readyMade: true,
       version: null,
       updatedAt: null,
-      motif: READY_MOTIFS[0],
+      motif: LIBRARY_MOTIFS[0],
     });
   });
 
@@ -33,12 +33,12 @@ describe('GET /api/motifs', () => {
     await buildMotif(await buildUser());
     const own = await buildMotif(user);
     const { json } = await callRoute(GET, { user });
-    expect([json.total, json.items.at(-1)]).toEqual([READY_MOTIFS.length + 1, own]);
+    expect([json.total, json.items.at(-1)]).toEqual([LIBRARY_MOTIFS.length + 1, own]);
   });
 
   it('answers in pages', async () => {
     await buildMotif(user);
-    const url = `/api/motifs?limit=2&offset=${READY_MOTIFS.length - 1}`;
+    const url = `/api/motifs?limit=2&offset=${LIBRARY_MOTIFS.length - 1}`;
     const { json } = await callRoute(GET, { user, url });
     expect(json.items.map(({ readyMade }: { readyMade: boolean }) => readyMade)).toEqual([
       true,
