@@ -24,7 +24,7 @@ const desktop: Project = {
 /** Only what the width or a finger changes is tried again on a phone. */
 const phone: Project = {
   name: 'phone',
-  testMatch: /(stranger|accessibility|accounts|stash|chart)\.spec\.ts$/,
+  testMatch: /(stranger|accessibility|accounts|stash|chart|patterns)\.spec\.ts$/,
   use: { viewport: { width: 390, height: 844 }, isMobile: true, hasTouch: true },
 };
 

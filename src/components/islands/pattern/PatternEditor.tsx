@@ -3,6 +3,7 @@ import {
   Suspense,
   useCallback,
   useDeferredValue,
+  useEffect,
   useId,
   useMemo,
   useRef,
@@ -41,6 +42,8 @@ import { usePlanning } from './usePlanning';
 const SymbolChart = lazy(async () => ({
   default: (await import('../../chart/SymbolChart')).SymbolChart,
 }));
+
+const DRAWING = <p className="min-h-130 text-ink-2">Drawing the chart …</p>;
 
 export interface PatternChange {
   text?: string;
@@ -88,6 +91,9 @@ export function PatternEditor(props: PatternEditorProps) {
   const [lit, setLit] = useState<Span | null>(null);
   const [offset, setOffset] = useState<number | null>(null);
   const [gaugeKey, setGaugeKey] = useState(swatches[0]?.id ?? 'weight-4');
+  // What is fetched later is left to the browser: streamed by the server it would need inline scripts.
+  const [isShown, setIsShown] = useState(false);
+  useEffect(() => setIsShown(true), []);
   const field = useRef<HTMLTextAreaElement>(null);
   const problemsId = useId();
   /** Terms of the texts that were rewritten, so that undoing the rewriting brings them back too. */
@@ -209,8 +215,9 @@ export function PatternEditor(props: PatternEditorProps) {
               />
             )}
           </div>
-          {!isEmpty && (
-            <Suspense fallback={<p className="min-h-130 text-ink-2">Drawing the chart …</p>}>
+          {!isEmpty && !isShown && DRAWING}
+          {!isEmpty && isShown && (
+            <Suspense fallback={DRAWING}>
               <SymbolChart
                 {...{ gauge, name, units, marked }}
                 reading={drawn}
