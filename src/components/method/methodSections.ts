@@ -1,5 +1,6 @@
 /** The parts of the method page, in the order in which a blanket is worked out. */
 export const METHOD_SECTIONS = [
+  { id: 'reading', word: 'How a pattern is read' },
   { id: 'loops', word: 'From stitches to loops' },
   { id: 'hand', word: 'The yarn in your loops' },
   { id: 'weighing', word: 'How to weigh a swatch well' },
