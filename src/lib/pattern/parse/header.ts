@@ -16,7 +16,7 @@ export interface Header {
 /** Whether a round begins here: at the beginning of a line or sentence, or with a colon after it. */
 export function isHeader(state: ParseState): boolean {
   const length = headerLength(state);
-  if (length === 0) return false;
+  if (length === 0) return isRepeatLine(state);
   if (state.at === 0) return true;
   const { kind, text } = state.last();
   if (kind === 'line') return true;
@@ -25,6 +25,13 @@ export function isHeader(state: ParseState): boolean {
     (sentence && hasColon(state, length)) || (sentence && text === '.' && hasStop(state, length))
   );
 }
+
+/** "Rep Rnd 2 two more times." on a line of its own: rounds that have no header. */
+export const isRepeatLine = (state: ParseState): boolean =>
+  state.at > 0 &&
+  state.last().kind === 'line' &&
+  state.means('repeat') &&
+  [1, 2].some((ahead) => state.means('round', ahead) || state.means('row', ahead));
 
 /** Tokens of "Rnd 1", "Rnds 3-5", "1st Rnd", "Next rnd", "R4"; 0 where none of them stands. */
 function headerLength(state: ParseState): number {

@@ -1,7 +1,7 @@
 import { PATTERN_LIMITS } from '../limits';
 import type { PatternText, RoundText, Step } from '../syntax';
 import { readAgain } from './again';
-import { readHeader, type Header } from './header';
+import { isRepeatLine, readHeader, type Header } from './header';
 import type { ParseState } from './parseState';
 import { readSteps } from './steps';
 
@@ -29,6 +29,7 @@ function readFoundation(state: ParseState): Step[] {
 function readRound(state: ParseState, before: readonly RoundText[]): RoundText {
   const first = state.at;
   const previous = before.at(-1)?.to ?? 0;
+  const isUnnumbered = isRepeatLine(state);
   const header = readHeader(state, previous);
   tellOrder(state, header, previous);
   state.note = null;
@@ -36,12 +37,14 @@ function readRound(state: ParseState, before: readonly RoundText[]): RoundText {
   state.roundsOfLine = Math.max(1, header.to - header.from + 1);
   state.skipLines();
   const again = readAgain(state, previous);
+  const to =
+    isUnnumbered && again ? previous + again.times * (again.to - again.from + 1) : header.to;
   const steps = readSteps(state, null);
   const note = state.note as RoundText['note'];
   return {
-    kind: header.kind,
+    kind: (isUnnumbered && before.at(-1)?.kind) || header.kind,
     from: header.from,
-    to: Math.min(header.to, header.from + PATTERN_LIMITS.rounds),
+    to: Math.min(to, header.from + PATTERN_LIMITS.rounds),
     header: header.span,
     side: header.side,
     colour: header.colour,
