@@ -9,6 +9,7 @@ export const POST = handle({
   description:
     'Anyone may ask; nothing is kept. Works the rounds of a motif as they are written and says what is wrong and where. ' +
     'Stitches are counted by their US abbreviation in either terms: made is what the hook makes, tally what the pattern counts. ' +
+    'Stitches of your own, by their moves, are counted by their abbreviation. ' +
     'Line and column count from 1; begin and end of a fix are offsets in the text. A right pattern has no error and no warning.',
   who: 'anyone',
   stateless: true,
@@ -16,5 +17,6 @@ export const POST = handle({
   body: patternReadInput,
   response: patternReadingSchema,
   example: { body: PATTERN_EXAMPLE },
-  run: ({ body }) => presentReading(readPattern(body.text, body)),
+  run: ({ body: { text, stitches, ...how } }) =>
+    presentReading(readPattern(text, { ...how, ownStitches: stitches })),
 });

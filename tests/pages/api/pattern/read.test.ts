@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { POST } from '../../../../src/pages/api/pattern/read';
 import { patternReadingSchema } from '../../../../src/schemas/pattern';
-import { PATTERN_EXAMPLE } from '../../../../src/server/examples';
+import { PATTERN_EXAMPLE, STITCH_EXAMPLE } from '../../../../src/server/examples';
 import { callRoute } from '../../../support/callRoute';
 import { expectFieldErrors } from '../../../support/refusals';
 
@@ -36,6 +36,19 @@ describe('POST /api/pattern/read', () => {
       tally: { dc: 12 },
     });
     expect(json.diagnostics).toEqual([]);
+  });
+
+  it('reads stitches of one’s own by their moves, and the size asked for', async () => {
+    const text = 'Rnd 1: Ch 3 (counts as dc), 10 (12) lst in magic ring; join. (1 dc, 10 (12) lst)';
+    const { json } = await read({
+      ...{ text, terms: 'us', sides: 0, size: 1 },
+      stitches: [STITCH_EXAMPLE],
+    });
+    expect(json.diagnostics).toEqual([]);
+    expect(json.rounds[0]).toMatchObject({
+      made: { ch: 3, lst: 12, 'sl st': 1 },
+      tally: { dc: 1, lst: 12 },
+    });
   });
 
   it('says what is wrong and where, and what would put it right', async () => {
@@ -77,7 +90,19 @@ describe('POST /api/pattern/read', () => {
         change: { sides: '4' },
         fields: { sides: 'Sides of a motif must be one of 0, 3, 4, 6, 8' },
       },
-      { change: { stitches: [] }, fields: { '': 'Pattern has no field named stitches' } },
+      { change: { size: 20 }, fields: { size: 'Size must be at most 19' } },
+      { change: { stitches: 'lst' }, fields: { stitches: 'Own stitches must be a list' } },
+      {
+        change: { stitches: [STITCH_EXAMPLE, STITCH_EXAMPLE] },
+        fields: { stitches: 'Own stitches must each have an abbreviation of their own' },
+      },
+      {
+        change: { stitches: [{ ...STITCH_EXAMPLE, abbreviation: 'L' }] },
+        fields: {
+          'stitches.0.abbreviation': 'Abbreviation must be two or more small letters, such as lst',
+        },
+      },
+      { change: { hook: 4 }, fields: { '': 'Pattern has no field named hook' } },
     ]);
   });
 
