@@ -1,4 +1,4 @@
-import { UniqueConstraintError, type Transaction } from 'sequelize';
+import type { Transaction } from 'sequelize';
 import { Colourway, Yarn } from '../../../db/models';
 import { KEPT_LIMITS } from '../../schemas/limits';
 import type { CurrentUser } from '../../schemas/user';
@@ -6,6 +6,7 @@ import type { ColourwayInput, PresentedColourway } from '../../schemas/yarn';
 import { owns } from '../policies/own';
 import { invalid } from '../parseParts';
 import { presentColourway } from '../presenters/yarn';
+import { unlessTaken } from './unlessTaken';
 
 export async function createColourway(
   user: CurrentUser,
@@ -19,16 +20,12 @@ export async function createColourway(
     throw invalid({ yarnId: `This yarn has ${kept} colourways, the most there can be` });
   }
   return presentColourway(
-    await onceByName(Colourway.create({ ownerId: user.id, yarnId, name, hex }, { transaction })),
+    await unlessTaken(
+      Colourway.create({ ownerId: user.id, yarnId, name, hex }, { transaction }),
+      NAME_TAKEN,
+    ),
   );
 }
 
-/** The database keeps names unique within a yarn; this says so beside the field. */
-export async function onceByName(saving: Promise<Colourway>): Promise<Colourway> {
-  try {
-    return await saving;
-  } catch (error) {
-    if (!(error instanceof UniqueConstraintError)) throw error;
-    throw invalid({ name: 'This yarn has a colourway of that name already' });
-  }
-}
+/** The database keeps names unique within a yarn. */
+export const NAME_TAKEN = { name: 'This yarn has a colourway of that name already' };

@@ -7,7 +7,8 @@ import { owns } from '../policies/own';
 import { invalid } from '../parseParts';
 import { getLot } from '../queries/stash';
 import { requireRoom } from './requireRoom';
-import { lotColumns, onceByCode, replacePartSkeins } from './saveLot';
+import { LOT_TAKEN, lotColumns, replacePartSkeins } from './saveLot';
+import { unlessTaken } from './unlessTaken';
 
 export async function createLot(
   user: CurrentUser,
@@ -19,8 +20,9 @@ export async function createLot(
   if (!colourway || !owns(user, colourway)) {
     throw invalid({ colourwayId: 'You have no such colourway' });
   }
-  const row = await onceByCode(
+  const row = await unlessTaken(
     DyeLot.create({ ownerId: user.id, colourwayId, ...lotColumns(input) }, { transaction }),
+    LOT_TAKEN,
   );
   await replacePartSkeins(row, input.partSkeins, transaction);
   return getLot(user, row.id, transaction);

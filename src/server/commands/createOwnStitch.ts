@@ -5,7 +5,8 @@ import type { OwnStitchInput, PresentedOwnStitch } from '../../schemas/ownStitch
 import type { CurrentUser } from '../../schemas/user';
 import { presentOwnStitch } from '../presenters/ownStitch';
 import { requireRoom } from './requireRoom';
-import { onceByAbbreviation, ownStitchColumns, requireFreeWord } from './saveOwnStitch';
+import { ownStitchColumns, requireFreeWord, STITCH_TAKEN } from './saveOwnStitch';
+import { unlessTaken } from './unlessTaken';
 
 export async function createOwnStitch(
   user: CurrentUser,
@@ -15,5 +16,7 @@ export async function createOwnStitch(
   await requireRoom(OwnStitchRow, user, KEPT_LIMITS.stitches, 'stitches', transaction);
   requireFreeWord(input);
   const columns = { ownerId: user.id, ...ownStitchColumns(input) };
-  return presentOwnStitch(await onceByAbbreviation(OwnStitchRow.create(columns, { transaction })));
+  return presentOwnStitch(
+    await unlessTaken(OwnStitchRow.create(columns, { transaction }), STITCH_TAKEN),
+  );
 }

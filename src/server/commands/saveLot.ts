@@ -1,4 +1,4 @@
-import { UniqueConstraintError, type Transaction } from 'sequelize';
+import type { Transaction } from 'sequelize';
 import { Colourway, PartSkein, type DyeLot } from '../../../db/models';
 import type { LotInput } from '../../schemas/stash';
 import { invalid } from '../parseParts';
@@ -13,15 +13,8 @@ export function lotColumns(input: Omit<LotInput, 'colourwayId'>) {
   };
 }
 
-/** The database keeps lot codes unique within a colourway; this says so beside the field. */
-export async function onceByCode(saving: Promise<DyeLot>): Promise<DyeLot> {
-  try {
-    return await saving;
-  } catch (error) {
-    if (!(error instanceof UniqueConstraintError)) throw error;
-    throw invalid({ lotCode: 'This dye lot of this colourway is in your stash already' });
-  }
-}
+/** The database keeps lot codes unique within a colourway. */
+export const LOT_TAKEN = { lotCode: 'This dye lot of this colourway is in your stash already' };
 
 /** A part skein can weigh no more than a whole one. */
 export async function replacePartSkeins(

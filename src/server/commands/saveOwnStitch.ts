@@ -1,5 +1,3 @@
-import { UniqueConstraintError } from 'sequelize';
-import type { OwnStitchRow } from '../../../db/models';
 import { isTakenWord } from '../../lib/pattern';
 import type { OwnStitchInput } from '../../schemas/ownStitch';
 import { invalid } from '../parseParts';
@@ -15,12 +13,7 @@ export function requireFreeWord({ abbreviation }: OwnStitchInput): void {
   }
 }
 
-/** The database keeps abbreviations unique; this says so beside the field. */
-export async function onceByAbbreviation(saving: Promise<OwnStitchRow>): Promise<OwnStitchRow> {
-  try {
-    return await saving;
-  } catch (error) {
-    if (!(error instanceof UniqueConstraintError)) throw error;
-    throw invalid({ abbreviation: 'You have a stitch of that abbreviation already' });
-  }
-}
+/** The database keeps abbreviations unique. */
+export const STITCH_TAKEN = {
+  abbreviation: 'You have a stitch of that abbreviation already',
+};

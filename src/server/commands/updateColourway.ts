@@ -4,8 +4,9 @@ import type { CurrentUser } from '../../schemas/user';
 import type { PresentedColourway } from '../../schemas/yarn';
 import { presentColourway } from '../presenters/yarn';
 import { lockOwn } from '../queries/own';
-import { onceByName } from './createColourway';
+import { NAME_TAKEN } from './createColourway';
 import { requireVersion } from './requireVersion';
+import { unlessTaken } from './unlessTaken';
 
 export async function updateColourway(
   user: CurrentUser,
@@ -16,6 +17,6 @@ export async function updateColourway(
   const row = await lockOwn(Colourway, user, id, transaction);
   await requireVersion(row, version, () => presentColourway(row));
   return presentColourway(
-    await onceByName(row.update({ name, hex, version: version + 1 }, { transaction })),
+    await unlessTaken(row.update({ name, hex, version: version + 1 }, { transaction }), NAME_TAKEN),
   );
 }

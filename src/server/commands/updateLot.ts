@@ -5,7 +5,8 @@ import type { CurrentUser } from '../../schemas/user';
 import { lockOwn } from '../queries/own';
 import { getLot } from '../queries/stash';
 import { requireVersion } from './requireVersion';
-import { lotColumns, onceByCode, replacePartSkeins } from './saveLot';
+import { LOT_TAKEN, lotColumns, replacePartSkeins } from './saveLot';
+import { unlessTaken } from './unlessTaken';
 
 export async function updateLot(
   user: CurrentUser,
@@ -15,7 +16,10 @@ export async function updateLot(
 ): Promise<PresentedLot> {
   const row = await lockOwn(DyeLot, user, id, transaction);
   await requireVersion(row, version, () => getLot(user, id, transaction));
-  await onceByCode(row.update({ ...lotColumns(input), version: version + 1 }, { transaction }));
+  await unlessTaken(
+    row.update({ ...lotColumns(input), version: version + 1 }, { transaction }),
+    LOT_TAKEN,
+  );
   await replacePartSkeins(row, input.partSkeins, transaction);
   return getLot(user, id, transaction);
 }

@@ -5,7 +5,8 @@ import type { CurrentUser } from '../../schemas/user';
 import { presentOwnStitch } from '../presenters/ownStitch';
 import { lockOwn } from '../queries/own';
 import { requireVersion } from './requireVersion';
-import { onceByAbbreviation, ownStitchColumns, requireFreeWord } from './saveOwnStitch';
+import { ownStitchColumns, requireFreeWord, STITCH_TAKEN } from './saveOwnStitch';
+import { unlessTaken } from './unlessTaken';
 
 export async function updateOwnStitch(
   user: CurrentUser,
@@ -17,5 +18,5 @@ export async function updateOwnStitch(
   await requireVersion(row, version, () => presentOwnStitch(row));
   requireFreeWord(input);
   const columns = { ...ownStitchColumns(input), version: version + 1 };
-  return presentOwnStitch(await onceByAbbreviation(row.update(columns, { transaction })));
+  return presentOwnStitch(await unlessTaken(row.update(columns, { transaction }), STITCH_TAKEN));
 }

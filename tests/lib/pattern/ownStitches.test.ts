@@ -12,15 +12,9 @@ import { layoutChart } from '../../../src/lib/chart/layoutChart';
 import { gaugeOf } from '../../../src/lib/gauge/gauge';
 import { withMotif } from '../../../src/lib/plan/edits';
 import { planSchema } from '../../../src/schemas/plan';
+import { LONG_STITCH } from '../../support/longStitch';
 
-const lst: OwnStitch = {
-  abbreviation: 'lst',
-  name: 'long stitch',
-  moves: { wraps: 1, draws: 1, throughs: 3 },
-  heightOverWidth: null,
-  takes: 1,
-  symbol: null,
-};
+const lst = LONG_STITCH;
 /** Gathers two stitches. */
 const xst: OwnStitch = {
   ...lst,

@@ -5,18 +5,14 @@ import { useOwnStitches } from '../../../../src/components/islands/stitches/useO
 import { WithQueries } from '../../../../src/components/islands/WithQueries';
 import type { OwnStitch } from '../../../../src/lib/pattern';
 import type { PresentedOwnStitch } from '../../../../src/schemas/ownStitch';
+import { LONG_STITCH } from '../../../support/longStitch';
 import { stubWidth } from '../../resizeObserver';
 
 const lst: PresentedOwnStitch = {
   id: '3f1d9d6e-58b2-4f0e-9a3c-6d2b8f0a7c41',
   version: 1,
   updatedAt: '2026-11-08T10:00:00.000Z',
-  abbreviation: 'lst',
-  name: 'long stitch',
-  moves: { wraps: 1, draws: 1, throughs: 3 },
-  heightOverWidth: null,
-  takes: 1,
-  symbol: null,
+  ...LONG_STITCH,
 };
 const { id: _id, version: _version, updatedAt: _updatedAt, ...content } = lst;
 
