@@ -18,13 +18,18 @@ type Project = NonNullable<PlaywrightTestConfig['projects']>[number];
 
 const desktop: Project = {
   name: 'desktop',
+  grepInvert: /@touch/,
   use: { viewport: { width: 1280, height: 800 } },
 };
 
-/** Only what the width or a finger changes is tried again on a phone. */
+/**
+ * Only what the width or a finger changes is tried again on a phone: of these files all but the tests
+ * tagged @desktop. A test tagged @touch needs fingers.
+ */
 const phone: Project = {
   name: 'phone',
   testMatch: /(stranger|accessibility|accounts|stash|chart|patterns)\.spec\.ts$/,
+  grepInvert: /@desktop/,
   use: { viewport: { width: 390, height: 844 }, isMobile: true, hasTouch: true },
 };
 
