@@ -14,6 +14,8 @@ export { MOTIF_SIDES } from './motifs/motif';
 export { LIBRARY_MOTIFS, READY_MOTIFS, readyMotif } from './motifs/readyMotifs';
 export { READY_PATTERNS } from './motifs/ready/readyPatterns';
 export { motifGeometry } from './motifs/geometry';
+export { measuredMotif } from './motifs/measuredMotif';
+export { madeYarn } from './motifs/madeYarn';
 // Patterns
 export * from './pattern';
 // Charts

@@ -4,11 +4,11 @@ import { knownStitch } from '../stitches/stitchTable';
 import { expectedStitchWidthMm } from '../yarnCategories';
 
 /** Spread of a height over width that was not measured (published tables differ by about this). */
-const UNMEASURED_HEIGHT_SPREAD = 0.08;
+export const UNMEASURED_HEIGHT_SPREAD = 0.08;
 /** Spread of a height that was measured on a swatch: ours. */
 const MEASURED_HEIGHT_SPREAD = 0.03;
 /** Spread of a width taken from the yarn category alone: half its gauge range, roughly; ours. */
-const UNMEASURED_WIDTH_SPREAD = 0.12;
+export const UNMEASURED_WIDTH_SPREAD = 0.12;
 
 /** Stitch dimensions of one maker's hand in one yarn. */
 export interface Gauge {

@@ -6,7 +6,7 @@ export const FLAT_FULLNESS = [0.92, 1.08] as const;
 /** Radius of a magic ring in stitch widths: ours. */
 const MAGIC_RING_WIDTHS = 0.25;
 /** Relative standard deviation of a side measured with a tape: ours. */
-const MEASURED_SIDE_SPREAD = 0.01;
+export const MEASURED_SIDE_SPREAD = 0.01;
 
 export interface RoundGeometry {
   readonly label: string;
@@ -86,12 +86,17 @@ export function ringRadiusMm(motif: Motif, gauge: Gauge): number {
     : (motif.ring.chains * chainLengthMm(gauge)) / (2 * Math.PI);
 }
 
-function fullnessOf(motif: Motif, round: MotifRound, apothemMm: number, gauge: Gauge): number {
-  const { stitchWidthMm } = gauge;
-  if (motif.sides === 0) return (round.perSide * stitchWidthMm) / (2 * Math.PI * apothemMm);
+/** Side by its stitches over side by its height, after a round of this apothem. */
+export function fullnessOf(
+  { sides }: Pick<Motif, 'sides'>,
+  round: Pick<MotifRound, 'perSide'>,
+  apothemMm: number,
+  { stitchWidthMm }: Pick<Gauge, 'stitchWidthMm'>,
+): number {
+  if (sides === 0) return (round.perSide * stitchWidthMm) / (2 * Math.PI * apothemMm);
   // One stitch width for the two half corners of the side.
   const byStitchesMm = (round.perSide + 1) * stitchWidthMm;
-  return byStitchesMm / (2 * apothemMm * Math.tan(Math.PI / motif.sides));
+  return byStitchesMm / (2 * apothemMm * Math.tan(Math.PI / sides));
 }
 
 /** Rounds of one stitch err together; different stitches err apart. */
@@ -106,7 +111,7 @@ function heightSdMm(motif: Motif, gauge: Gauge): number {
 }
 
 /** The first rounds are small enough to be pulled flat: a third round must agree. */
-function troubleOf(rounds: readonly RoundGeometry[]): MotifGeometry['trouble'] {
+export function troubleOf(rounds: readonly RoundGeometry[]): MotifGeometry['trouble'] {
   const [least, most] = FLAT_FULLNESS;
   const bad = ({ fullness }: RoundGeometry): boolean => fullness < least || fullness > most;
   const last = rounds.at(-1);
