@@ -39,7 +39,7 @@ export interface MadeYarn {
  * The motif is worked to its last round: cut it to the rounds that were made.
  *
  * Example: 4 motifs of 100 loops each at 8 mm a stitch, 4.4 g a motif at 1 m/g on a scale to 0.1 g:
- * from 4.385 m give or take 0.858 m to 4.400 m give or take 0.110 m (one standard deviation).
+ * from 4.385 m give or take 0.858 m to 4.400 m give or take 0.109 m (one standard deviation).
  */
 export function madeYarn(
   motif: Motif,

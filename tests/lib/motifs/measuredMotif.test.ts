@@ -1,5 +1,5 @@
 import fc from 'fast-check';
-import { create, all } from 'mathjs';
+import * as math from 'mathjs';
 import { describe, expect, it } from 'vitest';
 import { DomainError } from '../../../src/lib/errors';
 import { gaugeOf, type Gauge } from '../../../src/lib/gauge/gauge';
@@ -140,7 +140,6 @@ describe('measuredMotif', () => {
   });
 
   it('agrees with the same posterior by mathjs, in heights and with full covariances', () => {
-    const math = create(all);
     const heightsMm = groupSquare.rounds.map((round) => roundHeightMm(round, gauge));
     const means = [ringRadiusMm(groupSquare, gauge), ...heightsMm];
     const prior = means.map((_, i) =>
@@ -159,20 +158,25 @@ describe('measuredMotif', () => {
     const gain = math.multiply(
       prior,
       math.transpose(design),
-      math.inv(math.add(math.multiply(design, prior, math.transpose(design)), noise)),
+      math.inv(
+        math.add(math.multiply(math.multiply(design, prior), math.transpose(design)), noise),
+      ),
     );
     const surprise = math.subtract(
       sizes.map(({ acrossMm }) => acrossMm),
       math.multiply(design, means),
     );
     const expected = math.add(means, math.multiply(gain, surprise)) as unknown as number[];
-    const left = math.subtract(prior, math.multiply(gain, design, prior)) as unknown as number[][];
+    const left = math.subtract(
+      prior,
+      math.multiply(math.multiply(gain, design), prior),
+    ) as unknown as number[][];
     const measured = measuredMotif(groupSquare, gauge, sizes);
     measured.rounds.forEach(({ heightMm, acrossMm, acrossSdMm }, i) => {
       expect(heightMm).toBeCloseTo(expected[i + 1] as number, 9);
       const row = means.map((_, j) => (j <= i + 1 ? 2 : 0));
       expect(acrossMm).toBeCloseTo(math.dot(row, expected), 9);
-      const variance = math.dot(row, math.multiply(left, row) as unknown as number[]);
+      const variance = math.dot(row, math.multiply(left, row));
       expect(acrossSdMm).toBeCloseTo(Math.sqrt(variance), 9);
     });
   });
