@@ -6,7 +6,9 @@ import { BlanketRevision, init as initBlanketRevision } from './BlanketRevision'
 import { Colourway, init as initColourway } from './Colourway';
 import { DyeLot, init as initDyeLot } from './DyeLot';
 import { EmailToken, init as initEmailToken } from './EmailToken';
+import { MadeMotifRow, init as initMadeMotifRow } from './MadeMotifRow';
 import { MotifRow, init as initMotifRow } from './MotifRow';
+import { MotifVersion, init as initMotifVersion } from './MotifVersion';
 import { OwnStitchRow, init as initOwnStitchRow } from './OwnStitchRow';
 import { PartSkein, init as initPartSkein } from './PartSkein';
 import { ShoppingList, init as initShoppingList } from './ShoppingList';
@@ -24,7 +26,9 @@ for (const init of [
   initColourway,
   initDyeLot,
   initEmailToken,
+  initMadeMotifRow,
   initMotifRow,
+  initMotifVersion,
   initOwnStitchRow,
   initPartSkein,
   initShoppingList,
@@ -59,7 +63,9 @@ export {
   Colourway,
   DyeLot,
   EmailToken,
+  MadeMotifRow,
   MotifRow,
+  MotifVersion,
   OwnStitchRow,
   PartSkein,
   sequelize,

@@ -1,12 +1,15 @@
 import type { Transaction } from 'sequelize';
 import blankets from '../../data/demo/blankets.json';
 import motifs from '../../data/demo/motifs.json';
+import ownStitches from '../../data/demo/ownStitches.json';
 import demo from '../../data/demo/people.json';
 import stash from '../../data/demo/stash.json';
 import swatches from '../../data/demo/swatches.json';
 import yarns from '../../data/demo/yarns.json';
 import { blanketInput } from '../../src/schemas/blanket';
+import type { Motif } from '../../src/lib/motifs/motif';
 import { motifInput } from '../../src/schemas/motif';
+import { ownStitchInput } from '../../src/schemas/ownStitch';
 import { preferencesSchema } from '../../src/schemas/preferences';
 import { roleSchema } from '../../src/schemas/roles';
 import { lotInput } from '../../src/schemas/stash';
@@ -17,10 +20,12 @@ import { createBlanket } from '../../src/server/commands/createBlanket';
 import { createColourway } from '../../src/server/commands/createColourway';
 import { createLot } from '../../src/server/commands/createLot';
 import { createMotif } from '../../src/server/commands/createMotif';
+import { createOwnStitch } from '../../src/server/commands/createOwnStitch';
 import { createShoppingList } from '../../src/server/commands/createShoppingList';
 import { createSwatch } from '../../src/server/commands/createSwatch';
 import { createYarn } from '../../src/server/commands/createYarn';
 import { updateBlanket } from '../../src/server/commands/updateBlanket';
+import { updateMotif } from '../../src/server/commands/updateMotif';
 import { hashPassword } from '../../src/server/passwordHash';
 import { sequelize, User, UserRole } from '../models';
 import { demoPlan } from './demoPlan';
@@ -90,10 +95,30 @@ async function furnish(user: CurrentUser, person: Person, transaction: Transacti
     const input = swatchInput.parse({ yarnId: yarnIds.get(yarn), ...swatch });
     await createSwatch(user, input, transaction);
   }
-  for (const motif of ofOwner<unknown>(motifs, person)) {
-    await createMotif(user, motifInput.parse(motif), transaction);
+  for (const stitch of ofOwner<unknown>(ownStitches, person)) {
+    await createOwnStitch(user, ownStitchInput.parse(stitch), transaction);
   }
-  for (const blanket of ownBlankets) await addBlanket(user, blanket, transaction);
+  const ownMotifs: (Motif | null)[] = [];
+  for (const { saves } of ofOwner<{ saves: unknown[] }>(motifs, person)) {
+    ownMotifs.push(...(await addMotif(user, saves, transaction)));
+  }
+  for (const blanket of ownBlankets) await addBlanket(user, blanket, ownMotifs, transaction);
+}
+
+/** Every save of a motif, the first and those after it. */
+async function addMotif(
+  user: CurrentUser,
+  saves: unknown[],
+  transaction: Transaction,
+): Promise<(Motif | null)[]> {
+  const [first, ...later] = saves.map((save) => motifInput.parse(save));
+  const saved = [await createMotif(user, first!, transaction)];
+  for (const input of later) {
+    const { key, version } = saved.at(-1)!;
+    const update = { ...input, version: version ?? 1 };
+    saved.push(await updateMotif(user, key, update, transaction));
+  }
+  return saved.map(({ motif }) => motif);
 }
 
 type DemoBlanket = Parameters<typeof demoPlan>[0] & {
@@ -106,9 +131,10 @@ type DemoBlanket = Parameters<typeof demoPlan>[0] & {
 async function addBlanket(
   user: CurrentUser,
   { title, earlier = [], shoppingList, ...blanket }: DemoBlanket,
+  ownMotifs: readonly (Motif | null)[],
   transaction: Transaction,
 ): Promise<void> {
-  const plan = demoPlan(blanket);
+  const plan = demoPlan(blanket, ownMotifs);
   const [first, ...later] = [...earlier, title].map((each) =>
     blanketInput.parse({ title: each, plan }),
   );

@@ -1,18 +1,23 @@
 import yarns from '../../data/demo/yarns.json';
+import type { Motif } from '../../src/lib/motifs/motif';
 import { readyMotif } from '../../src/lib/motifs/readyMotifs';
 
 interface DemoBlanket {
   yarn: string;
   /** Colourways of the yarn; their keys are c1, c2 and so on. */
   colours: string[];
-  motif: { ready: string; rounds: number };
+  /** A ready-made one, or a save of one's own. */
+  motif: { ready: string; rounds: number } | { own: string; version: number };
   /** Colour keys of the rounds, a list for each colourway. */
   roundColours: string[][];
   [unchanged: string]: unknown;
 }
 
 /** A plan as the demo data writes it, with its yarn, colours and motif written out. */
-export function demoPlan({ yarn, colours, motif, roundColours, ...unchanged }: DemoBlanket) {
+export function demoPlan(
+  { yarn, colours, motif, roundColours, ...unchanged }: DemoBlanket,
+  ownMotifs: readonly (Motif | null)[],
+) {
   const found = yarns.find(({ name }) => name === yarn);
   if (!found) throw new Error(`the demo data has no yarn named ${yarn}`);
   const { name, weightCategory, putUp, price, colourways } = found;
@@ -24,7 +29,11 @@ export function demoPlan({ yarn, colours, motif, roundColours, ...unchanged }: D
       name: colour,
       hex: colourways.find((colourway) => colourway.name === colour)?.hex,
     })),
-    motifs: [readyMotif(motif.ready, motif.rounds)],
+    motifs: [
+      'ready' in motif
+        ? readyMotif(motif.ready, motif.rounds)
+        : ownMotifs.find((own) => own?.name === motif.own && own.version === motif.version),
+    ],
     colourways: roundColours.map((each) => ({ motifIndex: 0, roundColours: each })),
   };
 }

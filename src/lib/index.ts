@@ -14,6 +14,9 @@ export { MOTIF_SIDES } from './motifs/motif';
 export { LIBRARY_MOTIFS, READY_MOTIFS, readyMotif } from './motifs/readyMotifs';
 export { READY_PATTERNS } from './motifs/ready/readyPatterns';
 export { motifGeometry } from './motifs/geometry';
+export { motifKind, type MotifKind } from './motifs/motifKind';
+export { motifYarnM } from './motifs/motifYarn';
+export { motifChanges, type MotifChanges } from './motifs/motifChanges';
 export { measuredMotif } from './motifs/measuredMotif';
 export { madeYarn } from './motifs/madeYarn';
 // Patterns

@@ -1,5 +1,5 @@
 import * as z from './zod';
-import { choice, listQuery, moment, name, strict, uuid, version } from './fields';
+import { choice, listQuery, moment, name, strict, version } from './fields';
 import { KEPT_LIMITS } from './limits';
 import { planSchema } from './plan';
 
@@ -62,13 +62,3 @@ export type PresentedRevision = z.output<typeof revisionSchema>;
 
 export const revisionWithPlanSchema = revisionSchema.extend({ plan: planSchema });
 export type RevisionWithPlan = z.input<typeof revisionWithPlanSchema>;
-
-export const revisionParams = z.strictObject({
-  id: uuid,
-  version: z
-    .string()
-    .regex(/^[1-9]\d{0,8}$/, 'Version must be a whole number')
-    .transform(Number),
-});
-/** Restoring an older save begins from the version the person sees now. */
-export const restoreInput = strict('Restore', { version });

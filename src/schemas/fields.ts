@@ -121,6 +121,17 @@ export const keyParams = z.strictObject({ id: name('Key', PLAN_LIMITS.keyLength)
 /** Number of the save that an edit began from; an edit that began from an older one is refused. */
 export const version = counted('Version', 1, 2_147_483_647);
 
+/** `/[id]/…/[version]`: one save of a row. */
+export const saveParams = z.strictObject({
+  id: uuid,
+  version: z
+    .string()
+    .regex(/^[1-9]\d{0,8}$/, 'Version must be a whole number')
+    .transform(Number),
+});
+/** Restoring an older save begins from the version the person sees now. */
+export const restoreInput = strict('Restore', { version });
+
 /** A calendar day, "2026-11-30". */
 export const day = z.iso.date({ error: 'Date must be a day such as 2026-11-30' });
 

@@ -1,79 +1,62 @@
 import * as z from './zod';
 import { MOTIF_SIDES } from '../lib/motifs/motif';
-import { choice, counted, list, moment, name, strict, version } from './fields';
-import { PLAN_LIMITS } from './limits';
-import { knownStitch, stitchCounts } from './stitchCounts';
+import { PATTERN_LIMITS } from '../lib/pattern/limits';
+import { choice, counted, moment, name, strict, version } from './fields';
+import { KEPT_LIMITS } from './limits';
+import { ownStitches } from './ownStitch';
+import { patternText } from './pattern';
+import { motifSchema } from './workedMotif';
 
-const { stitchesPerRound } = PLAN_LIMITS;
+/** Characters that are on no page and in no database: a PDF leaves some behind. */
+const INVISIBLE = /(?![\n\t])[\p{Cc}\p{Cs}]/gu;
 
-const loopHeight = strict('Chain loop', {
-  chains: counted('Chains of a loop', 1, PLAN_LIMITS.chainsPerLoop),
-  gapStitches: counted('Stitches spanned by a loop', 0, PLAN_LIMITS.gapStitches),
-});
-
-const spaces = z
-  .record(
-    name('Kind of space', PLAN_LIMITS.keyLength),
-    counted('Spaces of a round', 0, stitchesPerRound),
-    { error: 'Spaces must be counts by kind' },
-  )
-  .refine((counted) => Object.keys(counted).length <= PLAN_LIMITS.spaceKinds, {
-    error: `Spaces must be of at most ${PLAN_LIMITS.spaceKinds} kinds`,
-  });
-
-const roundSchema = strict('Round', {
-  label: name('Name of a round'),
-  made: stitchCounts('Stitches made', stitchesPerRound),
-  travel: stitchCounts('Stitches to travel', stitchesPerRound),
-  tally: stitchCounts('Stitches counted', stitchesPerRound),
-  spaces,
-  cornerSpace: name('Space of a corner', PLAN_LIMITS.keyLength).nullable(),
-  perSide: counted('Stitches of a side', 0, stitchesPerRound),
-  height: z.union([knownStitch, loopHeight], {
-    error: 'Height of a round must be a stitch such as dc, or chain loops',
-  }),
-}).superRefine((round, context) => {
-  for (const [code, count] of Object.entries(round.travel)) {
-    const made = round.made[code] ?? 0;
-    if (count > made) {
-      const message = `${round.label} travels over ${count} ${code} but makes only ${made}`;
-      context.addIssue({ code: 'custom', path: ['travel', code], message });
-    }
-  }
-  if (round.cornerSpace !== null && round.spaces[round.cornerSpace] === undefined) {
-    const message = `${round.label} has no ${round.cornerSpace} space for its corners`;
-    context.addIssue({ code: 'custom', path: ['cornerSpace'], message });
-  }
-});
-
-const motifFields = {
+/** A motif of one's own as it is written; the server works its rounds. */
+const patternFields = {
   name: name('Motif name'),
+  text: patternText.transform((text) => text.replaceAll('\r\n', '\n').replace(INVISIBLE, ' ')),
+  terms: choice('Terms', ['us', 'uk']),
   sides: choice('Sides of a motif', MOTIF_SIDES),
-  ring: strict('Ring', {
-    chains: counted('Chains of the ring', 0, stitchesPerRound),
-    made: stitchCounts('Stitches of the ring', stitchesPerRound),
-  }),
-  rounds: list('Rounds of a motif', roundSchema, 1, PLAN_LIMITS.roundsPerMotif),
+  /** Which of the sizes "10 (12, 14)"; 0 is the first. */
+  size: counted('Size', 0, PATTERN_LIMITS.sizes - 1),
+  /** The stitches of one's own that the text uses. */
+  stitches: ownStitches(KEPT_LIMITS.stitchesPerMotif),
 };
 
-/** A motif as rounds of counted stitches, as a plan holds it; plans kept before motifs had versions name none. */
-export const motifSchema = strict('Motif', {
-  key: name('Key of a motif', PLAN_LIMITS.keyLength),
-  version: version.nullable().default(null),
-  ...motifFields,
-});
-
-/** A motif of one's own as it is sent; its key is the id it is kept under. */
-export const motifInput = strict('Motif', motifFields);
+export const motifInput = strict('Motif', patternFields);
 export type MotifInput = z.output<typeof motifInput>;
-export const motifUpdate = strict('Motif', { ...motifFields, version });
+export const motifUpdate = strict('Motif', { ...patternFields, version });
 
-/** A ready-made motif has no version: it belongs to the program. */
-export const presentedMotifSchema = z.strictObject({
+const problems = z.strictObject({ errors: z.number().int(), warnings: z.number().int() });
+
+/**
+ * A motif in a list. `motif` is null where the text has no round that can be worked, or is worked in
+ * rows; a ready-made motif has no version: it belongs to the program.
+ */
+export const motifSummarySchema = z.strictObject({
   key: z.string(),
   readyMade: z.boolean(),
   version: version.nullable(),
   updatedAt: moment.nullable(),
-  motif: motifSchema,
+  name: z.string(),
+  sides: z.literal(MOTIF_SIDES),
+  motif: motifSchema.nullable(),
+  problems,
+});
+export type MotifSummary = z.output<typeof motifSummarySchema>;
+
+/** A motif with the pattern that it is worked from. */
+export const presentedMotifSchema = motifSummarySchema.extend({
+  pattern: z.strictObject(patternFields),
 });
 export type PresentedMotif = z.output<typeof presentedMotifSchema>;
+
+/** One save of a motif of one's own; `version` is its address. */
+export const motifVersionSchema = z.strictObject({
+  version,
+  name: z.string(),
+  savedAt: moment,
+  isCurrent: z.boolean(),
+  rounds: z.number().int(),
+  problems,
+});
+export type PresentedMotifVersion = z.output<typeof motifVersionSchema>;

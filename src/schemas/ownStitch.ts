@@ -1,6 +1,6 @@
 import * as z from './zod';
 import { OWN_STITCH_LIMITS, SYMBOL_BODIES } from '../lib/stitches/ownStitch';
-import { choice, counted, listOf, measured, moment, name, strict, version } from './fields';
+import { choice, counted, list, listOf, measured, moment, name, strict, version } from './fields';
 
 const { abbreviation, wraps, draws, throughs, takes, legs, bars, heightOverWidth } =
   OWN_STITCH_LIMITS;
@@ -33,6 +33,14 @@ const ownStitchFields = {
 /** A stitch of one's own by its moves; the library's `OwnStitch`. */
 export const ownStitchInput = strict('Stitch', ownStitchFields);
 export type OwnStitchInput = z.output<typeof ownStitchInput>;
+
+/** The stitches of one's own that a text may use, at most `most`, each under an abbreviation of its own. */
+export const ownStitches = (most: number) =>
+  list('Own stitches', ownStitchInput, 0, most).refine(
+    (stitches) => new Set(stitches.map((each) => each.abbreviation)).size === stitches.length,
+    'Own stitches must each have an abbreviation of their own',
+  );
+
 /** What the form of a stitch holds; its fields' ids begin with "stitch". */
 export const ownStitchForm = strict('Form', { stitch: ownStitchInput });
 export type OwnStitchForm = z.output<typeof ownStitchForm>;

@@ -1,9 +1,9 @@
 import * as z from './zod';
 import { MOTIF_SIDES } from '../lib/motifs/motif';
 import { PATTERN_LIMITS } from '../lib/pattern/limits';
-import { choice, counted, list, strict } from './fields';
+import { choice, counted, strict } from './fields';
 import { KEPT_LIMITS } from './limits';
-import { ownStitchInput } from './ownStitch';
+import { ownStitches } from './ownStitch';
 
 const inWords = new Intl.NumberFormat('en');
 
@@ -18,9 +18,6 @@ export const patternText = z
     `Pattern text must have at most ${inWords.format(PATTERN_LIMITS.textLength)} characters`,
   );
 
-const differ = (stitches: { abbreviation: string }[]): boolean =>
-  new Set(stitches.map(({ abbreviation }) => abbreviation)).size === stitches.length;
-
 /** A pattern to read, and how. */
 export const patternReadInput = strict('Pattern', {
   text: patternText,
@@ -29,9 +26,7 @@ export const patternReadInput = strict('Pattern', {
   /** Which of the sizes "10 (12, 14)"; 0 is the first. */
   size: counted('Size', 0, PATTERN_LIMITS.sizes - 1).default(0),
   /** Stitches of the writer's own, which the text may use. */
-  stitches: list('Own stitches', ownStitchInput, 0, KEPT_LIMITS.stitches)
-    .refine(differ, 'Own stitches must each have an abbreviation of their own')
-    .default([]),
+  stitches: ownStitches(KEPT_LIMITS.stitches).default([]),
 });
 export type PatternReadInput = z.input<typeof patternReadInput>;
 

@@ -3,7 +3,7 @@ import { CONFIDENCES } from '../lib/plan/plan';
 import { lengthM, massG, priceMinor, widthMm } from '../lib/units/quantities';
 import { choice, counted, hex, list, measured, name, strict } from './fields';
 import { PLAN_LIMITS, POSSIBLE } from './limits';
-import { motifSchema } from './motif';
+
 import { checkPlan } from './planChecks';
 import { checkPutUp, checkStitchSize } from './possible';
 import { currencySchema } from './preferences';
@@ -18,6 +18,7 @@ import {
   swatchStitches,
   swatchWidthMm,
 } from './swatch';
+import { motifSchema } from './workedMotif';
 import {
   colourName,
   skeinLengthM,

@@ -119,10 +119,10 @@ for (const [what, stored] of [
 
 test('an address that asks for what there is not opens with the example', async ({ page }) => {
   for (const query of [
-    'motif=<script>',
+    'swatch=<script>',
     'swatch=../../etc',
-    'motif=hexagon%00',
-    `motif=${'x'.repeat(2000)}`,
+    'swatch=hexagon%00',
+    `swatch=${'x'.repeat(2000)}`,
   ]) {
     await open(page, `/?${query}`);
     await expectFigures(page, EXAMPLE_PLAN);

@@ -1,7 +1,10 @@
 import type { Page } from '@playwright/test';
-import { signedUp } from './support/accounts';
+import type { PresentedMotif } from '../../src/schemas/motif';
+import { PLAN_EXAMPLE } from '../../src/server/examples';
+import { send, signedUp } from './support/accounts';
 import { expectAccessible, expectNoSidewaysScroll } from './support/axe';
 import { open, ready } from './support/open';
+import { group } from './support/planner';
 import { expect, test } from './support/test';
 
 /**
@@ -14,10 +17,19 @@ Rnd 2: Ch 1, sc in each of next 5 sts; join with sl st in first sc.`;
 const CIRCLE = `Rnd 1: Ch 3 (counts as dc), 11 dc in magic ring; join with sl st in top of beg ch-3. (12 dc)
 Rnd 2: Ch 3, dc in same st, 2 dc in each dc around; join with sl st in top of beg ch-3. (24 dc)`;
 
+/** Of a motif of two rounds. */
+const COLOURWAYS = [{ motifIndex: 0, roundColours: ['c1', 'c2'] }];
+
 const field = (page: Page) => page.getByLabel('Pattern text');
 const problems = (page: Page) => page.getByRole('main').getByRole('listitem');
 const terms = (page: Page, word: 'US' | 'UK') =>
   page.getByRole('radiogroup', { name: 'Terms of the text' }).getByRole('radio', { name: word });
+
+/** On a phone one of text, chart and rounds is on the screen. */
+async function panel(page: Page, name: 'Text' | 'Chart' | 'Rounds') {
+  const choice = page.getByRole('radio', { name, exact: true });
+  if (await choice.isVisible()) await choice.click();
+}
 
 /** The page with a text in it, read as a circle. */
 async function openWith(page: Page, text: string) {
@@ -102,16 +114,95 @@ test('a stitch kept in the account is there on another device', async ({ page, n
   await expect(other.getByText('Stitches of your own: 1')).toBeVisible();
 });
 
-test('a ready-made motif is opened as its pattern, and planned', async ({ page }) => {
+test('a ready-made motif shows its pattern, is planned, and keeps its name there', async ({
+  page,
+}) => {
   await open(page, '/motifs/hexagon');
-  await page.getByRole('link', { name: 'Pattern and chart' }).click();
-  await page.waitForURL('/motifs/read?from=hexagon');
-  await ready(page);
   await expect(field(page)).toHaveValue(/^Rnd 1: Ch 3 \(counts as dc\), dc in magic ring/);
-  await expect(page.getByRole('heading', { name: 'Reads without a problem' })).toBeVisible();
+  await expect(field(page)).not.toBeEditable();
   await page.getByRole('button', { name: /^Plan/ }).locator('visible=true').first().click();
   await page.waitForURL('/');
-  await expect(page.getByLabel('Pattern', { exact: true })).toHaveValue('read-pattern');
+  await ready(page);
+  const motif = group(page, 'Motif');
+  await expect(motif.getByLabel('Pattern', { exact: true })).toHaveValue('hexagon');
+  await expect(motif.getByLabel('Worked to')).toHaveValue('4');
+  await motif.getByLabel('Worked to').selectOption('5');
+  await expect(motif.getByLabel('Worked to')).toHaveValue('5');
+});
+
+test('a motif is kept, saved again, and its older version taken up', async ({ page }) => {
+  await signedUp(page);
+  await openWith(page, CIRCLE);
+  await page.getByLabel('Name of the motif').fill('Capstan');
+  await panel(page, 'Chart');
+  await page.getByRole('button', { name: 'Keep in my motifs' }).click();
+  await page.waitForURL(/\/motifs\/[0-9a-f-]{36}$/);
+  await ready(page);
+  await expect(page.getByText('Saved as version 1')).toBeVisible();
+  await expect(field(page)).toHaveValue(CIRCLE);
+
+  const more = `${CIRCLE}\nRnd 3: Ch 1, sc in each st around; join with sl st in first sc. (24 sc)`;
+  await field(page).fill(more);
+  await page.getByRole('button', { name: 'Save as version 2' }).click();
+  await expect(page.getByText('Saved as version 2')).toBeVisible();
+
+  await page.getByText('Versions: 2').click();
+  await page.getByRole('button', { name: 'What has changed' }).click();
+  await expect(page.getByRole('dialog').getByText(/Rnd 3: Ch 1/)).toBeVisible();
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Take version 1 up again' }).click();
+  await expect(page.getByText('Saved as version 3')).toBeVisible();
+  await expect(field(page)).toHaveValue(CIRCLE);
+
+  // The draft that it began as is gone: the motif holds the text.
+  await open(page, '/motifs/read');
+  await expect(field(page)).toHaveValue('');
+});
+
+test('a blanket keeps its version of a motif and says when there is a newer one', async ({
+  page,
+}) => {
+  await signedUp(page);
+  const pattern = { name: 'Capstan', text: CIRCLE, terms: 'us', sides: 0, size: 0, stitches: [] };
+  const kept = await send<PresentedMotif>(page, 'POST', '/api/motifs', pattern, 201);
+  const plan = { ...PLAN_EXAMPLE, motifs: [kept.motif], colourways: COLOURWAYS, evidence: [] };
+  const join = { key: 'whip-stitch', colour: 'c1' };
+  const blanket = await send<{ id: string }>(
+    page,
+    'POST',
+    '/api/blankets',
+    { title: 'Deck', plan: { ...plan, join } },
+    201,
+  );
+  await open(page, `/blankets/${blanket.id}`);
+  await expect(page.getByText(/^Version \d+ of/)).toHaveCount(0);
+
+  const text = CIRCLE.replace('2 dc in each dc around', '2 tr in each dc around').replace(
+    '(24 dc)',
+    '(2 dc, 22 tr)',
+  );
+  await send(page, 'PUT', `/api/motifs/${kept.key}`, { ...pattern, text, version: 1 });
+  await open(page, `/blankets/${blanket.id}`);
+  await expect(page.getByText(/^Version 2 of Capstan, saved/)).toBeVisible();
+  await expect(page.getByText(/Rnd 2 counts .*22\str instead of 24\sdc/)).toBeVisible();
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Take version 2' }).click();
+  await expect(page.getByText(/^Version 2 of Capstan/)).toHaveCount(0);
+  await page.getByRole('button', { name: 'Undo' }).click();
+  await expect(page.getByText(/^Version 2 of Capstan/)).toBeVisible();
+});
+
+test('the library is narrowed by an address', async ({ page }) => {
+  await page.goto('/motifs');
+  await page.getByLabel('Shape').selectOption('hexagon');
+  await page.getByLabel('Fabric').selectOption('openwork');
+  await page.getByRole('button', { name: 'Show', exact: true }).click();
+  await expect(page).toHaveURL(/sides=6&kind=openwork/);
+  const names = page.getByRole('main').getByRole('heading', { level: 3 });
+  await expect(names).toHaveText(['Lattice hexagon']);
+  await expectAccessible(page);
+  await page.getByRole('link', { name: 'All motifs' }).click();
+  await expect(names).toHaveCount(17);
 });
 
 test('the draft of a ready-made motif does not take the place of one’s own', async ({ page }) => {

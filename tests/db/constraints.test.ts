@@ -4,6 +4,7 @@ import {
   Blanket,
   Colourway,
   DyeLot,
+  MadeMotifRow,
   PartSkein,
   sequelize,
   ShoppingList,
@@ -19,6 +20,7 @@ import {
   buildBlanket,
   buildColourway,
   buildLot,
+  buildMadeMotif,
   buildMotif,
   buildOwnStitch,
   buildSwatch,
@@ -62,10 +64,18 @@ describe('constraints of the database itself', () => {
     ['swatch_measurements', "kind = 'colour'"],
     ['swatch_measurements', 'width_mm = null, mass_g = 3, resolution_g = 1'],
     ['motifs', 'sides = 5'],
-    ['motifs', "rounds = '[]'"],
+    ['motifs', "ring = '[]'"],
+    ['motifs', "terms = 'fr'"],
+    ['motif_versions', 'size = 20'],
+    ['motif_versions', "stitches = '{}'"],
     ['own_stitches', "abbreviation = 'Lst'"],
     ['own_stitches', 'draws = 0, throughs = 0'],
     ['own_stitches', "symbol = '[]'"],
+    ['made_motifs', 'weighed_yarns = 0'],
+    ['made_motifs', 'weighed_count = null'],
+    ['made_motifs', 'put_up_length_m = null'],
+    ['made_motifs', 'put_up_mass_g = null, put_up_length_m = null'],
+    ['made_motifs', "sizes = '{}'"],
     ['blankets', "plan = '[]'"],
     ['blankets', "title = ''"],
     ['blanket_revisions', 'version = 0'],
@@ -86,6 +96,13 @@ describe('constraints of the database itself', () => {
     const yarn = await buildYarn(await buildUser());
     const stray = { ownerId: user.id, yarnId: yarn.id, name: 'Lock Gate', hex: '#000000' };
     await expect(Colourway.create(stray)).rejects.toThrow('colourways_of_own_yarn');
+  });
+
+  it("refuse a made motif compared with another person's swatch", async () => {
+    const swatch = await buildSwatch(await buildUser());
+    const made = await buildMadeMotif(user);
+    const stray = MadeMotifRow.update({ swatchId: swatch.id }, { where: { id: made.id } });
+    await expect(stray).rejects.toThrow('made_motifs_of_own_swatch');
   });
 
   it("refuse a dye lot of another person's colourway", async () => {
@@ -122,6 +139,14 @@ describe('deleting', () => {
     expect((await Swatch.findByPk(id))?.yarnId).toBeNull();
   });
 
+  it('leaves a made motif without its swatch', async () => {
+    const swatch = await buildSwatch(user);
+    const { id } = await buildMadeMotif(user, { swatchId: swatch.id });
+    await Swatch.destroy({ where: { id: swatch.id } });
+    const made = await MadeMotifRow.findByPk(id);
+    expect([made?.swatchId, made?.ownerId]).toEqual([null, user.id]);
+  });
+
   it('leaves a shopping list without its blanket', async () => {
     const blanket = await buildBlanket(user);
     const { id } = await sequelize.transaction((transaction) =>
@@ -146,6 +171,7 @@ async function buildEverything(): Promise<void> {
   await buildLot(user, { colourwayId: colourway.id, partSkeins: [{ massG: 41 }] });
   await buildSwatch(user, { yarnId: yarn.id });
   await buildMotif(user);
+  await buildMadeMotif(user);
   await buildOwnStitch(user);
   const blanket = await buildBlanket(user);
   await sequelize.transaction(async (transaction) => {

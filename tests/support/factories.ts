@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { sequelize, User, UserRole } from '../../db/models';
 import type { PresentedBlanket } from '../../src/schemas/blanket';
+import type { MadeMotifInput, PresentedMadeMotif } from '../../src/schemas/madeMotif';
 import type { PresentedMotif } from '../../src/schemas/motif';
 import type { OwnStitchInput, PresentedOwnStitch } from '../../src/schemas/ownStitch';
 import { planSchema, type PlanInput } from '../../src/schemas/plan';
@@ -11,11 +12,17 @@ import type { PresentedColourway, PresentedYarn, YarnInput } from '../../src/sch
 import { createBlanket } from '../../src/server/commands/createBlanket';
 import { createColourway } from '../../src/server/commands/createColourway';
 import { createLot } from '../../src/server/commands/createLot';
+import { createMadeMotif } from '../../src/server/commands/createMadeMotif';
 import { createMotif } from '../../src/server/commands/createMotif';
 import { createOwnStitch } from '../../src/server/commands/createOwnStitch';
 import { createSwatch } from '../../src/server/commands/createSwatch';
 import { createYarn } from '../../src/server/commands/createYarn';
-import { MOTIF_EXAMPLE, PLAN_EXAMPLE, STITCH_EXAMPLE } from '../../src/server/examples';
+import {
+  MADE_MOTIF_EXAMPLE,
+  MOTIF_EXAMPLE,
+  PLAN_EXAMPLE,
+  STITCH_EXAMPLE,
+} from '../../src/server/examples';
 import { hashPassword } from '../../src/server/passwordHash';
 import { presentCurrentUser } from '../../src/server/presenters/user';
 import type { CurrentUser } from '../../src/schemas/user';
@@ -132,6 +139,15 @@ export const buildOwnStitch = (
 ): Promise<PresentedOwnStitch> =>
   sequelize.transaction((transaction) =>
     createOwnStitch(user, { ...STITCH_EXAMPLE, ...values }, transaction),
+  );
+
+/** A made group square, of no swatch unless one is given. */
+export const buildMadeMotif = (
+  user: CurrentUser,
+  values?: Partial<MadeMotifInput>,
+): Promise<PresentedMadeMotif> =>
+  sequelize.transaction((transaction) =>
+    createMadeMotif(user, { ...MADE_MOTIF_EXAMPLE, ...values }, transaction),
   );
 
 /** The front page's plan as JSON, with other values where given. */

@@ -1,21 +1,28 @@
 import { Palette } from 'lucide-react';
+import { lazy } from 'react';
 import type { Estimate } from '../../lib/ledger/ledger';
 import type { MotifChoice } from '../../lib/motifs/motifChoices';
 import type { Plan } from '../../lib/plan/plan';
 import { showFabric, type Units } from '../../lib/units/display';
 import { PLAN_LIMITS } from '../../schemas/limits';
 import { Button } from '../ui/Button';
+import { LoadedLater } from '../ui/LoadedLater';
 import { Select } from '../ui/Select';
+import { useIsHere } from '../ui/useIsHere';
 import { WoundCard } from '../ui/WoundCard';
 import { FabricField } from './QuantityFields';
 import { Section } from './Section';
+import type { Terms } from './stitchWord';
 import type { ChangePlan } from './usePlan';
-import { useReadyMotif } from './useReadyMotif';
+import { useMotifChoice } from './useMotifChoice';
+
+const NewerVersion = lazy(() => import('./NewerVersion'));
 
 interface MotifSectionProps {
   plan: Plan;
   estimate: Estimate;
   units: Units;
+  terms: Terms;
   change: ChangePlan;
   choices: readonly MotifChoice[];
   onColours: () => void;
@@ -23,12 +30,14 @@ interface MotifSectionProps {
 
 /** Which motif, to how many rounds, how big it came out, and in which colours. */
 export function MotifSection(props: MotifSectionProps) {
-  const { plan, estimate, units, change, choices, onColours } = props;
-  const { choose, failed } = useReadyMotif(change);
+  const { plan, estimate, units, terms, change, choices, onColours } = props;
+  const { choose, failed } = useMotifChoice(change);
+  const isHere = useIsHere();
   const motif = plan.motifs[0];
   if (!motif) return null;
-  const ready = choices.find(({ key }) => key === motif.key);
-  const rounds = ready?.rounds ?? motif.rounds.length;
+  const choice = choices.find(({ key }) => key === motif.key);
+  const rounds = choice?.rounds ?? motif.rounds.length;
+  const isBehind = motif.version !== null && motif.version !== (choice?.version ?? null);
   const computedMm = estimate.motifs[0]?.acrossMm ?? 0;
   const across =
     motif.sides === 0
@@ -43,19 +52,34 @@ export function MotifSection(props: MotifSectionProps) {
           label="Pattern"
           value={motif.key}
           error={failed ? 'This pattern could not be loaded. Try again.' : undefined}
-          onChange={(event) => choose(event.target.value, motif.rounds.length)}
+          onChange={(event) => {
+            const chosen = choices.find(({ key }) => key === event.target.value);
+            if (chosen) choose(chosen, motif.rounds.length);
+          }}
           options={[
-            ...(ready ? [] : [{ value: motif.key, word: motif.name }]),
-            ...choices.map(({ key, name }) => ({ value: key, word: name })),
+            ...(choice ? [] : [{ value: motif.key, word: motif.name }]),
+            ...choices.map(({ key, name, version }) => ({
+              value: key,
+              word: name,
+              group: version === null ? 'Ready-made' : 'Your own',
+            })),
           ]}
         />
       </div>
+      {isBehind && isHere && (
+        <div className="col-span-6">
+          <LoadedLater what="The newer version of the motif">
+            <NewerVersion {...{ plan, choice, change, terms }} />
+          </LoadedLater>
+        </div>
+      )}
       <div className="col-span-3">
         <Select
           label="Worked to"
           value={String(motif.rounds.length)}
-          disabled={!ready}
-          onChange={(event) => choose(motif.key, Number(event.target.value))}
+          disabled={!choice || isBehind}
+          hint={choice && isBehind ? `of version ${motif.version}` : undefined}
+          onChange={(event) => choice && choose(choice, Number(event.target.value))}
           options={Array.from({ length: rounds }, (_, i) => ({
             value: String(i + 1),
             word: i === 0 ? '1 round' : `${i + 1} rounds`,
@@ -87,8 +111,8 @@ export function MotifSection(props: MotifSectionProps) {
 
 /** The first colourway, round by round. */
 function RoundCards({ plan }: { plan: Plan }) {
-  const motif = plan.motifs[0];
   const colourway = plan.colourways[0];
+  const motif = plan.motifs[colourway?.motifIndex ?? 0];
   return (
     <ul
       className="col-span-6 flex flex-wrap gap-x-2 gap-y-1"
@@ -98,7 +122,7 @@ function RoundCards({ plan }: { plan: Plan }) {
         const colour = plan.colours.find((each) => each.key === key);
         const label = motif?.rounds[i]?.label ?? '';
         return (
-          <li key={label} className="text-center text-xs text-ink-2">
+          <li key={i} className="text-center text-xs text-ink-2">
             <WoundCard
               colour={colour?.hex ?? '#888888'}
               weight={plan.yarn.weightCategory}

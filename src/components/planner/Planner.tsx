@@ -81,7 +81,12 @@ export function Planner(props: PlannerProps) {
           <YarnSection {...shared} terms={terms} currency={preferences.currency} />
           <SwatchSection {...shared} terms={terms} />
           <WeighedSection {...shared} />
-          <MotifSection {...shared} choices={motifChoices} onColours={() => setSheet('colours')} />
+          <MotifSection
+            {...shared}
+            terms={terms}
+            choices={motifChoices}
+            onColours={() => setSheet('colours')}
+          />
           <BlanketSection {...shared} terms={terms} />
         </form>
         <div className="grid content-start gap-8 px-4 pt-6 pb-10 lg:px-9" data-answer>

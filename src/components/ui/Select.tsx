@@ -6,6 +6,8 @@ export interface SelectOption {
   value: string;
   word: string;
   disabled?: boolean;
+  /** Heading that it stands under, together with its neighbours of the same group. */
+  group?: string;
 }
 
 interface SelectProps extends FieldFrame, Omit<ComponentProps<'select'>, 'className' | 'children'> {
@@ -34,14 +36,34 @@ export function Select({
           aria-invalid={error ? true : undefined}
           aria-describedby={describedBy(id, hint, error)}
         >
-          {options.map(({ value, word, disabled }) => (
-            <option key={value} value={value} disabled={disabled}>
-              {word}
-            </option>
-          ))}
+          {inGroups(options).map(({ group, members }) =>
+            group === undefined ? (
+              members.map(optionOf)
+            ) : (
+              <optgroup key={group} label={group}>
+                {members.map(optionOf)}
+              </optgroup>
+            ),
+          )}
         </select>
         <ChevronDown size={16} aria-hidden className="pointer-events-none absolute right-2.5" />
       </div>
     </FieldShell>
   );
+}
+
+const optionOf = ({ value, word, disabled }: SelectOption) => (
+  <option key={value} value={value} disabled={disabled}>
+    {word}
+  </option>
+);
+
+function inGroups(options: readonly SelectOption[]) {
+  const groups: { group: string | undefined; members: SelectOption[] }[] = [];
+  for (const option of options) {
+    const last = groups.at(-1);
+    if (last && last.group === option.group) last.members.push(option);
+    else groups.push({ group: option.group, members: [option] });
+  }
+  return groups;
 }

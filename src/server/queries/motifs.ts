@@ -1,11 +1,20 @@
 import { fn, col, type Transaction } from 'sequelize';
-import { MotifRow } from '../../../db/models';
-import { LIBRARY_MOTIFS, readyMotif } from '../../lib/motifs/readyMotifs';
+import { MotifRow, MotifVersion } from '../../../db/models';
+import { layoutFor } from '../../lib/layout/layouts';
+import { motifChoices, type MotifChoice } from '../../lib/motifs/motifChoices';
+import { LIBRARY_MOTIFS } from '../../lib/motifs/readyMotifs';
 import type { ListQuery } from '../../schemas/fields';
 import { KEPT_LIMITS } from '../../schemas/limits';
-import type { PresentedMotif } from '../../schemas/motif';
+import type { MotifSummary, PresentedMotif, PresentedMotifVersion } from '../../schemas/motif';
 import type { CurrentUser } from '../../schemas/user';
-import { presentOwnMotif, presentReadyMotif } from '../presenters/motif';
+import { AppError } from '../errors';
+import {
+  presentMotifAsSaved,
+  presentMotifVersion,
+  presentOwnMotif,
+  presentOwnMotifSummary,
+  presentReadyMotif,
+} from '../presenters/motif';
 import { loadOwn } from './own';
 
 const EVERYTHING: ListQuery = { limit: KEPT_LIMITS.motifs + LIBRARY_MOTIFS.length, offset: 0 };
@@ -14,19 +23,25 @@ const EVERYTHING: ListQuery = { limit: KEPT_LIMITS.motifs + LIBRARY_MOTIFS.lengt
 export async function listMotifs(
   user: CurrentUser | null,
   { limit, offset }: ListQuery = EVERYTHING,
-): Promise<{ items: PresentedMotif[]; total: number }> {
-  const ready = LIBRARY_MOTIFS.map(presentReadyMotif);
+): Promise<{ items: MotifSummary[]; total: number }> {
+  const ready = LIBRARY_MOTIFS.flatMap(({ key }) => {
+    const presented = presentReadyMotif(key);
+    if (!presented) return [];
+    const { pattern: _text, ...summary } = presented;
+    return [summary];
+  });
   const own = user ? await ownMotifs(user) : [];
   const all = [...ready, ...own];
   return { items: all.slice(offset, offset + limit), total: all.length };
 }
 
-async function ownMotifs(user: CurrentUser): Promise<PresentedMotif[]> {
+async function ownMotifs(user: CurrentUser): Promise<MotifSummary[]> {
   const rows = await MotifRow.findAll({
+    attributes: { exclude: ['text', 'stitches'] },
     where: { ownerId: user.id },
     order: [[fn('lower', col('name')), 'ASC'], 'id'],
   });
-  return rows.map(presentOwnMotif);
+  return rows.map(presentOwnMotifSummary);
 }
 
 /** A ready-made motif by its key, or one of one's own by its id. */
@@ -35,7 +50,51 @@ export async function getMotif(
   key: string,
   transaction?: Transaction,
 ): Promise<PresentedMotif> {
-  const ready = readyMotif(key);
-  if (ready) return presentReadyMotif(ready);
-  return presentOwnMotif(await loadOwn(MotifRow, user, key, { transaction }));
+  const ready = presentReadyMotif(key);
+  return ready ?? presentOwnMotif(await loadOwn(MotifRow, user, key, { transaction }));
+}
+
+/** What a planner offers: one's own motifs and the ready-made ones that a blanket can be laid out of. */
+export async function planMotifChoices(user: CurrentUser | null): Promise<MotifChoice[]> {
+  const own = user ? await ownMotifs(user) : [];
+  return [
+    ...own.flatMap(({ key, name, sides, version, motif }) =>
+      motif && layoutFor(sides) ? [{ key, name, rounds: motif.rounds.length, version }] : [],
+    ),
+    ...motifChoices(),
+  ];
+}
+
+/** The saves of a motif that are kept, newest first. */
+export async function listMotifVersions(
+  user: CurrentUser,
+  id: string,
+): Promise<{ items: PresentedMotifVersion[]; total: number }> {
+  const motif = await loadOwn(MotifRow, user, id);
+  const rows = await MotifVersion.findAll({
+    attributes: { exclude: ['text', 'stitches'] },
+    where: { motifId: motif.id },
+    order: [['version', 'DESC']],
+  });
+  const items = rows.map((row) => presentMotifVersion(row, motif.version));
+  return { items, total: items.length };
+}
+
+/** A motif of one's own as it was saved. */
+export async function getMotifVersion(
+  user: CurrentUser,
+  id: string,
+  version: number,
+): Promise<PresentedMotif> {
+  return presentMotifAsSaved(await loadMotifVersion(await loadOwn(MotifRow, user, id), version));
+}
+
+export async function loadMotifVersion(
+  motif: MotifRow,
+  version: number,
+  transaction?: Transaction,
+): Promise<MotifVersion> {
+  const row = await MotifVersion.findOne({ where: { motifId: motif.id, version }, transaction });
+  if (!row) throw new AppError('not-found', 'This save of the motif is not kept.');
+  return row;
 }

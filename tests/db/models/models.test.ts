@@ -6,7 +6,9 @@ import {
   BlanketRevision,
   Colourway,
   DyeLot,
+  MadeMotifRow,
   MotifRow,
+  MotifVersion,
   OwnStitchRow,
   PartSkein,
   ShoppingList,
@@ -14,11 +16,18 @@ import {
   SwatchMeasurement,
   Yarn,
 } from '../../../db/models';
-import { MOTIF_EXAMPLE, PLAN_EXAMPLE } from '../../../src/server/examples';
+import { MADE_MOTIF_EXAMPLE, MOTIF_EXAMPLE, PLAN_EXAMPLE } from '../../../src/server/examples';
 
 const AT = new Date('2026-12-01T09:00:00Z');
 const EDITED = { version: 3, createdAt: AT, updatedAt: AT };
-const { name, sides, ring, rounds } = MOTIF_EXAMPLE;
+const [motif] = PLAN_EXAMPLE.motifs;
+const PATTERN = {
+  ...MOTIF_EXAMPLE,
+  ring: motif!.ring,
+  rounds: motif!.rounds,
+  errors: 1,
+  warnings: 2,
+};
 
 /** A value for every attribute of every model. */
 const VALUES = [
@@ -102,7 +111,31 @@ const VALUES = [
       ...EDITED,
     },
   ],
-  [MotifRow, { id: 'm', ownerId: 'u', name, sides, ring, rounds, ...EDITED }],
+  [
+    MadeMotifRow,
+    {
+      id: 'q',
+      ownerId: 'u',
+      motifKey: 'group-square',
+      motifVersion: 2,
+      madeOn: '2026-11-28',
+      rounds: 4,
+      swatchId: 's',
+      weightCategory: 4,
+      putUpMassG: 100,
+      putUpLengthM: 200,
+      sizes: MADE_MOTIF_EXAMPLE.sizes,
+      weighedCount: 4,
+      weighedMassG: 44,
+      weighedResolutionG: 1,
+      weighedYarns: 4,
+      blocked: true,
+      notes: 'flat',
+      ...EDITED,
+    },
+  ],
+  [MotifRow, { id: 'm', ownerId: 'u', ...PATTERN, ...EDITED }],
+  [MotifVersion, { motifId: 'm', version: 2, ...PATTERN, savedAt: AT }],
   [
     Blanket,
     {

@@ -5,7 +5,12 @@ import { readyMotif } from '../../../src/lib/motifs/readyMotifs';
 describe('motifChoices', () => {
   it('names the motifs that a blanket can be laid out of, and how far each can be worked', () => {
     const choices = motifChoices();
-    expect(choices[0]).toEqual({ key: 'group-square', name: 'Classic group square', rounds: 8 });
+    expect(choices[0]).toEqual({
+      key: 'group-square',
+      name: 'Classic group square',
+      rounds: 8,
+      version: null,
+    });
     for (const { key, name, rounds } of choices) {
       const motif = readyMotif(key);
       expect([motif?.name, motif?.rounds.length]).toEqual([name, rounds]);

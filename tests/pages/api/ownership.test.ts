@@ -15,10 +15,15 @@ import * as colourways from '../../../src/pages/api/colourways';
 import * as colourway from '../../../src/pages/api/colourways/[id]';
 import * as motifs from '../../../src/pages/api/motifs';
 import * as motif from '../../../src/pages/api/motifs/[id]';
+import * as motifVersions from '../../../src/pages/api/motifs/[id]/versions';
+import * as motifVersion from '../../../src/pages/api/motifs/[id]/versions/[version]';
+import * as restoreMotif from '../../../src/pages/api/motifs/[id]/versions/[version]/restore';
 import * as shoppingLists from '../../../src/pages/api/shopping-lists';
 import * as keptList from '../../../src/pages/api/shopping-lists/[id]';
 import * as stash from '../../../src/pages/api/stash';
 import * as lot from '../../../src/pages/api/stash/[id]';
+import * as stitches from '../../../src/pages/api/stitches';
+import * as stitch from '../../../src/pages/api/stitches/[id]';
 import * as swatches from '../../../src/pages/api/swatches';
 import * as swatch from '../../../src/pages/api/swatches/[id]';
 import * as yarns from '../../../src/pages/api/yarns';
@@ -32,6 +37,7 @@ import {
   buildColourway,
   buildLot,
   buildMotif,
+  buildOwnStitch,
   buildSwatch,
   buildUser,
   buildYarn,
@@ -50,6 +56,7 @@ const LISTS: [string, Record<string, APIRoute | unknown>][] = [
   ['stash', stash],
   ['swatches', swatches],
   ['motifs', motifs],
+  ['stitches', stitches],
   ['blankets', blankets],
   ['shopping-lists', shoppingLists],
 ];
@@ -59,6 +66,10 @@ const ONE: [string, object, Build][] = [
   ['stash/[id]', lot, buildLot],
   ['swatches/[id]', swatch, buildSwatch],
   ['motifs/[id]', motif, buildMotif],
+  ['motifs/[id]/versions', motifVersions, buildMotif],
+  ['motifs/[id]/versions/[version]', motifVersion, buildMotif],
+  ['motifs/[id]/versions/[version]/restore', restoreMotif, buildMotif],
+  ['stitches/[id]', stitch, buildOwnStitch],
   ['blankets/[id]', blanket, buildBlanket],
   ['blankets/[id]/restore', restore, buildBlanket],
   ['blankets/[id]/revisions', revisions, buildBlanket],
@@ -143,7 +154,7 @@ describe('what a person keeps', () => {
 
 /** Everything the owner has, as far as lists show it. */
 async function rowsOf(owner: CurrentUser) {
-  const routes = [yarns, stash, swatches, motifs, blankets, shoppingLists];
+  const routes = [yarns, stash, swatches, motifs, stitches, blankets, shoppingLists];
   return Promise.all(
     routes.map(async ({ GET }) => (await callRoute(GET, { user: owner, url: '/api/x' })).json),
   );

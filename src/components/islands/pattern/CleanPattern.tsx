@@ -8,6 +8,9 @@ import { SegmentedControl } from '../../ui/SegmentedControl';
 
 interface CleanPatternProps {
   reading: Reading;
+  name: string;
+  /** What it comes out as, for the printed page: "A square of 4 rounds, 13 cm a side". */
+  about: string;
   ownStitches?: readonly OwnStitch[];
 }
 
@@ -21,7 +24,7 @@ const WORDS = [
 ] as const;
 
 /** The pattern as a clean page, in either terms, short or in full, with the key of its abbreviations. */
-export const CleanPattern = memo(({ reading, ownStitches }: CleanPatternProps) => {
+export const CleanPattern = memo(({ reading, name, about, ownStitches }: CleanPatternProps) => {
   const [terms, setTerms] = useState<Terms>(reading.terms);
   const [words, setWords] = useState<'short' | 'full'>('short');
   const [copied, setCopied] = useState(false);
@@ -40,16 +43,22 @@ export const CleanPattern = memo(({ reading, ownStitches }: CleanPatternProps) =
   }
 
   return (
-    <section aria-labelledby="clean-pattern">
-      <h2 id="clean-pattern">Clean pattern page</h2>
+    <section aria-labelledby="clean-pattern" data-sheet>
+      <h2 id="clean-pattern" className="sheet-hidden">
+        Clean pattern page
+      </h2>
+      <div className="sheet-shown mb-4 hidden">
+        <h1>{name || 'Motif'}</h1>
+        <p className="mt-1">{about}</p>
+      </div>
       <div className="not-printed mt-2 flex flex-wrap items-center gap-3">
         <SegmentedControl label="Terms" options={TERMS} value={terms} onChange={setTerms} />
         <SegmentedControl label="Words" options={WORDS} value={words} onChange={setWords} />
         <Button small icon={Copy} onClick={() => void copy()}>
           {copied ? 'Copied' : 'Copy'}
         </Button>
-        <Button small icon={Printer} onClick={() => window.print()}>
-          Print
+        <Button small icon={Printer} onClick={printSheet}>
+          Print the pattern
         </Button>
       </div>
       <div className="mt-4 grid gap-x-14 gap-y-6 lg:grid-cols-[minmax(0,1fr)_18rem]">
@@ -76,3 +85,11 @@ export const CleanPattern = memo(({ reading, ownStitches }: CleanPatternProps) =
   );
 });
 CleanPattern.displayName = 'CleanPattern';
+
+/** Prints what is marked as a sheet, and nothing of the page around it. */
+function printSheet(): void {
+  const { dataset } = document.documentElement;
+  dataset.printing = 'sheet';
+  window.addEventListener('afterprint', () => delete dataset.printing, { once: true });
+  window.print();
+}

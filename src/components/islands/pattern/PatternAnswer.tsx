@@ -1,6 +1,8 @@
 import { LayoutGrid } from 'lucide-react';
 import type { ReactNode } from 'react';
 import type { MotifGeometry } from '../../../lib/motifs/geometry';
+import { joinStitches } from '../../../lib/ledger/blanketOf';
+import { motifOf } from '../../../lib/pattern/motifOf';
 import type { Reading } from '../../../lib/pattern/reading';
 import { showFabric, type Units } from '../../../lib/units/display';
 import { acrossWord, SHAPE_WORDS } from '../../motifs/motifWords';
@@ -25,6 +27,7 @@ export function PatternAnswer(props: PatternAnswerProps & { actions?: ReactNode 
   if (rounds.length === 0)
     return <p className="text-ink-2">The chart appears here as soon as a round can be worked.</p>;
   const isFlat = rounds[0]?.kind === 'row';
+  const stitches = isFlat ? 0 : joinStitches(motifOf(reading, '', ''));
   return (
     <div className="min-w-0">
       {!isFlat && (
@@ -34,7 +37,7 @@ export function PatternAnswer(props: PatternAnswerProps & { actions?: ReactNode 
           live
         >
           {acrossWord(sides)}, give or take {showFabric(1.96 * geometry.acrossSdMm, units)}{' '}
-          (95&nbsp;% sure)
+          (95&nbsp;% sure){stitches > 0 && `, ${stitches} stitches to each neighbour`}
         </Fact>
       )}
       {geometry.trouble && !isFlat && (
@@ -88,7 +91,7 @@ export function PatternBar({ reading, geometry, units, planning }: PatternAnswer
   );
 }
 
-function countInWords({ rounds }: Reading): string {
+export function countInWords({ rounds }: Reading): string {
   const noun = rounds[0]?.kind === 'row' ? 'row' : 'round';
   return `${rounds.length} ${noun}${rounds.length === 1 ? '' : 's'}`;
 }

@@ -1,4 +1,4 @@
-import { memo, useMemo, type PointerEvent, type Ref } from 'react';
+import { memo, useMemo, type KeyboardEvent, type PointerEvent, type Ref } from 'react';
 import type { Diagnostic, Severity } from '../../../lib/pattern/diagnostic';
 import type { Span } from '../../../lib/pattern/span';
 import { classNames } from '../../ui/classNames';
@@ -8,7 +8,9 @@ interface PatternFieldProps {
   text: string;
   /** The text that the problems are of: the same, or that of a moment ago. */
   readText: string;
-  onText: (text: string) => void;
+  /** None where the text is only looked at. */
+  onText: ((text: string) => void) | null;
+  onKeyDown: (event: KeyboardEvent) => void;
   problems: readonly Diagnostic[];
   instructions: readonly Span[];
   /** The stretch that the chart points at. */
@@ -34,8 +36,8 @@ const UNDERLINE: Readonly<Record<Severity, string>> = {
  * underlines, so that typing, selecting and undoing are the browser's own.
  */
 export function PatternField(props: PatternFieldProps) {
-  const { text, readText, onText, problems, instructions, lit, onOffset, fieldRef, describedBy } =
-    props;
+  const { text, readText, onText, onKeyDown, problems, instructions, lit, onOffset } = props;
+  const { fieldRef, describedBy } = props;
 
   function onPointerMove(event: PointerEvent) {
     if (event.pointerType !== 'mouse') return;
@@ -53,7 +55,9 @@ export function PatternField(props: PatternFieldProps) {
           aria-label="Pattern text"
           aria-describedby={describedBy}
           value={text}
-          onChange={(event) => onText(event.target.value)}
+          readOnly={onText === null}
+          onChange={(event) => onText?.(event.target.value)}
+          onKeyDown={onKeyDown}
           onSelect={(event) => onOffset(event.currentTarget.selectionStart)}
           onPointerMove={onPointerMove}
           onPointerLeave={() => onOffset(null)}

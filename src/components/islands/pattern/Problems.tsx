@@ -1,4 +1,5 @@
 import {
+  ArrowDown,
   CircleAlert,
   CircleCheck,
   Info,
@@ -9,12 +10,16 @@ import {
 } from 'lucide-react';
 import type { Diagnostic, Fix, Severity } from '../../../lib/pattern/diagnostic';
 import { Button } from '../../ui/Button';
+import { useSettled } from '../../ui/useSettled';
 
 interface ProblemsProps {
   id: string;
   problems: readonly Diagnostic[];
   onGo: (problem: Diagnostic) => void;
-  onFix: (fix: Fix) => void;
+  /** To the first problem after the cursor, or round to the first of all. */
+  onNext: () => void;
+  /** None where the text is only looked at. */
+  onFix: ((fix: Fix) => void) | null;
   /** Takes a word that is not understood for a stitch of the person's own. */
   onAddStitch?: (problem: Diagnostic) => void;
 }
@@ -26,15 +31,33 @@ const LOOKS: Readonly<Record<Severity, { icon: LucideIcon; word: string; ink: st
 };
 
 /** Everything there is to say about the text, in its order; none hidden behind the first. */
-export function Problems({ id, problems, onGo, onFix, onAddStitch }: ProblemsProps) {
+export function Problems({ id, problems, onGo, onNext, onFix, onAddStitch }: ProblemsProps) {
+  const words = problemsInWords(problems);
+  const settled = useSettled(words);
   return (
     <section aria-labelledby={id} className="not-printed mt-4">
-      <h2 id={id} aria-live="polite" className="flex items-center gap-2">
-        {problems.every(({ severity }) => severity === 'note') && (
-          <CircleCheck size={18} aria-hidden className="text-teal" />
+      <div className="flex flex-wrap items-center justify-between gap-2">
+        <h2 id={id} className="flex items-center gap-2">
+          {problems.every(({ severity }) => severity === 'note') && (
+            <CircleCheck size={18} aria-hidden className="text-teal" />
+          )}
+          {words}
+        </h2>
+        {problems.length > 1 && (
+          <Button
+            small
+            kind="quiet"
+            icon={ArrowDown}
+            aria-keyshortcuts="F8"
+            onClick={() => onNext()}
+          >
+            Next problem <kbd className="max-sm:hidden">F8</kbd>
+          </Button>
         )}
-        {problemsInWords(problems)}
-      </h2>
+      </div>
+      <p role="status" className="sr-only">
+        {settled}
+      </p>
       {problems.length > 0 && (
         <ol className="mt-2 max-h-80 overflow-y-auto" tabIndex={0} aria-labelledby={id}>
           {problems.map((problem) => (
@@ -49,7 +72,7 @@ export function Problems({ id, problems, onGo, onFix, onAddStitch }: ProblemsPro
   );
 }
 
-type ProblemProps = Omit<ProblemsProps, 'id' | 'problems'> & { problem: Diagnostic };
+type ProblemProps = Omit<ProblemsProps, 'id' | 'problems' | 'onNext'> & { problem: Diagnostic };
 
 function Problem({ problem, onGo, onFix, onAddStitch }: ProblemProps) {
   const { severity, line, column, message, fix } = problem;
@@ -70,7 +93,7 @@ function Problem({ problem, onGo, onFix, onAddStitch }: ProblemProps) {
           : {message}
         </p>
         <div className="mt-1.5 flex flex-wrap gap-2 empty:hidden">
-          {fix && (
+          {fix && onFix && (
             <Button small icon={Wand} onClick={() => onFix(fix)}>
               {fix.label}
             </Button>
@@ -97,4 +120,15 @@ export function problemsInWords(problems: readonly Diagnostic[]): string {
   ].filter(Boolean);
   if (errors + warnings > 0) return parts.join(', ');
   return notes > 0 ? `Reads well, ${parts.join('')}` : 'Reads without a problem';
+}
+
+/** The problem after (or, going back, before) a place of the text; past the last comes the first. */
+export function nextProblem(
+  problems: readonly Diagnostic[],
+  offset: number,
+  back: boolean,
+): Diagnostic | undefined {
+  return back
+    ? (problems.findLast(({ begin }) => begin < offset) ?? problems.at(-1))
+    : (problems.find(({ begin }) => begin > offset) ?? problems[0]);
 }

@@ -1,28 +1,26 @@
-import { BookOpen, Trash2 } from 'lucide-react';
+import { useMutation } from '@tanstack/react-query';
+import { BookmarkPlus, BookOpen, Trash2 } from 'lucide-react';
+import { createMotif } from '../../../client/queries/motifs';
 import type { Terms } from '../../../lib/pattern/reading';
-import type { MotifSides } from '../../../lib/motifs/motif';
 import type { GaugeSwatch } from '../../../lib/swatches/swatchRecord';
 import type { Units } from '../../../lib/units/display';
 import type { PresentedOwnStitch } from '../../../schemas/ownStitch';
-import { Button } from '../../ui/Button';
-import { Disclosure } from '../../ui/Disclosure';
+import { Button, ButtonLink } from '../../ui/Button';
 import { Field } from '../../ui/Field';
-import { OwnStitchesPanel } from '../stitches/OwnStitchesPanel';
+import { Notice } from '../../ui/Notice';
+import { failureWords } from '../form/formErrors';
+import { JoinFits } from '../motifs/JoinFits';
 import { useOwnStitches } from '../stitches/useOwnStitches';
 import { WithQueries } from '../WithQueries';
+import { checkedMotif } from './checkedMotif';
 import { PatternEditor } from './PatternEditor';
-import { usePatternDraft } from './usePatternDraft';
-
-/** A pattern to begin with. */
-export interface ExamplePattern {
-  name: string;
-  text: string;
-  sides: MotifSides;
-}
+import { StitchesSection } from './StitchesSection';
+import { usePatternDraft, type PatternDraft } from './usePatternDraft';
 
 interface ReadPageProps {
-  example: ExamplePattern;
-  /** The example was asked for: it is on the screen at once, in a draft of its own. */
+  /** A pattern to begin with. */
+  example: PatternDraft;
+  /** Key of the example where it was asked for: it is on the screen at once, in a draft of its own. */
   asked: string | null;
   signedIn: boolean;
   stitches: PresentedOwnStitch[];
@@ -42,11 +40,18 @@ export function ReadPage(props: ReadPageProps) {
 
 function Reader(props: ReadPageProps) {
   const { example, asked, signedIn, units, terms, swatches } = props;
-  const empty = { name: '', text: '', terms, sides: 4 } as const;
-  const [draft, setDraft] = usePatternDraft(asked ? { ...example, terms: 'us' } : empty, asked);
+  const empty: PatternDraft = { name: '', text: '', terms, sides: 4, size: 0 };
+  const { draft, setDraft } = usePatternDraft(asked ? example : empty, asked);
   const own = useOwnStitches({ signedIn, initial: props.stitches });
-  const { name, ...pattern } = draft;
-  const isEmpty = pattern.text.trim() === '';
+  const isEmpty = draft.text.trim() === '';
+  const keeping = useMutation({
+    mutationFn: () => createMotif(checkedMotif(draft, own.stitches)),
+    onSuccess: ({ key }) => {
+      // The motif holds the text from now on: the draft goes, before the page does.
+      setDraft(asked ? example : empty);
+      setTimeout(() => location.assign(`/motifs/${key}`));
+    },
+  });
 
   return (
     <>
@@ -56,23 +61,19 @@ function Reader(props: ReadPageProps) {
             Paste a motif’s rounds as they are published: every stitch is worked, counted and drawn
             as you type.
           </p>
-          <Button icon={BookOpen} onClick={() => setDraft({ ...example, terms: 'us' })}>
+          <Button icon={BookOpen} onClick={() => setDraft(example)}>
             Load the {example.name.toLowerCase()}
           </Button>
         </div>
       )}
-      {name && <h2 className="mb-4 hidden text-xl print:block">{name}</h2>}
+      {draft.name && <h2 className="mb-4 hidden text-xl print:block">{draft.name}</h2>}
       <PatternEditor
-        {...pattern}
-        {...{ name, units, swatches }}
+        pattern={draft}
+        {...{ units, swatches }}
         shownTerms={terms}
         ownStitches={own.stitches}
         onAddStitch={own.openWith}
-        stitchesPanel={(onInsert) => (
-          <Disclosure className="not-printed mt-5" summary={ownStitchesWord(own.stitches.length)}>
-            <OwnStitchesPanel {...own.panelProps} {...{ terms, onInsert }} />
-          </Disclosure>
-        )}
+        stitchesPanel={(onInsert) => <StitchesSection {...{ own, terms, onInsert }} />}
         onChange={(change) => setDraft((old) => ({ ...old, ...change }))}
         heading={
           !isEmpty && (
@@ -80,24 +81,42 @@ function Reader(props: ReadPageProps) {
               <Field
                 label="Name of the motif"
                 className="flex-1"
-                value={name}
+                value={draft.name}
                 maxLength={80}
                 onChange={(event) => setDraft({ ...draft, name: event.target.value })}
               />
-              <Button
-                kind="quiet"
-                icon={Trash2}
-                onClick={() => setDraft({ ...draft, name: '', text: '' })}
-              >
+              <Button kind="quiet" icon={Trash2} onClick={() => setDraft(empty)}>
                 Begin anew
               </Button>
             </div>
           )
         }
+        actions={
+          signedIn ? (
+            <Button
+              icon={BookmarkPlus}
+              busy={keeping.isPending && 'Keeping…'}
+              onClick={() => keeping.mutate()}
+            >
+              Keep in my motifs
+            </Button>
+          ) : (
+            <ButtonLink icon={BookmarkPlus} href={signInHref(asked)}>
+              Sign in to keep it
+            </ButtonLink>
+          )
+        }
+        below={(shown) => <JoinFits {...shown} />}
       />
+      {keeping.error && (
+        <Notice kind="problem" live className="mt-4">
+          {failureWords(keeping.error)}
+        </Notice>
+      )}
     </>
   );
 }
 
-const ownStitchesWord = (count: number): string =>
-  count === 0 ? 'Stitches of your own' : `Stitches of your own: ${count}`;
+/** The draft waits on this device until the person is back. */
+const signInHref = (asked: string | null): string =>
+  `/sign-in?returnTo=${encodeURIComponent(`/motifs/read${asked ? `?from=${asked}` : ''}`)}`;

@@ -1,7 +1,7 @@
 import { Check, TriangleAlert } from 'lucide-react';
 import { memo } from 'react';
 import type { Gauge } from '../../../lib/gauge/gauge';
-import type { MotifGeometry } from '../../../lib/motifs/geometry';
+import { FLAT_FULLNESS, type MotifGeometry } from '../../../lib/motifs/geometry';
 import type { Reading, WorkedRound } from '../../../lib/pattern/reading';
 import { showFabric, showYarn, type Units } from '../../../lib/units/display';
 import { acrossWord, countsInWords, spacesInWords } from '../../motifs/motifWords';
@@ -17,13 +17,15 @@ interface ReadRoundsProps {
   gauge: Gauge;
   units: Units;
   terms: Terms;
-  /** Lights the text of a round. */
-  onRound: (round: WorkedRound | null) => void;
+  /** Lights a round in text and chart, by its place in the pattern. */
+  onRound: (round: number | null) => void;
+  /** Shows where the text says it. */
+  onGo: (round: WorkedRound) => void;
 }
 
 /** Every round as worked: what is made and counted, what the note claims, size, fullness and yarn. */
 export const ReadRounds = memo((props: ReadRoundsProps) => {
-  const { reading, geometry, gauge, units, terms, onRound } = props;
+  const { reading, geometry, gauge, units, terms, onRound, onGo } = props;
   const { rounds, sides } = reading;
   const { rounds: yarn, byColour } = patternYarn(reading, gauge);
   const isFlat = rounds[0]?.kind === 'row';
@@ -39,7 +41,10 @@ export const ReadRounds = memo((props: ReadRoundsProps) => {
       <table className="w-full min-w-240">
         <thead>
           <tr className="align-bottom text-sm text-ink-2">
-            <th scope="col" className={classNames(start, 'ps-0')}>
+            <th
+              scope="col"
+              className={classNames(start, 'sticky start-0 bg-ground ps-0 print:static')}
+            >
               {isFlat ? 'Row' : 'Round'}
             </th>
             <th scope="col" className={start}>
@@ -58,7 +63,7 @@ export const ReadRounds = memo((props: ReadRoundsProps) => {
               {sides === 0 || isFlat ? 'in all' : 'to a side'}
             </th>
             <th scope="col" className={end}>
-              tall
+              {isFlat ? 'tall' : 'round tall'}
             </th>
             {!isFlat && (
               <th scope="col" className={end}>
@@ -84,12 +89,23 @@ export const ReadRounds = memo((props: ReadRoundsProps) => {
             return (
               <tr
                 key={i}
-                className="border-t border-line hover:bg-sunk"
-                onPointerEnter={() => onRound(round)}
+                className="group border-t border-line focus-within:bg-sunk hover:bg-sunk"
+                onPointerEnter={() => onRound(i)}
                 onPointerLeave={() => onRound(null)}
+                onFocus={() => onRound(i)}
+                onBlur={() => onRound(null)}
               >
-                <th scope="row" className="py-2 pe-3 text-start whitespace-nowrap">
-                  {round.label}
+                <th
+                  scope="row"
+                  className="sticky start-0 bg-ground py-2 pe-3 text-start whitespace-nowrap group-focus-within:bg-sunk group-hover:bg-sunk print:static"
+                >
+                  <button
+                    type="button"
+                    className="min-h-6 font-bold underline-offset-3 hover:underline coarse:min-h-11"
+                    onClick={() => onGo(round)}
+                  >
+                    {round.label}
+                  </button>
                   {round.colours.length > 0 && (
                     <span className="block text-sm font-normal text-ink-2">
                       {round.colours.join(', ')}
@@ -105,10 +121,27 @@ export const ReadRounds = memo((props: ReadRoundsProps) => {
                 <td className={figure}>{perSideInWords(round)}</td>
                 <td className={figure}>{size && showFine(size.heightMm, units)}</td>
                 {!isFlat && <td className={figure}>{size && showFabric(size.acrossMm, units)}</td>}
-                {!isFlat && <td className={figure}>{size?.fullness.toFixed(2)}</td>}
-                <td className={figure}>{yarn[i]?.loops}</td>
+                {!isFlat && (
+                  <td className={figure}>
+                    {size?.fullness.toFixed(2)}
+                    <Fullness {...{ round, geometry }} fullness={size?.fullness} isEarly={i < 2} />
+                  </td>
+                )}
+                <td className={figure}>
+                  {yarn[i]?.loops}
+                  {yarn[i]?.byColour.map(({ colour, taken }) => (
+                    <span key={colour} className="block text-sm text-ink-2">
+                      {taken.loops}
+                    </span>
+                  ))}
+                </td>
                 <td className={classNames(figure, 'pe-0')}>
                   {showYarn(yarn[i]?.lengthM ?? 0, units)}
+                  {yarn[i]?.byColour.map(({ colour, taken }) => (
+                    <span key={colour} className="block text-sm text-ink-2">
+                      {colour} {showYarn(taken.lengthM, units)}
+                    </span>
+                  ))}
                 </td>
               </tr>
             );
@@ -137,6 +170,30 @@ export const ReadRounds = memo((props: ReadRoundsProps) => {
   );
 });
 ReadRounds.displayName = 'ReadRounds';
+
+interface FullnessProps {
+  round: WorkedRound;
+  geometry: MotifGeometry;
+  fullness: number | undefined;
+  /** Small enough to be pulled flat, whatever the counts. */
+  isEarly: boolean;
+}
+
+/** Whether the round lies flat, in a word, and whether it is the first that does not. */
+function Fullness({ round, geometry, fullness, isEarly }: FullnessProps) {
+  if (fullness === undefined || isEarly) return null;
+  const [least, most] = FLAT_FULLNESS;
+  const word = fullness < least ? 'cups' : fullness > most ? 'ruffles' : 'flat';
+  const begins = geometry.trouble?.label === round.label;
+  return (
+    <span
+      className={classNames('block text-sm', word === 'flat' ? 'text-ink-2' : 'text-amber-ink')}
+    >
+      {word}
+      {begins && ', from here'}
+    </span>
+  );
+}
 
 /** The bracketed note of a round, and whether the round agrees with it. */
 interface ClaimProps {

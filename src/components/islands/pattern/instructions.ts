@@ -30,3 +30,7 @@ export function stitchesAt({ rounds, ring }: Reading, offset: number): StitchAdd
   const count = Object.values(ring.made).reduce((sum, each) => sum + each, 0);
   return Array.from({ length: count }, (_, stitch) => ({ round: -1, stitch }));
 }
+
+/** Every stitch of a round. */
+export const stitchesOfRound = ({ rounds }: Reading, round: number): StitchAddress[] =>
+  rounds[round]?.stitches.map((_, stitch) => ({ round, stitch })) ?? [];

@@ -11,11 +11,16 @@ export interface YarnTaken {
   lengthM: number;
 }
 
+export interface YarnOfColour {
+  colour: string;
+  taken: YarnTaken;
+}
+
 export interface PatternYarn {
-  /** Of each round; the ring is in the first. */
-  rounds: YarnTaken[];
+  /** Of each round, and of each yarn in it where it is worked in several; the ring is in the first. */
+  rounds: (YarnTaken & { byColour: YarnOfColour[] })[];
   /** Of each yarn that the pattern names, where it names more than one. */
-  byColour: { colour: string; taken: YarnTaken }[];
+  byColour: YarnOfColour[];
 }
 
 /** Loops that a pattern lays, and the yarn they take in a hand of this gauge. */
@@ -35,18 +40,36 @@ export function patternYarn({ ring, rounds }: Reading, gauge: Gauge): PatternYar
   };
 
   const first = rounds.flatMap(({ colours }) => colours)[0] ?? '';
-  const byColour = new Map<string, Record<string, number>>([[first, { ...ring.made }]]);
-  for (const { colour, code } of rounds.flatMap(({ stitches }) => stitches)) {
-    const key = colour ?? first;
-    const made = byColour.get(key) ?? {};
-    made[code] = (made[code] ?? 0) + 1;
-    byColour.set(key, made);
-  }
+  const madeByRound = rounds.map(({ stitches }, i) =>
+    byColourOf(stitches, first, i === 0 ? ring.made : {}),
+  );
+  const inAll = new Map<string, StitchCounts>();
+  for (const [colour, made] of madeByRound.flatMap((each) => [...each]))
+    inAll.set(colour, addCounts(inAll.get(colour) ?? {}, made));
+  const yarnOf = (counted: ReadonlyMap<string, StitchCounts>): YarnOfColour[] =>
+    counted.size > 1 ? [...counted].map(([colour, made]) => ({ colour, taken: taken(made) })) : [];
   return {
-    rounds: rounds.map(({ made }, i) => taken(made, i === 0 ? ring.made : {})),
-    byColour:
-      byColour.size > 1
-        ? [...byColour].map(([colour, made]) => ({ colour, taken: taken(made) }))
-        : [],
+    rounds: rounds.map(({ made }, i) => ({
+      ...taken(made, i === 0 ? ring.made : {}),
+      byColour: yarnOf(madeByRound[i] ?? new Map()),
+    })),
+    byColour: yarnOf(inAll),
   };
+}
+
+/** Stitches of a round by the yarn they are made with; those of no named yarn are of the first. */
+function byColourOf(
+  stitches: Reading['rounds'][number]['stitches'],
+  first: string,
+  before: StitchCounts,
+): Map<string, StitchCounts> {
+  const counted = new Map<string, Record<string, number>>();
+  if (Object.keys(before).length > 0) counted.set(first, { ...before });
+  for (const { colour, code } of stitches) {
+    const key = colour ?? first;
+    const made = counted.get(key) ?? {};
+    made[code] = (made[code] ?? 0) + 1;
+    counted.set(key, made);
+  }
+  return counted;
 }

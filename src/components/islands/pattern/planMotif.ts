@@ -5,9 +5,6 @@ import { motifOf } from '../../../lib/pattern/motifOf';
 import type { Reading } from '../../../lib/pattern/reading';
 import { storedPlan, storePlan } from '../../planner/planStorage';
 
-/** Key of a motif that has only been read and not kept. */
-const READ_KEY = 'read-pattern';
-
 /** Why a blanket cannot be planned of this motif, or null when it can. */
 export function noPlanBecause({ rounds, sides }: Reading): string | null {
   if (rounds.length === 0) return 'There are no rounds yet.';
@@ -15,12 +12,25 @@ export function noPlanBecause({ rounds, sides }: Reading): string | null {
   return layoutFor(sides) === null ? 'There is no layout for motifs of this shape yet.' : null;
 }
 
+/** Which motif a reading is, for the plan that takes it. */
+export interface MotifIdentity {
+  key: string;
+  version: number | null;
+}
+
+/** A motif that has only been read and not kept. */
+export const READ_ONLY_ONCE: MotifIdentity = { key: 'read-pattern', version: null };
+
 /**
  * Puts the motif into the plan kept on this device, or into the example, for the estimator to open.
  * Answers with what went wrong, in words, or null.
  */
-export async function planMotif(reading: Reading, name: string): Promise<string | null> {
-  const motif = motifOf(reading, READ_KEY, name.trim() || 'My motif');
+export async function planMotif(
+  reading: Reading,
+  name: string,
+  { key, version }: MotifIdentity,
+): Promise<string | null> {
+  const motif = { ...motifOf(reading, key, name.trim() || 'My motif'), version };
   const plan = withMotif((await storedPlan()) ?? EXAMPLE_PLAN, motif);
   const { planSchema } = await import('../../../schemas/plan');
   const checked = planSchema.safeParse(JSON.parse(JSON.stringify(plan)));

@@ -1,6 +1,6 @@
 import { useState } from 'react';
 import type { Reading } from '../../../lib/pattern/reading';
-import { noPlanBecause, planMotif } from './planMotif';
+import { noPlanBecause, planMotif, type MotifIdentity } from './planMotif';
 
 export interface Planning {
   /** Why no blanket can be planned of it, or null. */
@@ -11,11 +11,11 @@ export interface Planning {
 }
 
 /** Hands the motif that was read to the estimator of the front page, and goes there. */
-export function usePlanning(reading: Reading, name: string): Planning {
+export function usePlanning(reading: Reading, name: string, motif: MotifIdentity): Planning {
   const [problem, setProblem] = useState<string | null>(null);
   const why = noPlanBecause(reading);
   async function plan() {
-    const wrong = await planMotif(reading, name);
+    const wrong = await planMotif(reading, name, motif);
     setProblem(wrong);
     if (wrong === null) location.assign('/');
   }

@@ -1,5 +1,5 @@
 import { listOf, listQuery } from '../../../schemas/fields';
-import { motifInput, presentedMotifSchema } from '../../../schemas/motif';
+import { motifInput, motifSummarySchema, presentedMotifSchema } from '../../../schemas/motif';
 import { createMotif } from '../../../server/commands/createMotif';
 import { MOTIF_EXAMPLE } from '../../../server/examples';
 import { handle } from '../../../server/handle';
@@ -9,14 +9,16 @@ export const GET = handle({
   summary: 'List the ready-made motifs and my own',
   who: 'anyone',
   query: listQuery,
-  response: listOf(presentedMotifSchema),
+  response: listOf(motifSummarySchema),
   example: { query: { limit: '20' } },
   run: ({ user, query }) => listMotifs(user, query),
 });
 
 export const POST = handle({
-  summary: 'Add a motif of my own',
+  summary: 'Add a motif of my own, as its pattern',
+  description: 'Its rounds are worked from the text. A text with errors is kept too.',
   who: 'signed-in',
+  limit: 'heavy',
   body: motifInput,
   response: presentedMotifSchema,
   status: 201,

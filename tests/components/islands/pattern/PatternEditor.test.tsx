@@ -1,11 +1,9 @@
 import { cleanup, fireEvent, render, screen, within } from '@testing-library/react';
 import { useState } from 'react';
 import { afterEach, beforeAll, beforeEach, describe, expect, it, vi } from 'vitest';
-import {
-  PatternEditor,
-  type PatternChange,
-} from '../../../../src/components/islands/pattern/PatternEditor';
-import type { MotifSides, Terms } from '../../../../src/lib';
+import { PatternEditor } from '../../../../src/components/islands/pattern/PatternEditor';
+import type { PatternDraft } from '../../../../src/components/islands/pattern/usePatternDraft';
+import type { MotifSides } from '../../../../src/lib';
 import { stubWidth } from '../../resizeObserver';
 
 // The editor fetches its chart; fetched once here, it is there at once in every test.
@@ -20,12 +18,17 @@ const RIGHT = `Ch 4, join with sl st to form ring.
 Rnd 1: Ch 3 (counts as dc), 2 dc in ring, ch 2, *3 dc in ring, ch 2; rep from * 2 more times; join with sl st in top of beg ch-3. (12 dc, 4 ch-2 sps)`;
 
 function Editor({ text, sides = 4 }: { text: string; sides?: MotifSides }) {
-  const [pattern, setPattern] = useState({ text, terms: 'us' as Terms, sides });
+  const [pattern, setPattern] = useState<PatternDraft>({
+    name: 'Mine',
+    text,
+    terms: 'us',
+    sides,
+    size: 0,
+  });
   return (
     <PatternEditor
-      {...pattern}
-      name="Mine"
-      onChange={(change: PatternChange) => setPattern((old) => ({ ...old, ...change }))}
+      pattern={pattern}
+      onChange={(change) => setPattern((old) => ({ ...old, ...change }))}
       units="metric"
       shownTerms="us"
       swatches={[]}

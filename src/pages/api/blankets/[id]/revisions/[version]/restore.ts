@@ -1,4 +1,5 @@
-import { blanketSchema, restoreInput, revisionParams } from '../../../../../../schemas/blanket';
+import { blanketSchema } from '../../../../../../schemas/blanket';
+import { restoreInput, saveParams } from '../../../../../../schemas/fields';
 import { restoreRevision } from '../../../../../../server/commands/restoreRevision';
 import { EXAMPLE_ID } from '../../../../../../server/examples';
 import { handle } from '../../../../../../server/handle';
@@ -7,7 +8,7 @@ export const POST = handle({
   summary: 'Save an older save of a blanket again',
   description: 'It becomes the newest save; nothing saved since is lost.',
   who: 'signed-in',
-  params: revisionParams,
+  params: saveParams,
   body: restoreInput,
   response: blanketSchema,
   errors: ['not-found', 'conflict', 'gone'],

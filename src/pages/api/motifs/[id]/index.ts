@@ -1,11 +1,11 @@
-import { idParams, keyParams } from '../../../schemas/fields';
-import { motifUpdate, presentedMotifSchema } from '../../../schemas/motif';
-import { nothingSchema } from '../../../schemas/schema';
-import { deleteMotif } from '../../../server/commands/deleteMotif';
-import { updateMotif } from '../../../server/commands/updateMotif';
-import { EXAMPLE_ID, MOTIF_EXAMPLE } from '../../../server/examples';
-import { handle } from '../../../server/handle';
-import { getMotif } from '../../../server/queries/motifs';
+import { idParams, keyParams } from '../../../../schemas/fields';
+import { motifUpdate, presentedMotifSchema } from '../../../../schemas/motif';
+import { nothingSchema } from '../../../../schemas/schema';
+import { deleteMotif } from '../../../../server/commands/deleteMotif';
+import { updateMotif } from '../../../../server/commands/updateMotif';
+import { EXAMPLE_ID, MOTIF_EXAMPLE } from '../../../../server/examples';
+import { handle } from '../../../../server/handle';
+import { getMotif } from '../../../../server/queries/motifs';
 
 export const GET = handle({
   summary: 'Get a ready-made motif by its key, or one of my own by its id',
@@ -22,6 +22,7 @@ export const PUT = handle({
   who: 'signed-in',
   params: idParams,
   body: motifUpdate,
+  limit: 'heavy',
   response: presentedMotifSchema,
   errors: ['not-found', 'conflict'],
   example: { params: { id: EXAMPLE_ID }, body: { ...MOTIF_EXAMPLE, version: 1 } },
