@@ -155,13 +155,9 @@ describe('measuredMotif', () => {
     ];
     const design = sizes.map(({ round }) => means.map((_, i) => (i <= round ? 2 : 0)));
     const noise = math.diag(sizes.map(({ acrossMm }) => tapeErrorMm(acrossMm) ** 2));
-    const gain = math.multiply(
-      prior,
-      math.transpose(design),
-      math.inv(
-        math.add(math.multiply(math.multiply(design, prior), math.transpose(design)), noise),
-      ),
-    );
+    const inner = math.multiply(math.multiply(design, prior), math.transpose(design));
+    const spread = math.add(inner, noise) as unknown as number[][];
+    const gain = math.multiply(math.multiply(prior, math.transpose(design)), math.inv(spread));
     const surprise = math.subtract(
       sizes.map(({ acrossMm }) => acrossMm),
       math.multiply(design, means),
