@@ -59,7 +59,7 @@ export function Problems({ id, problems, onGo, onNext, onFix, onAddStitch }: Pro
         {settled}
       </p>
       {problems.length > 0 && (
-        <ol className="mt-2 max-h-80 overflow-y-auto" tabIndex={0} aria-labelledby={id}>
+        <ol className="mt-2 lg:max-h-112 lg:overflow-y-auto" tabIndex={0} aria-labelledby={id}>
           {problems.map((problem) => (
             <Problem
               key={`${problem.code} ${problem.begin} ${problem.end}`}

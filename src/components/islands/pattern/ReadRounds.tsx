@@ -181,10 +181,10 @@ interface FullnessProps {
 
 /** Whether the round lies flat, in a word, and whether it is the first that does not. */
 function Fullness({ round, geometry, fullness, isEarly }: FullnessProps) {
-  if (fullness === undefined || isEarly) return null;
+  const begins = geometry.trouble?.label === round.label;
+  if (fullness === undefined || (isEarly && !begins)) return null;
   const [least, most] = FLAT_FULLNESS;
   const word = fullness < least ? 'cups' : fullness > most ? 'ruffles' : 'flat';
-  const begins = geometry.trouble?.label === round.label;
   return (
     <span
       className={classNames('block text-sm', word === 'flat' ? 'text-ink-2' : 'text-amber-ink')}
