@@ -213,6 +213,76 @@ test('the draft of a ready-made motif does not take the place of one’s own', a
   await expect(field(page)).toHaveValue(CIRCLE);
 });
 
+test(
+  'with the keyboard alone: to each problem, its mending, the chart and the rounds',
+  {
+    tag: '@desktop',
+  },
+  async ({ page }) => {
+    await openWith(page, WRONG);
+    await expect(page.getByRole('heading', { name: /^3 errors/ })).toBeVisible();
+    const selected = () =>
+      field(page).evaluate((area: HTMLTextAreaElement) =>
+        area.value.slice(area.selectionStart, area.selectionEnd),
+      );
+    await field(page).press('Control+Home');
+    await page.keyboard.press('F8');
+    await expect.poll(selected).toBe('dcc');
+    await page.keyboard.press('F8');
+    await expect.poll(selected).toContain('13 dc');
+    await page.keyboard.press('Shift+F8');
+    await expect.poll(selected).toBe('dcc');
+    await page.keyboard.type('dc');
+    await expect(problems(page).filter({ hasText: 'dcc' })).toHaveCount(0);
+
+    const chart = page.getByRole('group', { name: /^Chart of/ });
+    await chart.focus();
+    await page.keyboard.press('ArrowLeft');
+    await expect(page.locator('[data-begin].bg-amber\\/45')).not.toHaveCount(0);
+
+    // A round of the table lights its stitches, and leads to its text.
+    const mark = chart.locator('svg.keeps-colour path').first();
+    await page.keyboard.press('Escape');
+    await page.getByRole('button', { name: 'Rnd 2', exact: true }).focus();
+    await expect(mark).not.toHaveAttribute('d', '');
+    await page.keyboard.press('Enter');
+    await expect.poll(selected).toMatch(/^Rnd 2/);
+  },
+);
+
+test('the clean page writes it out in full words and other terms', async ({ page }) => {
+  await openWith(page, CIRCLE);
+  await panel(page, 'Rounds');
+  const clean = page.getByRole('region', { name: 'Clean pattern page' });
+  await clean.getByRole('radio', { name: 'Full words' }).click();
+  await expect(clean).toContainText('11 double crochet in magic ring');
+  await clean.getByRole('radio', { name: 'UK terms' }).click();
+  await expect(clean).toContainText('11 treble in magic ring');
+  await clean.getByRole('radio', { name: 'Abbreviations' }).click();
+  await expect(clean.getByRole('term').filter({ hasText: /^tr$/ })).toBeVisible();
+});
+
+test(
+  'a printed pattern holds its name, its rounds and its key, and nothing else',
+  {
+    tag: '@desktop',
+  },
+  async ({ page }) => {
+    await open(page, '/motifs/hexagon');
+    await page.evaluate(() => (window.print = () => undefined));
+    await page.getByRole('button', { name: 'Print the pattern' }).click();
+    await page.emulateMedia({ media: 'print' });
+    const text = await page.getByRole('main').innerText();
+    expect(text).toMatch(/^Solid hexagon\n/);
+    expect(text).toContain('Rnd 1: Ch 3 (counts as dc)');
+    expect(text).toContain('double crochet');
+    expect(text).not.toContain('Whip stitch');
+    expect(text).not.toContain('Copy');
+    await page.evaluate(() => window.dispatchEvent(new Event('afterprint')));
+    await expect(page.getByText('Whip stitch', { exact: false }).first()).toBeVisible();
+  },
+);
+
 for (const colorScheme of ['light', 'dark'] as const) {
   test(`the page is accessible, empty and with problems, ${colorScheme}`, async ({ page }) => {
     await page.emulateMedia({ colorScheme });
@@ -220,6 +290,11 @@ for (const colorScheme of ['light', 'dark'] as const) {
     await expectAccessible(page);
     await field(page).fill(WRONG);
     await expect(page.getByRole('heading', { name: /errors/ })).toBeVisible();
+    await expectAccessible(page);
+    await expectNoSidewaysScroll(page);
+    await open(page, '/motifs/hexagon');
+    await expectAccessible(page);
+    await panel(page, 'Rounds');
     await expectAccessible(page);
     await expectNoSidewaysScroll(page);
   });
