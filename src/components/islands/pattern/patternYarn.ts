@@ -1,10 +1,9 @@
 import type { Gauge } from '../../../lib/gauge/gauge';
 import { expectedM, learnHand } from '../../../lib/hand/hand';
+import { useOfStitches } from '../../../lib/hand/yarnUse';
 import type { Reading } from '../../../lib/pattern/reading';
 import { addCounts } from '../../../lib/stitches/counts';
-import { loopsOf } from '../../../lib/stitches/loops';
 import type { StitchCounts } from '../../../lib/stitches/stitch';
-import { stitch } from '../../../lib/stitches/stitchTable';
 
 export interface YarnTaken {
   loops: number;
@@ -28,14 +27,10 @@ export function patternYarn({ ring, rounds }: Reading, gauge: Gauge): PatternYar
   const codes = new Set([ring, ...rounds].flatMap(({ made }) => Object.keys(made)));
   const hand = learnHand(gauge.stitchWidthMm, [...codes], []);
   const taken = (...counted: StitchCounts[]): YarnTaken => {
-    const loops = new Map<string, number>();
-    for (const [code, count] of Object.entries(counted.reduce(addCounts, {}))) {
-      const each = stitch(code);
-      if (each) loops.set(code, count * loopsOf(each));
-    }
+    const use = useOfStitches(counted.reduce(addCounts, {}));
     return {
-      loops: [...loops.values()].reduce((sum, count) => sum + count, 0),
-      lengthM: expectedM(hand, { loops, seamM: 0, cutM: 0 }),
+      loops: [...use.loops.values()].reduce((sum, count) => sum + count, 0),
+      lengthM: expectedM(hand, use),
     };
   };
 
