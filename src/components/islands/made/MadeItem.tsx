@@ -1,0 +1,101 @@
+import { LayoutGrid, Pencil, Trash2 } from 'lucide-react';
+import { useMemo } from 'react';
+import type { Gauge } from '../../../lib/gauge/gauge';
+import type { Motif } from '../../../lib/motifs/motif';
+import { showFabric, type Units } from '../../../lib/units/display';
+import { YARN_CATEGORIES } from '../../../lib/yarnCategories';
+import { acrossWord } from '../../motifs/motifWords';
+import { Button } from '../../ui/Button';
+import { showDay } from '../swatches/swatchWords';
+import type { KeptMade } from './keptMade';
+import { madeFigures } from './madeFigures';
+import { sizeSentence, verdictChange, workedWords, yarnSentence } from './madeWords';
+
+interface MadeItemProps {
+  kept: KeptMade;
+  /** The gauge shown is of a yarn like that it was made in. */
+  isOfGauge: boolean;
+  motif: Motif;
+  gauge: Gauge;
+  units: Units;
+  onPlan?: () => void;
+  onEdit: () => void;
+  onDelete: () => void;
+}
+
+/** One made motif of the list: what it told, and what can be done with it. */
+export function MadeItem(props: MadeItemProps) {
+  const { kept, isOfGauge, motif, gauge, units, onPlan, onEdit, onDelete } = props;
+  const figures = useMemo(
+    () => (isOfGauge ? madeFigures(kept, motif, gauge) : null),
+    [isOfGauge, kept, motif, gauge],
+  );
+  const day = showDay(kept.madeOn);
+  const told = figures
+    ? [
+        sizeSentence(figures, motif.sides, units),
+        verdictChange(figures),
+        yarnSentence(figures, units),
+      ].filter((sentence) => sentence !== null)
+    : [isOfGauge ? tooManyRounds(kept) : otherYarn(kept)];
+  return (
+    <li className="border-t border-line py-3 first:border-t-0">
+      <p>
+        <b>{day}</b> <span className="text-ink-2">· {workedWords(kept)}</span>
+      </p>
+      {figures ? null : <p className="tabular-nums">{taped(kept, motif, units)}</p>}
+      {told.map((sentence) => (
+        <p key={sentence} className="max-w-[72ch] text-ink-2 tabular-nums">
+          {sentence}
+        </p>
+      ))}
+      {kept.notes && <p className="max-w-[72ch] whitespace-pre-line">{kept.notes}</p>}
+      <p className="-ms-2 mt-0.5 flex flex-wrap gap-x-1">
+        {onPlan && (
+          <Button
+            kind="quiet"
+            small
+            icon={LayoutGrid}
+            onClick={onPlan}
+            aria-label={`Plan with the one of ${day}`}
+          >
+            Plan with it
+          </Button>
+        )}
+        <Button
+          kind="quiet"
+          small
+          icon={Pencil}
+          onClick={onEdit}
+          aria-label={`Change the one of ${day}`}
+        >
+          Change
+        </Button>
+        <Button
+          kind="quiet"
+          small
+          icon={Trash2}
+          className="text-madder"
+          onClick={onDelete}
+          aria-label={`Delete the one of ${day}`}
+        >
+          Delete
+        </Button>
+      </p>
+    </li>
+  );
+}
+
+/** What the tape read, where it cannot be set beside a gauge. */
+function taped({ sizes }: KeptMade, { sides }: Motif, units: Units): string | null {
+  const last = sizes.at(-1);
+  return last
+    ? `${showFabric(last.acrossMm, units)} ${acrossWord(sides)} after round ${last.round}.`
+    : null;
+}
+
+const tooManyRounds = ({ rounds }: KeptMade): string =>
+  `Show the motif with ${rounds} rounds to set this beside them.`;
+
+const otherYarn = ({ weightCategory }: KeptMade): string =>
+  `Made in ${YARN_CATEGORIES[weightCategory]?.name.toLowerCase()} yarn: choose its gauge above to set this beside it.`;
