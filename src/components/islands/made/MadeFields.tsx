@@ -67,9 +67,12 @@ function SizeFields({ motif, units }: MadeFieldsProps) {
   return (
     <fieldset id="made.sizes" tabIndex={-1} aria-describedby={error && 'made.sizes-error'}>
       <legend className="mb-1 font-bold">
-        The tape, {acrossWord(motif.sides)} <span className="font-normal text-ink-2">after</span>
+        The tape
+        <span className="font-normal text-ink-2">
+          , {acrossWord(motif.sides)}, after each round you measured
+        </span>
       </legend>
-      <div className="grid grid-cols-3 gap-x-2.5 gap-y-2.5">
+      <div className="grid grid-cols-[repeat(auto-fill,minmax(5.25rem,1fr))] gap-2.5">
         {sizes.map(
           ({ round }, i) =>
             !(round > rounds) && (
@@ -104,7 +107,9 @@ function WeightFields({ units }: Pick<MadeFieldsProps, 'units'>) {
   const { word, m } = YARN_UNIT[units];
   return (
     <fieldset>
-      <legend className="mb-1 font-bold">The scale</legend>
+      <legend className="mb-1 font-bold">
+        The scale<span className="font-normal text-ink-2">, if you weighed them</span>
+      </legend>
       <div className="grid grid-cols-6 gap-x-2.5 gap-y-3">
         <NumberInput
           className="col-span-2"

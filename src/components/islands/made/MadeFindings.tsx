@@ -6,7 +6,14 @@ import { acrossWord } from '../../motifs/motifWords';
 import { Fact } from '../../ui/Fact';
 import { Notice } from '../../ui/Notice';
 import type { MadeFigures } from './madeFigures';
-import { computedWords, sizeGiveOrTake, verdictChange, yarnGiveOrTake } from './madeWords';
+import {
+  computedWords,
+  fineGiveOrTake,
+  fineSize,
+  sizeGiveOrTake,
+  verdictChange,
+  yarnGiveOrTake,
+} from './madeWords';
 import { SizeChart } from './SizeChart';
 
 interface MadeFindingsProps {
@@ -25,12 +32,15 @@ export function MadeFindings({ figures, sides, gaugeName, units }: MadeFindingsP
     <div className="grid content-start gap-5">
       <Fact
         lead={measured ? 'Measured, it comes out' : 'By its rounds alone it comes out'}
-        answer={`${showFabric(shown.acrossMm, units)} ${acrossWord(sides)}`}
+        answer={showFabric(shown.acrossMm, units)}
         live
       >
-        give or take {sizeGiveOrTake(shown.acrossSdMm, units)}
+        {acrossWord(sides)}, give or take {sizeGiveOrTake(shown.acrossSdMm, units)}
         {measured && `; ${computedWords(figures, units)}`} (95&nbsp;% sure), at the gauge of{' '}
-        {gaugeName}.
+        {gaugeName}.{' '}
+        <a className="link font-normal" href="/how-it-works#size">
+          How this is worked out
+        </a>
       </Fact>
       <Questions {...{ figures, units }} />
       {verdict && (
@@ -67,6 +77,8 @@ function Questions({ figures, units }: Pick<MadeFindingsProps, 'figures' | 'unit
   );
 }
 
+const NOTHING = <span className="text-ink-2">–</span>;
+
 /** Every round before and after: the chart in figures. */
 function SizeTable({ figures, sides, units }: Omit<MadeFindingsProps, 'gaugeName'>) {
   const { computed, measured } = figures;
@@ -75,6 +87,9 @@ function SizeTable({ figures, sides, units }: Omit<MadeFindingsProps, 'gaugeName
   return (
     <div role="region" aria-label="Sizes by round" tabIndex={0} className="overflow-x-auto">
       <table className="w-full">
+        <caption className="text-start text-sm text-ink-2">
+          Size {acrossWord(sides)} after each round, in {units === 'metric' ? 'cm' : 'inches'}
+        </caption>
         <thead>
           <tr className="align-bottom text-sm text-ink-2">
             <th scope="col" className="py-1 pe-2 text-start font-normal">
@@ -87,7 +102,7 @@ function SizeTable({ figures, sides, units }: Omit<MadeFindingsProps, 'gaugeName
               the tape
             </th>
             <th scope="col" className={head}>
-              comes out, {acrossWord(sides)}
+              comes out
             </th>
             <th scope="col" className={`${head} pe-0`}>
               fullness
@@ -96,23 +111,28 @@ function SizeTable({ figures, sides, units }: Omit<MadeFindingsProps, 'gaugeName
         </thead>
         <tbody>
           {computed.rounds.map((before, i) => {
-            const after = measured?.rounds[i] ?? before;
+            const measuredRound = measured?.rounds[i];
+            const after = measuredRound ?? before;
             return (
               <tr key={i} className="border-t border-line">
                 <th scope="row" className="py-1.5 pe-2 text-start font-bold whitespace-nowrap">
                   {before.label}
                 </th>
-                <td className={`${figure} text-ink-2`}>{showFabric(before.acrossMm, units)}</td>
+                <td className={`${figure} text-ink-2`}>{fineSize(before.acrossMm, units)}</td>
                 <td className={figure}>
-                  {after.measuredMm === null ? (
-                    <span className="text-ink-2">–</span>
-                  ) : (
-                    showFabric(after.measuredMm, units)
-                  )}
+                  {after.measuredMm === null ? NOTHING : fineSize(after.measuredMm, units)}
                 </td>
                 <td className={figure}>
-                  {showFabric(after.acrossMm, units)}{' '}
-                  <span className="text-ink-2">± {sizeGiveOrTake(after.acrossSdMm, units)}</span>
+                  {measuredRound ? (
+                    <>
+                      {fineSize(measuredRound.acrossMm, units)}{' '}
+                      <span className="text-ink-2">
+                        ± {fineGiveOrTake(measuredRound.acrossSdMm, units)}
+                      </span>
+                    </>
+                  ) : (
+                    NOTHING
+                  )}
                 </td>
                 <td className={`${figure} pe-0`}>
                   <Fullness {...{ before, after }} isEarly={i < 2} />
@@ -133,10 +153,13 @@ function Fullness(props: { before: MeasuredRound; after: MeasuredRound; isEarly:
   if (isEarly) return figure;
   const word = lies(after);
   return (
-    <span className={word === 'flat' ? '' : 'text-amber-ink'}>
-      {figure} {word}
-      {word !== lies(before) && <span className="sr-only">, {lies(before)} by the gauge</span>}
-    </span>
+    <>
+      {figure}{' '}
+      <span className={`text-sm max-sm:block ${word === 'flat' ? 'text-ink-2' : 'text-amber-ink'}`}>
+        {word}
+        {word !== lies(before) && <span className="sr-only">, {lies(before)} by the gauge</span>}
+      </span>
+    </>
   );
 }
 
@@ -157,7 +180,7 @@ function YarnTold({ figures, units }: Pick<MadeFindingsProps, 'figures' | 'units
     );
   }
   const { before, after, gramsPerM } = yarn;
-  const mass = (lengthM: number) => showMass(lengthM * gramsPerM, units);
+  const mass = (lengthM: number) => showMass(lengthM * gramsPerM, 'metric');
   return (
     <div>
       <p className="text-ink-2">Yarn in each</p>
@@ -170,7 +193,7 @@ function YarnTold({ figures, units }: Pick<MadeFindingsProps, 'figures' | 'units
       <p className="text-ink-2 tabular-nums">
         By the gauge alone {showYarn(before.meanM, units)}, {mass(before.meanM)}, give or take{' '}
         {yarnGiveOrTake(before.sdM, units)}; the scale alone says {showYarn(yarn.readM, units)}.{' '}
-        <a className="link font-normal" href="/how-it-works#weighing">
+        <a className="link font-normal" href="/how-it-works#hand">
           How this is worked out
         </a>
       </p>

@@ -9,7 +9,7 @@ import { Button } from '../../ui/Button';
 import { showDay } from '../swatches/swatchWords';
 import type { KeptMade } from './keptMade';
 import { madeFigures } from './madeFigures';
-import { sizeSentence, verdictChange, workedWords, yarnSentence } from './madeWords';
+import { sizeTold, verdictChange, workedWords, yarnTold, type Told } from './madeWords';
 
 interface MadeItemProps {
   kept: KeptMade;
@@ -30,25 +30,27 @@ export function MadeItem(props: MadeItemProps) {
     () => (isOfGauge ? madeFigures(kept, motif, gauge) : null),
     [isOfGauge, kept, motif, gauge],
   );
+  const verdict = figures && verdictChange(figures);
   const day = showDay(kept.madeOn);
-  const told = figures
-    ? [
-        sizeSentence(figures, motif.sides, units),
-        verdictChange(figures),
-        yarnSentence(figures, units),
-      ].filter((sentence) => sentence !== null)
-    : [isOfGauge ? tooManyRounds(kept) : otherYarn(kept)];
   return (
     <li className="border-t border-line py-3 first:border-t-0">
       <p>
         <b>{day}</b> <span className="text-ink-2">· {workedWords(kept)}</span>
       </p>
-      {figures ? null : <p className="tabular-nums">{taped(kept, motif, units)}</p>}
-      {told.map((sentence) => (
-        <p key={sentence} className="max-w-[72ch] text-ink-2 tabular-nums">
-          {sentence}
-        </p>
-      ))}
+      <div className="max-w-[80ch] tabular-nums">
+        {figures ? (
+          <>
+            <Sentence told={sizeTold(figures, motif.sides, units)} />
+            {verdict && <p>{verdict}</p>}
+            <Sentence told={yarnTold(figures, units)} />
+          </>
+        ) : (
+          <>
+            <p>{taped(kept, motif, units)}</p>
+            <p className="text-ink-2">{isOfGauge ? tooManyRounds(kept) : otherYarn(kept)}</p>
+          </>
+        )}
+      </div>
       {kept.notes && <p className="max-w-[72ch] whitespace-pre-line">{kept.notes}</p>}
       <p className="-ms-2 mt-0.5 flex flex-wrap gap-x-1">
         {onPlan && (
@@ -83,6 +85,18 @@ export function MadeItem(props: MadeItemProps) {
         </Button>
       </p>
     </li>
+  );
+}
+
+function Sentence({ told }: { told: Told | null }) {
+  if (!told) return null;
+  const [lead, answer, rest] = told;
+  return (
+    <p className="text-ink-2">
+      {lead}
+      <b className="text-ink">{answer}</b>
+      {rest}
+    </p>
   );
 }
 

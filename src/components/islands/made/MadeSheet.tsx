@@ -1,10 +1,11 @@
 import { useMemo } from 'react';
 import { FormProvider, useWatch } from 'react-hook-form';
 import type { Gauge } from '../../../lib/gauge/gauge';
-import type { Motif } from '../../../lib/motifs/motif';
-import type { Units } from '../../../lib/units/display';
+import type { Motif, MotifSides } from '../../../lib/motifs/motif';
+import { showFabric, showYarn, type Units } from '../../../lib/units/display';
 import type { MadeMotifInput } from '../../../schemas/madeMotif';
 import { madeMotifForm, madeMotifOf, type MadeMotifForm } from '../../../schemas/madeMotifForm';
+import { acrossWord } from '../../motifs/motifWords';
 import { Button } from '../../ui/Button';
 import { Sheet } from '../../ui/Dialog';
 import { ErrorSummary } from '../../ui/ErrorSummary';
@@ -17,9 +18,9 @@ import { useVersionedForm } from '../form/useVersionedForm';
 import { showDay } from '../swatches/swatchWords';
 import { blankMade, madeContent, madeValues, type KeptMade, type MadeOf } from './keptMade';
 import { MadeFields } from './MadeFields';
-import { madeFigures, readableMade } from './madeFigures';
+import { madeFigures, readableMade, type MadeFigures } from './madeFigures';
 import { MadeFindings } from './MadeFindings';
-import { madeWording } from './madeWords';
+import { madeWording, sizeGiveOrTake } from './madeWords';
 
 interface MadeSheetProps {
   /** Null for a new one. */
@@ -66,6 +67,7 @@ export default function MadeSheet(props: MadeSheetProps) {
       description="After any round, as many or as few as you like. Lay it flat and do not pull."
       actions={
         <>
+          {figures && <LiveAnswer figures={figures} sides={motif.sides} units={units} />}
           <Button kind="primary" type="submit" form="made-form" busy={isSaving && 'Saving…'}>
             {saved ? 'Save' : 'Keep it'}
           </Button>
@@ -110,6 +112,29 @@ export default function MadeSheet(props: MadeSheetProps) {
         />
       )}
     </Sheet>
+  );
+}
+
+interface LiveAnswerProps {
+  figures: MadeFigures;
+  sides: MotifSides;
+  units: Units;
+}
+
+/** On a phone the answer stays in view above the keyboard, whatever field is filled in. */
+function LiveAnswer({ figures, sides, units }: LiveAnswerProps) {
+  const { measured, computed, yarn } = figures;
+  const { acrossMm, acrossSdMm } = measured ?? computed;
+  return (
+    <p className="w-full tabular-nums lg:hidden" aria-hidden>
+      <b>
+        {showFabric(acrossMm, units)} {acrossWord(sides)}
+      </b>{' '}
+      <span className="text-ink-2">
+        ± {sizeGiveOrTake(acrossSdMm, units)}
+        {yarn && ` · ${showYarn(yarn.after.meanM, units)} of yarn`}
+      </span>
+    </p>
   );
 }
 

@@ -69,13 +69,13 @@ export function SizeChart({ figures, sides, units }: SizeChartProps) {
       <figcaption className="mt-1 flex flex-wrap gap-x-4 text-sm text-ink-2">
         {measured && <Key look="made">as measured</Key>}
         <Key look="gauge">by the gauge</Key>
-        <Key look="doubt">95&nbsp;% sure</Key>
+        <Key look="doubt">95&nbsp;% sure that it ends in here</Key>
       </figcaption>
     </figure>
   );
 }
 
-const LOOKS = { made: 'fill-teal stroke-teal', gauge: 'fill-sunk stroke-edge' } as const;
+const LOOKS = { made: 'fill-teal-soft stroke-teal', gauge: 'fill-sunk stroke-edge' } as const;
 
 interface BarProps {
   round: MeasuredRound;

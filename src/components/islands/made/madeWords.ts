@@ -1,5 +1,7 @@
+import type { YarnBelief } from '../../../lib/motifs/madeYarn';
 import type { MotifGeometry } from '../../../lib/motifs/geometry';
 import type { MotifSides } from '../../../lib/motifs/motif';
+import { mmToInches } from '../../../lib/units/conversion';
 import { showFabric, showMass, showYarn, type Units } from '../../../lib/units/display';
 import type { MadeMotifInput } from '../../../schemas/madeMotif';
 import { acrossWord } from '../../motifs/motifWords';
@@ -11,11 +13,20 @@ import type { MadeFigures } from './madeFigures';
 const Z95 = 1.96;
 /** What the figures shown can still tell: a tenth of their unit. */
 const LEAST_MM = { metric: 1, imperial: 2.54 } as const;
+const LEAST_FINE_MM = { metric: 1, imperial: 0.254 } as const;
 const LEAST_M = { metric: 0.1, imperial: 0.09144 } as const;
 
 /** "0.2 cm": how far off a size may be, 95 % sure. */
 export const sizeGiveOrTake = (sdMm: number, units: Units): string =>
   showFabric(Math.max(Z95 * sdMm, LEAST_MM[units]), units);
+
+/** A size as finely as a tape reads, without its unit: "13.0", in inches "5.13". */
+export const fineSize = (sizeMm: number, units: Units): string =>
+  units === 'metric' ? (sizeMm / 10).toFixed(1) : mmToInches(sizeMm).toFixed(2);
+
+/** "0.2": how far off such a size may be, 95 % sure, never said to be nothing. */
+export const fineGiveOrTake = (sdMm: number, units: Units): string =>
+  fineSize(Math.max(Z95 * sdMm, LEAST_FINE_MM[units]), units);
 
 export const yarnGiveOrTake = (sdM: number, units: Units): string =>
   showYarn(Math.max(Z95 * sdM, LEAST_M[units]), units);
@@ -24,21 +35,35 @@ export const yarnGiveOrTake = (sdM: number, units: Units): string =>
 export const computedWords = ({ computed }: MadeFigures, units: Units): string =>
   `by its rounds alone ${showFabric(computed.acrossMm, units)}, give or take ${sizeGiveOrTake(computed.acrossSdMm, units)}`;
 
+/** A sentence whose answer is set apart: what comes before it, the answer, and the rest. */
+export type Told = readonly [lead: string, answer: string, rest: string];
+
 /** The size in a sentence, before and after; null while none was taken. */
-export function sizeSentence(figures: MadeFigures, sides: MotifSides, units: Units): string | null {
+export function sizeTold(figures: MadeFigures, sides: MotifSides, units: Units): Told | null {
   const { measured } = figures;
   if (!measured) return null;
-  const comesOut = `${showFabric(measured.acrossMm, units)} ${acrossWord(sides)}`;
   const sure = sizeGiveOrTake(measured.acrossSdMm, units);
-  return `Measured, it comes out ${comesOut}, give or take ${sure}; ${computedWords(figures, units)}.`;
+  return [
+    'Measured, it comes out ',
+    `${showFabric(measured.acrossMm, units)} ${acrossWord(sides)}`,
+    `, give or take ${sure}; ${computedWords(figures, units)}.`,
+  ];
 }
 
 /** The yarn of one in a sentence, before and after; null while none was weighed. */
-export function yarnSentence({ yarn }: MadeFigures, units: Units): string | null {
+export function yarnTold({ yarn }: MadeFigures, units: Units): Told | null {
   if (!yarn) return null;
   const { before, after, gramsPerM } = yarn;
-  const each = `${showYarn(after.meanM, units)} (${showMass(after.meanM * gramsPerM, units)})`;
-  return `Each takes ${each} of yarn, give or take ${yarnGiveOrTake(after.sdM, units)}; by the gauge alone ${showYarn(before.meanM, units)} (${showMass(before.meanM * gramsPerM, units)}), give or take ${yarnGiveOrTake(before.sdM, units)}.`;
+  const both = ({ meanM }: YarnBelief) =>
+    [showYarn(meanM, units), showMass(meanM * gramsPerM, 'metric')] as const;
+  const [length, mass] = both(after);
+  const sure = yarnGiveOrTake(after.sdM, units);
+  const usual = `${both(before).join(', ')}, give or take ${yarnGiveOrTake(before.sdM, units)}`;
+  return [
+    'Each takes ',
+    `${length} of yarn`,
+    `, ${mass}, give or take ${sure}; by the gauge alone ${usual}.`,
+  ];
 }
 
 /** How it lies, where making it showed something else than the gauge says; else null. */
@@ -55,9 +80,9 @@ const lies = ({ trouble }: MotifGeometry): string =>
 export const workedWords = ({ rounds, blocked }: MadeMotifInput): string =>
   `${rounds}\u00a0${rounds === 1 ? 'round' : 'rounds'}${blocked ? ', blocked' : ''}`;
 
-const weightWords = ({ weighed }: MadeMotifInput, units: Units): string =>
+const weightWords = ({ weighed }: MadeMotifInput): string =>
   weighed
-    ? `${weighed.count} weigh ${showMass(weighed.massG, units)}, ${weighed.yarns} ${weighed.yarns === 1 ? 'yarn' : 'yarns'} in each`
+    ? `${weighed.count} weigh ${showMass(weighed.massG, 'metric')}, ${weighed.yarns} ${weighed.yarns === 1 ? 'yarn' : 'yarns'} in each`
     : '';
 
 /** Each part of a made motif in words, to compare two saves of it. */
@@ -69,11 +94,11 @@ export const madeWording = (units: Units): Wording<MadeMotifInput> => [
     ({ sizes }) =>
       sizes.map(({ round, acrossMm }) => `${round}: ${showFabric(acrossMm, units)}`).join(', '),
   ],
-  ['Weight', (made) => weightWords(made, units)],
+  ['Weight', weightWords],
   [
     'Skein',
     ({ putUp }) =>
-      putUp ? `${showMass(putUp.massG, units)}, ${showYarn(putUp.lengthM, units)}` : '',
+      putUp ? `${showMass(putUp.massG, 'metric')}, ${showYarn(putUp.lengthM, units)}` : '',
   ],
   ['Notes', ({ notes }) => notes],
 ];
