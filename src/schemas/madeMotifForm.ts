@@ -27,7 +27,11 @@ export function madeMotifOf({ sizes, weighed, putUp, ...made }: MadeMotifDraft):
 }
 
 const takenSizes = ({ sizes, rounds }: Pick<MadeMotifDraft, 'sizes' | 'rounds'>) =>
-  sizes.filter(({ round, acrossMm }) => acrossMm !== null && !(round > rounds));
+  sizes.filter(({ round, acrossMm }) => acrossMm !== null && !isBeyond(round, rounds));
+
+/** Whether a round was not worked; while the number of rounds cannot be read, none is. */
+export const isBeyond = (round: number, rounds: number): boolean =>
+  Number.isInteger(rounds) && round > rounds;
 
 /** Says what is wrong with what would be kept, beside the fields of the draft. */
 export const madeMotifForm = z

@@ -2,7 +2,7 @@ import { useController, useFormContext, useWatch } from 'react-hook-form';
 import type { Motif } from '../../../lib/motifs/motif';
 import { FABRIC_UNIT, YARN_UNIT, type Units } from '../../../lib/units/display';
 import { KEPT_LIMITS } from '../../../schemas/limits';
-import type { MadeMotifForm } from '../../../schemas/madeMotifForm';
+import { isBeyond, type MadeMotifForm } from '../../../schemas/madeMotifForm';
 import { acrossWord } from '../../motifs/motifWords';
 import { Checkbox } from '../../ui/Checkbox';
 import { Field, TextArea } from '../../ui/Field';
@@ -75,7 +75,7 @@ function SizeFields({ motif, units }: MadeFieldsProps) {
       <div className="grid grid-cols-[repeat(auto-fill,minmax(5.25rem,1fr))] gap-2.5">
         {sizes.map(
           ({ round }, i) =>
-            !(round > rounds) && (
+            !isBeyond(round, rounds) && (
               <NumberInput
                 key={round}
                 control={control}

@@ -1,4 +1,4 @@
-import { useId } from 'react';
+import { useId, type ReactNode } from 'react';
 import type { MeasuredRound } from '../../../lib/motifs/measuredMotif';
 import type { MotifSides } from '../../../lib/motifs/motif';
 import { showFabric, type Units } from '../../../lib/units/display';
@@ -69,6 +69,7 @@ export function SizeChart({ figures, sides, units }: SizeChartProps) {
       <figcaption className="mt-1 flex flex-wrap gap-x-4 text-sm text-ink-2">
         {measured && <Key look="made">as measured</Key>}
         <Key look="gauge">by the gauge</Key>
+        {measured && <Key look="tape">the tape</Key>}
         <Key look="doubt">95&nbsp;% sure that it ends in here</Key>
       </figcaption>
     </figure>
@@ -115,27 +116,30 @@ function Bar({ round, look, x, hatch, yPx, heightPx }: BarProps) {
   );
 }
 
-function Key({
-  look,
-  children,
-}: {
-  look: keyof typeof LOOKS | 'doubt';
-  children: React.ReactNode;
-}) {
+interface KeyProps {
+  look: keyof typeof LOOKS | 'doubt' | 'tape';
+  children: ReactNode;
+}
+
+function Key({ look, children }: KeyProps) {
   const id = useId();
   return (
     <span className="inline-flex items-center gap-1.5">
-      <svg width="18" height="11" className="keeps-colour" aria-hidden>
-        <HatchPattern id={id} />
-        <rect
-          x="0.5"
-          y="0.5"
-          width="17"
-          height="10"
-          {...(look === 'doubt'
-            ? { fill: `url(#${id})`, className: 'stroke-amber-ink' }
-            : { className: LOOKS[look] })}
-        />
+      <svg width={look === 'tape' ? 3 : 18} height="11" className="keeps-colour" aria-hidden>
+        {look === 'doubt' && <HatchPattern id={id} />}
+        {look === 'tape' ? (
+          <line x1="1.5" x2="1.5" y2="11" strokeWidth="2" className="stroke-ink" />
+        ) : (
+          <rect
+            x="0.5"
+            y="0.5"
+            width="17"
+            height="10"
+            {...(look === 'doubt'
+              ? { fill: `url(#${id})`, className: 'stroke-amber-ink' }
+              : { className: LOOKS[look] })}
+          />
+        )}
       </svg>
       {children}
     </span>
