@@ -1,5 +1,6 @@
 import type { Transaction } from 'sequelize';
 import blankets from '../../data/demo/blankets.json';
+import madeMotifs from '../../data/demo/madeMotifs.json';
 import motifs from '../../data/demo/motifs.json';
 import ownStitches from '../../data/demo/ownStitches.json';
 import demo from '../../data/demo/people.json';
@@ -28,6 +29,7 @@ import { updateBlanket } from '../../src/server/commands/updateBlanket';
 import { updateMotif } from '../../src/server/commands/updateMotif';
 import { hashPassword } from '../../src/server/passwordHash';
 import { sequelize, User, UserRole } from '../models';
+import { addMadeMotifs, type DemoMadeMotif } from './demoMadeMotifs';
 import { demoPlan } from './demoPlan';
 
 type Person = (typeof demo.people)[number];
@@ -91,9 +93,10 @@ async function furnish(user: CurrentUser, person: Person, transaction: Transacti
     const colourwayId = colourwayIds.get(`${yarn} ${colour}`);
     await createLot(user, lotInput.parse({ colourwayId, ...lot }), transaction);
   }
+  const swatchIds = new Map<string, string>();
   for (const { yarn, ...swatch } of ownSwatches) {
     const input = swatchInput.parse({ yarnId: yarnIds.get(yarn), ...swatch });
-    await createSwatch(user, input, transaction);
+    swatchIds.set(swatch.name, (await createSwatch(user, input, transaction)).id);
   }
   for (const stitch of ofOwner<unknown>(ownStitches, person)) {
     await createOwnStitch(user, ownStitchInput.parse(stitch), transaction);
@@ -102,6 +105,8 @@ async function furnish(user: CurrentUser, person: Person, transaction: Transacti
   for (const { saves } of ofOwner<{ saves: unknown[] }>(motifs, person)) {
     ownMotifs.push(...(await addMotif(user, saves, transaction)));
   }
+  const kept = { motifs: ownMotifs, swatchIds, yarns };
+  await addMadeMotifs(user, ofOwner<DemoMadeMotif>(madeMotifs, person), kept, transaction);
   for (const blanket of ownBlankets) await addBlanket(user, blanket, ownMotifs, transaction);
 }
 

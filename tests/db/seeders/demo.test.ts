@@ -4,6 +4,7 @@ import {
   BlanketRevision,
   Colourway,
   DyeLot,
+  MadeMotifRow,
   ShoppingList,
   Swatch,
   SwatchMeasurement,
@@ -13,7 +14,12 @@ import {
 import { seedDemo } from '../../../db/seeders/demo';
 import demo from '../../../data/demo/people.json';
 import yarns from '../../../data/demo/yarns.json';
-import { estimate } from '../../../src/lib';
+import { estimate, gaugeOf, lengthM, madeYarn, massG, measuredMotif } from '../../../src/lib';
+import { getMotif } from '../../../src/server/queries/motifs';
+import { presentMadeMotif } from '../../../src/server/presenters/madeMotif';
+import { swatchGauge } from '../../../src/lib/swatches/swatchGauge';
+import { getSwatch } from '../../../src/server/queries/swatches';
+import { presentCurrentUser } from '../../../src/server/presenters/user';
 import { planSchema } from '../../../src/schemas/plan';
 import { ROLES } from '../../../src/schemas/roles';
 import { verifyPassword } from '../../../src/server/passwordHash';
@@ -72,6 +78,29 @@ describe('seedDemo', () => {
     expect(lists.length).toBeGreaterThan(0);
     for (const { lines } of lists) {
       expect(lines.some(({ haveM, toBuySkeins }) => haveM > 0 && toBuySkeins > 0)).toBe(true);
+    }
+  });
+
+  it('has made motifs that hands could make, one of a motif of one’s own', async () => {
+    const rows = await MadeMotifRow.findAll();
+    expect(rows.some(({ motifVersion }) => motifVersion !== null)).toBe(true);
+    for (const row of rows) {
+      const made = presentMadeMotif(row);
+      const owner = presentCurrentUser(
+        (await User.findByPk(row.ownerId, { include: 'roleRows' })) as User,
+      );
+      const { motif } = await getMotif(owner, made.motifKey);
+      const swatch = await getSwatch(owner, made.swatchId as string);
+      const worked = { ...motif!, rounds: motif!.rounds.slice(0, made.rounds) };
+      const { widthMm, heightMm } = swatchGauge({ ...swatch, yarn: null })!;
+      const gauge = gaugeOf({ ...swatch, widthMm, heightMm } as never, made.weightCategory);
+      const skein = { massG: massG(made.putUp!.massG), lengthM: lengthM(made.putUp!.lengthM) };
+      const { rounds } = measuredMotif(worked, gauge, made.sizes);
+      const yarn = madeYarn(worked, made.weighed!, skein, gauge.stitchWidthMm);
+      expect([rounds.some(({ questioned }) => questioned), yarn.questioned]).toEqual([
+        false,
+        false,
+      ]);
     }
   });
 });
