@@ -1,7 +1,7 @@
 import type { Span } from './span';
 
 /**
- * word: letters, or a stitch written in one such as "sc2tog"; number; ordinal: "2nd";
+ * word: letters, or a stitch written in one such as "sc2tog"; number; ordinal: "2nd", "second";
  * mark: one character of punctuation, or "**"; line: an end of line.
  */
 export type TokenKind = 'word' | 'number' | 'ordinal' | 'mark' | 'line' | 'end';

@@ -1,5 +1,6 @@
 import { PATTERN_LIMITS } from './limits';
 import { normalise, type PlainText } from './normalise';
+import { ordinalWord } from './terms/words';
 import type { Token, TokenKind } from './token';
 
 const ORDINAL_ENDS: ReadonlySet<string> = new Set(['st', 'nd', 'rd', 'th']);
@@ -70,7 +71,9 @@ class Scanner {
         return;
       }
     }
-    this.push('word', lettersEnd);
+    const ordinal = ordinalWord(plain.slice(this.at, lettersEnd).toLowerCase());
+    if (ordinal === null) this.push('word', lettersEnd);
+    else this.push('ordinal', lettersEnd, ordinal);
   }
 
   private run(from: number, belongs: (character: string) => boolean): number {
@@ -85,7 +88,7 @@ class Scanner {
     const begin = offsets[this.at] ?? 0;
     this.tokens.push({
       kind,
-      text: kind === 'word' ? written.toLowerCase() : written,
+      text: kind === 'word' || kind === 'ordinal' ? written.toLowerCase() : written,
       written,
       value: Number.isSafeInteger(value) ? value : Number.MAX_SAFE_INTEGER,
       begin,

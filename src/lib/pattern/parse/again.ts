@@ -1,7 +1,7 @@
 import type { RoundsAgain } from '../syntax';
 import { isAmount, readAmount } from './amount';
-import { timesWord } from '../terms/words';
 import type { ParseState } from './parseState';
+import { readHowMany } from './times';
 
 export interface Again extends RoundsAgain {
   /** How often, of "rep Rnd 3 four more times"; 1 where nothing is said. */
@@ -57,17 +57,5 @@ function numbered(state: ParseState): { from: number; to: number } | null {
   return { from, to };
 }
 
-function readHowOften(state: ParseState): number {
-  const start = state.at;
-  const word = timesWord(state.peek().text);
-  if (word !== null) {
-    state.at += 1;
-    state.take('more');
-    return word;
-  }
-  const amount = readAmount(state);
-  state.take('more');
-  if (amount && state.take('times')) return amount.value;
-  state.at = start;
-  return 1;
-}
+/** How often, of "rep Rnd 3 four more times"; 1 where nothing is said. */
+const readHowOften = (state: ParseState): number => readHowMany(state)?.value ?? 1;

@@ -1,38 +1,61 @@
-import type { CountEntry, CountNote } from '../syntax';
-import { readFilter } from './filter';
-import { amountOf, type ParseState } from './parseState';
-import { PATTERN_LIMITS } from '../limits';
+import type { CountNote } from '../syntax';
+import { isAmount } from './amount';
+import { readCountEntries } from './countEntries';
+import { isHeader } from './header';
+import type { ParseState } from './parseState';
 
-/** Words of a count that name nothing this reader counts: "4 corners", "8 petals". */
-const UNCOUNTED: ReadonlySet<string> = new Set(
-  'corner corners group groups petal petals side sides total made increases point points leaf leaves'.split(
-    ' ',
-  ),
-);
+/** Words that a count begins with: "You will have 12 dc", "Stitch count: 12". */
+const LEADS: ReadonlySet<string> = new Set('total you there stitch stitches sts count'.split(' '));
+
+/** The bracket that closes this one, or null. */
+export const closerOf = (open: string): string | null =>
+  open === '(' ? ')' : open === '[' ? ']' : open === '{' ? '}' : null;
+
+/** Counts are set in more kinds of brackets than groups: "<12>", "*12 dc*", in quotes. */
+const noteCloserOf = (open: string): string | null =>
+  open === '<' ? '>' : /^(\*\*?|")$/.test(open) ? open : closerOf(open);
 
 /**
  * A count of what a round makes, in brackets or after a dash at its end: "(12 dc, 4 ch-2 sps)",
- * "[16 sts]", "— 48 dc", "= 48 dc", and `bare` after the join "48 dc". Null, with nothing read, where it is something else.
+ * "[16 sts]", "— 48 dc", "= 48 dc", "Total: 48 dc"; and a sentence of its own, "48 dc.", where `bare`
+ * says that one may stand here. Null, with nothing read, where it is something else.
  */
-export function readCountNote(state: ParseState, bare = false): CountNote | null {
+export function readCountNote(state: ParseState, bare: 'no' | 'at-end' | 'yes'): CountNote | null {
   const start = state.at;
-  const close = closerOf(state.peek().text);
-  const dash = state.isMark('-') || state.isMark('=') || state.isMark(':');
-  if (close === null && !dash && !(bare && state.peek().kind === 'number')) return null;
-  while (state.isMark('-') || state.isMark('=') || state.isMark(':')) state.at += 1;
-  if (close !== null && state.at === start) state.at += 1;
-  const entries = readEntries(state);
-  const ended =
-    entries.length > 0 && (close === null ? endsSentence(state) : state.takeMark(close));
-  if (ended && (close === null || endsSentence(state)))
+  const close = noteCloserOf(state.peek().text);
+  if (close !== null) state.at += 1;
+  const dashed = takeDashes(state);
+  const isBare = close === null && !dashed;
+  if (isBare && (bare === 'no' || !beginsBare(state))) return null;
+  const entries = readCountEntries(state, close);
+  takeDashes(state);
+  const whole =
+    entries !== null &&
+    (close === null ? endsSentence(state) : state.takeMark(close) && ends(state));
+  if (whole && (!isBare || bare === 'yes' || endsRound(state)))
     return { entries, ...state.spanFrom(start) };
   state.at = start;
   return null;
 }
 
-/** Whether a number, in words of its own and not as the beginning of an instruction, is a count: "48 dc." */
-export const closerOf = (open: string): string | null =>
-  open === '(' ? ')' : open === '[' ? ']' : open === '{' ? '}' : null;
+const beginsBare = (state: ParseState): boolean => isAmount(state) || LEADS.has(state.peek().text);
+
+function takeDashes(state: ParseState): boolean {
+  const start = state.at;
+  while (state.peek().kind === 'mark' && /^[-=:~|/]$/.test(state.peek().text)) state.at += 1;
+  return state.at > start;
+}
+
+/** After a bracket the join may still follow: "(12 sc), join". */
+function ends(state: ParseState): boolean {
+  const separated = state.isMark(',') || state.isMark(';');
+  const then = separated ? 1 : 0;
+  const finishes = state.means('join', then) || state.means('turn', then);
+  return (
+    (separated && (finishes || state.isWord('sl', 1) || state.isWord('ss', 1))) ||
+    endsSentence(state)
+  );
+}
 
 function endsSentence(state: ParseState): boolean {
   const { kind } = state.peek();
@@ -49,105 +72,16 @@ function endsSentence(state: ParseState): boolean {
   );
 }
 
-function readEntries(state: ParseState): CountEntry[] {
-  const entries: CountEntry[] = [];
-  for (;;) {
-    skipWords(state, ['total', 'of', 'you', 'have', 'now', 'should', 'sts', 'stitches', 'count']);
-    state.takeMark(':');
-    const entry = readEntry(state);
-    if (entry === null) return [];
-    if (entry !== 'uncounted') entries.push(entry);
-    if (entries.length > PATTERN_LIMITS.countEntries) return [];
-    const more =
-      state.takeMark(',') ||
-      state.takeMark(';') ||
-      state.takeMark('+') ||
-      state.takeMark('&') ||
-      state.takeMark('/');
-    const and = state.take('and') || state.takeMark('&');
-    state.skipLines();
-    if (!more && !and) return entries;
-  }
-}
-
-function readEntry(state: ParseState): CountEntry | 'uncounted' | null {
-  const first = state.at;
-  if (state.peek().kind !== 'number') return null;
-  const numbers = readNumbers(state);
-  const amountSpan = state.spanFrom(first);
-  const of = readNoun(state);
-  if (of === null) return null;
-  skipWords(state, ['total', 'made', 'in', 'all', 'around', 'worked']);
-  const perSide = readPerSide(state);
-  if (of === 'uncounted') return 'uncounted';
-  const byRound = numbers.length > 1 && numbers.length === state.roundsOfLine ? numbers : null;
-  const value = numbers[Math.min(byRound ? 0 : state.size, numbers.length - 1)] ?? 0;
-  const amount = byRound || numbers.length === 1 ? amountOf(value) : { value, sizes: numbers };
-  return { amount, amountSpan, byRound, of, perSide, ...state.spanFrom(first) };
-}
-
-/** "48", "48 (60, 72)", "24, 36, 48". */
-function readNumbers(state: ParseState): number[] {
-  const numbers = [state.peek().value];
-  state.at += 1;
-  const bracket = state.isMark('(') && state.peek(1).kind === 'number';
-  if (bracket) state.at += 1;
-  for (;;) {
-    const separated = state.isMark(',') || state.isMark('/') || state.isMark('-');
-    const ahead = bracket && numbers.length === 1 ? 0 : separated ? 1 : -1;
-    if (ahead < 0 || state.peek(ahead).kind !== 'number' || numbers.length >= PATTERN_LIMITS.sizes)
-      break;
-    // "12 dc, 4 ch-2 sps" is two entries; "24, 36, 48 dc" three numbers of one.
-    if (!bracket && !numberFollowedByNumbersOrNoun(state, ahead)) break;
-    numbers.push(state.peek(ahead).value);
-    state.at += ahead + 1;
-  }
-  if (bracket) state.takeMark(')');
-  return numbers;
-}
-
-const numberFollowedByNumbersOrNoun = (state: ParseState, ahead: number): boolean =>
-  state.peek(ahead + 1).kind === 'word' ||
-  state.isMark(',', ahead + 1) ||
-  state.isMark('/', ahead + 1);
-
-function readNoun(state: ParseState): CountEntry['of'] | 'uncounted' | null {
-  const { kind, text } = state.peek();
-  if (kind === 'word' && UNCOUNTED.has(text)) {
-    state.at += 1;
-    return 'uncounted';
-  }
-  if (kind !== 'word' && kind !== 'number') return { kind: 'all' };
-  if (
-    state.isMark('-', 1) &&
-    state.peek(2).kind === 'word' &&
-    /^groups?$/.test(state.peek(3).text)
-  ) {
-    state.at += 4;
-    return 'uncounted';
-  }
-  const counted = kind === 'number' ? state.stitchHere() : null;
-  if (counted) {
-    state.at = counted.next;
-    return { kind: 'stitch', code: counted.code };
-  }
-  const filter = readFilter(state);
-  if (!filter) return null;
-  if (filter.of === 'space' || filter.of === 'corner-space')
-    return { kind: 'space', chains: filter.chains };
-  if (filter.of === 'corner') return 'uncounted';
-  return filter.code === null ? { kind: 'all' } : { kind: 'stitch', code: filter.code };
-}
-
-/** "per side", "on each side", "each side", "along each side". */
-function readPerSide(state: ParseState): boolean {
-  let ahead = 0;
-  while (/^(per|on|each|along|every|a|between)$/.test(state.peek(ahead).text)) ahead += 1;
-  const found = ahead > 0 && /^(side|sides|corners)$/.test(state.peek(ahead).text);
-  if (found) state.at += ahead + 1;
+/** Whether nothing of the round comes after: a number of stitches there is a count and no instruction. */
+function endsRound(state: ParseState): boolean {
+  const start = state.at;
+  while (state.isMark('.') || state.peek().kind === 'line') state.at += 1;
+  const found =
+    state.peek().kind === 'end' ||
+    isHeader(state) ||
+    state.means('turn') ||
+    state.isWord('fasten') ||
+    state.means('join');
+  state.at = start;
   return found;
-}
-
-function skipWords(state: ParseState, words: readonly string[]): void {
-  while (state.peek().kind === 'word' && words.includes(state.peek().text)) state.at += 1;
 }

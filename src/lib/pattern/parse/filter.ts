@@ -63,7 +63,7 @@ function chainSpace(state: ParseState): PlaceFilter {
   if (state.peek().kind === 'number') {
     const chains = state.checked(state.peek().value, state.peek());
     state.at += 1;
-    if (state.isMark('-')) state.at += 1;
+    takeHyphen(state);
     if (!state.means('corner')) state.take('sp');
     return filterOf('space', null, chains);
   }
@@ -83,9 +83,14 @@ export function isNumberedChain(state: ParseState): boolean {
 function numberedChain(state: ParseState): PlaceFilter {
   const chains = state.checked(state.peek().value, state.peek());
   state.at += state.isMark('-', 1) ? 3 : 2;
-  if (state.isMark('-')) state.at += 1;
+  takeHyphen(state);
   if (!state.means('corner')) state.take('sp');
   return filterOf('space', null, chains);
+}
+
+/** The second hyphen of "ch-2-sp"; the dash of "ch-3 - 12 dc" begins a count. */
+function takeHyphen(state: ParseState): void {
+  if (state.isMark('-') && (state.means('sp', 1) || state.means('corner', 1))) state.at += 1;
 }
 
 /** "each dc and ch-1 sp", "each st and each sp": both kinds. */

@@ -31,7 +31,7 @@ export const isRepeatLine = (state: ParseState): boolean =>
   state.at > 0 &&
   state.last().kind === 'line' &&
   state.means('repeat') &&
-  [1, 2].some((ahead) => state.means('round', ahead) || state.means('row', ahead));
+  [1, 2, 3, 4].some((ahead) => state.means('round', ahead) || state.means('row', ahead));
 
 /** Tokens of "Rnd 1", "Rnds 3-5", "1st Rnd", "Next rnd", "R4"; 0 where none of them stands. */
 function headerLength(state: ParseState): number {

@@ -35,6 +35,13 @@ function readOne(state: ParseState, close: string | null, steps: Step[]): boolea
     state.at += 1;
     return true;
   }
+  if (state.depth === 0) {
+    const note = readCountNote(state, bareCount(state, steps));
+    if (note) {
+      if (note.entries.length > 0) state.note ??= note;
+      return true;
+    }
+  }
   if (beginsSentence(state)) {
     const end = sentenceEnd(state);
     const rule = readChainRule(state, end);
@@ -44,14 +51,6 @@ function readOne(state: ParseState, close: string | null, steps: Step[]): boolea
     }
     if (isComment(state, end)) {
       state.comments.push(skipComment(state, end));
-      return true;
-    }
-  }
-  if (state.depth === 0) {
-    const afterJoin = steps.at(-1)?.kind === 'join' && /^(\.|\n)$/.test(state.last().text);
-    const note = readCountNote(state, afterJoin);
-    if (note) {
-      state.note ??= note;
       return true;
     }
   }
@@ -84,6 +83,14 @@ function readMark(state: ParseState, close: string | null, steps: Step[]): boole
     state.at += 1;
   }
   return true;
+}
+
+/** Whether "12 dc." here is a count: after the join, or where all of the round has been said. */
+function bareCount(state: ParseState, steps: readonly Step[]): Parameters<typeof readCountNote>[1] {
+  if (!/^(\.|\n)$/.test(state.last().text)) return 'no';
+  if (steps.at(-1)?.kind === 'join') return 'yes';
+  const worked = steps.some(({ kind }) => /^(stitch|group|repeat)$/.test(kind));
+  return worked ? 'at-end' : 'no';
 }
 
 /** Whether a sentence begins here: after a full stop, at the beginning of a line or of the text. */

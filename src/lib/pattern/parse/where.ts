@@ -6,6 +6,7 @@ import { amountOf, type ParseState } from './parseState';
 import { readUntil } from './until';
 
 const TO_THE_END: Until = { to: 'end', word: 'around' };
+const REST: Until = { to: 'end', word: 'to end' };
 
 /**
  * Where stitches are worked, all the places that are named one after another:
@@ -111,7 +112,7 @@ function readEach(state: ParseState): Where | null {
   state.take('of');
   state.skipFillers();
   correctWord(state);
-  if (state.means('next')) return readNext(state);
+  if (state.means('next')) return eachNext(state);
   if (state.means('last')) return readLast(state);
   if (state.means('remaining')) return readRemaining(state);
   if (state.means('first')) {
@@ -130,6 +131,14 @@ function readEach(state: ParseState): Where | null {
   return { kind: 'each', filter, until: until ?? TO_THE_END };
 }
 
+/** "each of next 3 dc"; "each following dc around" is each of them. */
+function eachNext(state: ParseState): Where | null {
+  const where = readNext(state);
+  if (where?.kind !== 'next' || where.amount.value !== 1) return where;
+  const until = readUntil(state);
+  return until ? { kind: 'each', filter: where.filter, until } : where;
+}
+
 function readLast(state: ParseState): Where | null {
   state.at += 1;
   const amount = isPlainAmount(state) ? readAmount(state) : null;
@@ -146,7 +155,7 @@ function readRemaining(state: ParseState): Where | null {
     return readLast(state);
   }
   const filter = readFilter(state);
-  return filter && { kind: 'each', filter, until: { to: 'end', word: 'to end' } };
+  return filter && { kind: 'each', filter, until: readUntil(state) ?? REST };
 }
 
 function readAny(state: ParseState): Where | null {
@@ -184,7 +193,8 @@ function readBeginning(state: ParseState): Where | null {
       return { kind: 'first', filter };
     }
   }
-  if (state.isMark('-') && state.peek(1).kind === 'number') state.at += 2;
+  if (state.isMark('-') && state.last().kind === 'word' && state.peek(1).kind === 'number')
+    state.at += 2;
   return { kind: 'turning-chain' };
 }
 

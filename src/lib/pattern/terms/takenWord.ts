@@ -2,7 +2,7 @@ import { tokenize } from '../tokenize';
 import { lexiconOf } from './lexicon';
 import { readStitch } from './readStitch';
 import { COMPOUND_WORDS, INSERTION_WORDS, NAME_BEGINNINGS, STITCH_WORDS } from './stitchWords';
-import { meaningOf, numberWord, PLAIN_WORDS, timesWord } from './words';
+import { meaningOf, numberWord, ordinalWord, PLAIN_WORDS, timesWord } from './words';
 
 /** Words that the parser asks for by themselves, beside those of `words.ts`. */
 const PARSER_WORDS: ReadonlySet<string> = new Set(
@@ -32,6 +32,7 @@ const isKnownWord = (word: string): boolean =>
   PLAIN_WORDS.has(word) ||
   meaningOf(word) !== null ||
   numberWord(word) !== null ||
+  ordinalWord(word) !== null ||
   timesWord(word) !== null ||
   INSERTION_WORDS.has(word) ||
   NAME_BEGINNINGS.has(word) ||

@@ -5,7 +5,7 @@ const SPELLINGS: Readonly<Record<string, readonly string[]>> = {
   repeat: ['rep', 'reps', 'repeat', 'repeats', 'repeating'],
   from: ['from'],
   in: ['in', 'into', 'inside', 'on', 'over', 'through'],
-  next: ['next', 'nxt', 'foll', 'following'],
+  next: ['next', 'nxt', 'foll', 'following', 'subsequent'],
   same: ['same'],
   each: ['each', 'ea', 'every', 'all', 'both'],
   around: ['around'],
@@ -27,26 +27,27 @@ const SPELLINGS: Readonly<Record<string, readonly string[]>> = {
   ],
   skip: ['sk', 'skip', 'skipping', 'miss', 'missing'],
   join: ['join', 'joining', 'joined', 'attach', 'rejoin'],
+  between: ['between', 'bet', 'btw'],
   turn: ['turn', 'turning'],
   ring: ['ring', 'circle'],
   times: ['times', 'time', 'x'],
   more: ['more'],
   end: ['end'],
   last: ['last', 'final'],
-  remaining: ['remaining', 'rem'],
+  remaining: ['remaining', 'rem', 'remain', 'remains'],
   first: ['first', '1st'],
   beginning: ['beg', 'beginning', 'starting', 'initial', 'begin', 'start'],
   top: ['top'],
   corner: ['corner', 'corners', 'cnr'],
-  middle: ['center', 'centre', 'middle', 'mid'],
+  middle: ['center', 'centre', 'middle', 'mid', 'ctr'],
   any: ['any'],
   with: ['with', 'using', 'w'],
   counts: ['counts', 'count', 'counted', 'counting'],
   as: ['as'],
   and: ['and'],
-  to: ['to', 'until'],
+  to: ['to', 'until', 'till'],
   of: ['of'],
-  previous: ['prev', 'previous'],
+  previous: ['prev', 'previous', 'preceding'],
   hook: ['hook'],
   // Words that change nothing.
   filler: [
@@ -63,6 +64,9 @@ const SPELLINGS: Readonly<Record<string, readonly string[]>> = {
     'place',
     'worked',
     'made',
+    'evenly',
+    'loosely',
+    'again',
   ],
 };
 
@@ -86,6 +90,16 @@ const NUMBERS = 'one two three four five six seven eight nine ten eleven twelve'
 /** "twice" is 2; null for any other word. */
 export const timesWord = (word: string): number | null =>
   Object.hasOwn(TIMES, word) ? (TIMES[word] as number) : null;
+
+/** "second" to "twelfth"; "first" is a word of its own. */
+const ORDINALS =
+  'second third fourth fifth sixth seventh eighth ninth tenth eleventh twelfth'.split(' ');
+
+/** "third" is 3, from "second" to "twelfth"; null for any other word. */
+export function ordinalWord(word: string): number | null {
+  const index = ORDINALS.indexOf(word);
+  return index < 0 ? null : index + 2;
+}
 
 /** "four" is 4, up to twelve; null for any other word. */
 export function numberWord(word: string): number | null {

@@ -119,7 +119,27 @@ function madeOf(
   const picots = round.stitches.filter(({ code, role }) => role === 'picot' && code === of.code);
   const same = stitches.filter(({ code }) => code === of.code);
   const family = stitches.filter(({ code }) => familyOf(code) === familyOf(of.code));
-  const values = [same.length + picots.length, family.length].map(share);
+  const clusters = family.length === 0 ? groupsCalledClusters(round, of.code) : [];
+  const values = [...clusters, same.length + picots.length, family.length].map(share);
   const noun = abbreviationOf(of.code);
   return { values, noun: perSide ? `${noun} on each side` : noun };
+}
+
+/** Where nothing is drawn together, "3-dc clusters" are groups of 3 dc: how many stand apart from one another. */
+function groupsCalledClusters(round: WorkedRound, code: string): number[] {
+  const [, base, legs] = /^([a-z]+)(\d+)cl$/.exec(code) ?? [];
+  if (!base) return [];
+  const into = new Map(round.stitches.map((each) => [each.place, JSON.stringify(each.into)]));
+  let groups = 0;
+  let length = 0;
+  const end = (): void => {
+    if (length === Number(legs)) groups += 1;
+    length = 0;
+  };
+  round.places.forEach((place, i) => {
+    if (place.kind === 'space' || into.get(i) !== into.get(i - 1)) end();
+    if (place.code === base) length += 1;
+  });
+  end();
+  return groups > 0 ? [groups] : [];
 }
