@@ -16,6 +16,8 @@ interface MadeItemProps {
   /** The gauge shown is of a yarn like that it was made in. */
   isOfGauge: boolean;
   motif: Motif;
+  /** The save that is shown. */
+  motifVersion: number | null;
   gauge: Gauge;
   units: Units;
   onPlan?: () => void;
@@ -25,7 +27,8 @@ interface MadeItemProps {
 
 /** One made motif of the list: what it told, and what can be done with it. */
 export function MadeItem(props: MadeItemProps) {
-  const { kept, isOfGauge, motif, gauge, units, onPlan, onEdit, onDelete } = props;
+  const { kept, isOfGauge, motif, motifVersion, gauge, units, onPlan, onEdit, onDelete } = props;
+  const isShown = kept.rounds <= motif.rounds.length;
   const figures = useMemo(
     () => (isOfGauge ? madeFigures(kept, motif, gauge) : null),
     [isOfGauge, kept, motif, gauge],
@@ -35,7 +38,13 @@ export function MadeItem(props: MadeItemProps) {
   return (
     <li className="border-t border-line py-3 first:border-t-0">
       <p>
-        <b>{day}</b> <span className="text-ink-2">· {workedWords(kept)}</span>
+        <b>{day}</b>{' '}
+        <span className="text-ink-2">
+          · {workedWords(kept)}
+          {kept.motifVersion !== motifVersion &&
+            kept.motifVersion !== null &&
+            ` · from version ${kept.motifVersion}`}
+        </span>
       </p>
       <div className="max-w-[80ch] tabular-nums">
         {figures ? (
@@ -47,13 +56,13 @@ export function MadeItem(props: MadeItemProps) {
         ) : (
           <>
             <p>{taped(kept, motif, units)}</p>
-            <p className="text-ink-2">{isOfGauge ? tooManyRounds(kept) : otherYarn(kept)}</p>
+            <p className="text-ink-2">{isShown ? otherYarn(kept) : tooManyRounds(kept)}</p>
           </>
         )}
       </div>
       {kept.notes && <p className="max-w-[72ch] whitespace-pre-line">{kept.notes}</p>}
       <p className="-ms-2 mt-0.5 flex flex-wrap gap-x-1">
-        {onPlan && (
+        {onPlan && isShown && (
           <Button
             kind="quiet"
             small

@@ -74,7 +74,7 @@ export function MadeMotifs(props: MadeMotifsProps) {
                 key={each.id}
                 kept={each}
                 isOfGauge={isOfGauge(each, of)}
-                {...{ motif, gauge, units }}
+                {...{ motif, motifVersion, gauge, units }}
                 onPlan={onPlan && (() => onPlan(each))}
                 onEdit={() => setWriting({ kept: each })}
                 onDelete={() => setLeaving(each)}

@@ -451,6 +451,12 @@ describe('a made motif that the page cannot set beside its figures', () => {
     expect(text(items()[0])).toContain(
       '19 cm a side after round 6.Show the motif with 6 rounds to set this beside them.',
     );
+    expect(screen.queryByRole('button', { name: /^Plan with/ })).toBeNull();
+  });
+
+  it('of an earlier save says which', () => {
+    show([{ ...kept, motifVersion: 1 }], { motifVersion: 3 });
+    expect(text(items()[0])).toMatch(/^28 Nov 2026 · 4 rounds, blocked · from version 1Measured/);
   });
 
   it('of another yarn asks for its gauge', () => {
