@@ -9,7 +9,7 @@ import { Button } from '../../ui/Button';
 import { showDay } from '../swatches/swatchWords';
 import type { KeptMade } from './keptMade';
 import { madeFigures } from './madeFigures';
-import { sizeTold, verdictChange, workedWords, yarnTold, type Told } from './madeWords';
+import { doubtWords, sizeTold, verdictChange, workedWords, yarnTold, type Told } from './madeWords';
 
 interface MadeItemProps {
   kept: KeptMade;
@@ -34,6 +34,7 @@ export function MadeItem(props: MadeItemProps) {
     [isOfGauge, kept, motif, gauge],
   );
   const verdict = figures && verdictChange(figures);
+  const doubt = figures && doubtWords(figures);
   const day = showDay(kept.madeOn);
   return (
     <li className="border-t border-line py-3 first:border-t-0">
@@ -51,6 +52,7 @@ export function MadeItem(props: MadeItemProps) {
           <>
             <Sentence told={sizeTold(figures, motif.sides, units)} />
             {verdict && <p>{verdict}</p>}
+            {doubt && <p className="text-amber-ink">{doubt}</p>}
             <Sentence told={yarnTold(figures, units)} />
           </>
         ) : (

@@ -76,6 +76,15 @@ export function verdictChange({ computed, measured }: MadeFigures): string | nul
 const lies = ({ trouble }: MotifGeometry): string =>
   trouble ? `${trouble.kind} from ${trouble.label} on` : 'lies flat';
 
+/** What to look at again, where a reading is further from the gauge than hands differ; else null. */
+export function doubtWords({ measured, yarn }: MadeFigures): string | null {
+  const isSizeOdd = measured?.rounds.some(({ questioned }) => questioned) ?? false;
+  const what = [isSizeOdd && 'size', yarn?.questioned && 'weight'].filter(Boolean);
+  return what.length > 0
+    ? `Check the ${what.join(' and the ')}: further from the gauge than hands differ.`
+    : null;
+}
+
 /** "4 rounds, blocked" */
 export const workedWords = ({ rounds, blocked }: MadeMotifInput): string =>
   `${rounds}\u00a0${rounds === 1 ? 'round' : 'rounds'}${blocked ? ', blocked' : ''}`;

@@ -454,6 +454,14 @@ describe('a made motif that the page cannot set beside its figures', () => {
     expect(screen.queryByRole('button', { name: /^Plan with/ })).toBeNull();
   });
 
+  it('of a size and a weight that no hand would make asks about them', () => {
+    const weighed = { ...content.weighed!, massG: 440 };
+    show([{ ...kept, sizes: [{ round: 4, acrossMm: 400 }], weighed }]);
+    expect(text(items()[0])).toContain(
+      'Check the size and the weight: further from the gauge than hands differ.',
+    );
+  });
+
   it('of an earlier save says which', () => {
     show([{ ...kept, motifVersion: 1 }], { motifVersion: 3 });
     expect(text(items()[0])).toMatch(/^28 Nov 2026 · 4 rounds, blocked · from version 1Measured/);
