@@ -58,10 +58,6 @@ export const madeMotifUpdate = strict('Made motif', { ...madeMotifFields, versio
   checkMade,
 );
 
-/** What the form of a made motif holds; its fields' ids begin with "made". */
-export const madeMotifForm = strict('Form', { made: madeMotifInput });
-export type MadeMotifForm = { made: MadeMotifInput };
-
 function checkMade(made: MadeMotifInput, issues: z.RefinementCtx): void {
   const refuse = (path: (string | number)[], message: string) =>
     issues.addIssue({ code: 'custom', path, message });
@@ -109,4 +105,3 @@ export const madeMotifListSchema = listOf(madeMotifSchema);
 
 /** `?motif=…`: those made of one motif. */
 export const madeMotifsQuery = listQuery.extend({ motif: motifKey.optional() });
-export type MadeMotifsQuery = z.output<typeof madeMotifsQuery>;

@@ -9,7 +9,7 @@ import { withEvidence, withMotif } from './edits';
 import type { Plan, PlanEvidence } from './plan';
 
 /** A yarn that runs this much further or less far to the gram is another yarn (common practice, no source). */
-export const ANOTHER_YARN = 0.1;
+const ANOTHER_YARN = 0.1;
 
 /** A motif that was made, and what it measured. */
 export interface MadeMotif {
