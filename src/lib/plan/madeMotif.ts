@@ -4,9 +4,9 @@ import type { RoundSize } from '../motifs/heightBelief';
 import { countedMotifs, readingOf, type WeighedMotifs } from '../motifs/madeYarn';
 import { measuredMotif } from '../motifs/measuredMotif';
 import type { Motif } from '../motifs/motif';
-import { widthMm } from '../units/quantities';
+import { lengthM, massG, widthMm } from '../units/quantities';
 import { withEvidence, withMotif } from './edits';
-import type { Plan, PlanEvidence } from './plan';
+import type { Plan, PlanEvidence, WeightCategory } from './plan';
 
 /** A yarn that runs this much further or less far to the gram is another yarn (common practice, no source). */
 const ANOTHER_YARN = 0.1;
@@ -17,15 +17,17 @@ export interface MadeMotif {
   readonly rounds: number;
   readonly sizes: readonly RoundSize[];
   readonly weighed: WeighedMotifs | null;
-  /** Of the yarn it was made in; known wherever it was weighed. */
+  /** Of the yarn it was made in. */
+  readonly weightCategory: WeightCategory;
+  /** Of that yarn too; known wherever it was weighed. */
   readonly putUp: { readonly massG: number; readonly lengthM: number } | null;
 }
 
 /**
  * The plan of this motif with what making it told: its measured size, and its weight as evidence.
  * `motif` is planned as it is given. A size is taken only where it was measured after the last round
- * planned, because one that is worked out is not a measured one; a weight only of the plan's kind of
- * yarn, because a hand is learnt in one yarn.
+ * planned, because one that is worked out is not a measured one. Made in another yarn than the
+ * plan's, it brings its own: swatch and weights in the old one say nothing about it.
  * Throws DomainError where more rounds were made than the motif has.
  */
 export function withMadeMotif(plan: Plan, motif: Motif, made: MadeMotif): Plan {
@@ -36,25 +38,47 @@ export function withMadeMotif(plan: Plan, motif: Motif, made: MadeMotif): Plan {
       `withMadeMotif requires a motif of at least the ${made.rounds} rounds made, got ${planned}`,
     );
   }
-  const changed = withMotif(plan, motif);
+  const changed = withMotif(inYarnOf(plan, made), motif);
   const isMeasured = made.sizes.some(({ round }) => round === planned);
-  const gauge = gaugeOf(plan.swatch, plan.yarn.weightCategory);
+  const gauge = gaugeOf(changed.swatch, changed.yarn.weightCategory);
   const sized: Plan = isMeasured
     ? { ...changed, motifSideMm: widthMm(measuredMotif(motif, gauge, made.sizes).acrossMm) }
     : changed;
-  const weighed = inYarnOf(plan, made);
+  const weighed = weightInPlan(sized, made);
   return weighed ? withWeighing(sized, made.rounds, weighed) : sized;
 }
 
-/** The weight in grams of the plan's yarn, which may run a little differently; null of another yarn. */
-function inYarnOf({ yarn }: Plan, { weighed, putUp }: MadeMotif): WeighedMotifs | null {
-  if (!weighed || !putUp) return null;
-  const factor = putUp.lengthM / putUp.massG / (yarn.putUp.lengthM / yarn.putUp.massG);
-  if (Math.abs(factor - 1) > ANOTHER_YARN) return null;
+/** How much further the yarn it was made in runs to the gram than the plan's; null where not known. */
+function runsFurther({ yarn }: Plan, { putUp }: MadeMotif): number | null {
+  return putUp && putUp.lengthM / putUp.massG / (yarn.putUp.lengthM / yarn.putUp.massG);
+}
+
+/** The plan in the yarn of the made motif, where that is another. */
+function inYarnOf(plan: Plan, made: MadeMotif): Plan {
+  const { putUp, weightCategory } = made;
+  const factor = runsFurther(plan, made);
+  if (!putUp || factor === null || Math.abs(factor - 1) <= ANOTHER_YARN) return plan;
   return {
-    ...weighed,
-    massG: weighed.massG * factor,
-    resolutionG: weighed.resolutionG * factor,
+    ...plan,
+    yarn: {
+      name: 'The yarn it was made in',
+      weightCategory,
+      putUp: { massG: massG(putUp.massG), lengthM: lengthM(putUp.lengthM) },
+      price: null,
+    },
+    swatch: null,
+    evidence: [],
+  };
+}
+
+/** The weight in grams of the plan's yarn, which may run a little further or less far. */
+function weightInPlan(plan: Plan, made: MadeMotif): WeighedMotifs | null {
+  const factor = runsFurther(plan, made);
+  if (!made.weighed || factor === null) return null;
+  return {
+    ...made.weighed,
+    massG: made.weighed.massG * factor,
+    resolutionG: made.weighed.resolutionG * factor,
   };
 }
 

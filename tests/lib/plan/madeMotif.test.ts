@@ -14,6 +14,7 @@ const made: MadeMotif = frozen({
   rounds: 4,
   sizes: [{ round: 4, acrossMm: 1.06 * acrossMm }],
   weighed: { count: 3, massG: 30, resolutionG: 1, yarns: 4 },
+  weightCategory: plan.yarn.weightCategory,
   putUp: plan.yarn.putUp,
 });
 
@@ -54,13 +55,29 @@ describe('withMadeMotif', () => {
     expect(withMadeMotif(once, hexagon, made)).toEqual(once);
   });
 
-  it('states the weight in grams of the plan’s yarn, and takes none of another yarn', () => {
+  it('states the weight in grams of the plan’s yarn where that runs a little further', () => {
     const { massG, lengthM } = plan.yarn.putUp;
     const longer = { ...made, putUp: { massG, lengthM: 1.05 * lengthM } };
-    const { reading } = withMadeMotif(plan, hexagon, longer).evidence[0]!;
+    const changed = withMadeMotif(plan, hexagon, longer);
+    const { reading } = changed.evidence[0]!;
     expect(reading.by === 'weighing' && reading.massG).toBeCloseTo(31.5, 10);
-    const another = { ...made, putUp: { massG, lengthM: 2 * lengthM } };
-    expect(withMadeMotif(plan, hexagon, another).evidence).toEqual([]);
+    expect(changed.yarn).toBe(plan.yarn);
+  });
+
+  it('plans in the yarn it was made in where that is another, without what the old one told', () => {
+    const other = { ...made, weightCategory: 5, putUp: { massG: 100, lengthM: 110 } } as const;
+    const full = buildPlan();
+    const changed = withMadeMotif(full, hexagon, other);
+    expect(changed.yarn).toEqual({
+      name: 'The yarn it was made in',
+      weightCategory: 5,
+      putUp: { massG: 100, lengthM: 110 },
+      price: null,
+    });
+    expect([changed.swatch, changed.evidence.length]).toEqual([null, 1]);
+    expect([full.swatch, full.evidence.length]).not.toEqual([null, 1]);
+    expect(changed.evidence[0]?.reading).toEqual(weighed(30, 1));
+    expect(planSchema.safeParse(structuredClone(changed)).success).toBe(true);
   });
 
   it('keeps what was weighed before', () => {
