@@ -1,4 +1,3 @@
-import { DomainError } from '../errors';
 import { UNMEASURED_HEIGHT_SPREAD, UNMEASURED_WIDTH_SPREAD, type Gauge } from '../gauge/gauge';
 import { READING_TOLERANCE } from '../ledger/notices';
 import { dot } from '../stats/linear';
@@ -13,6 +12,7 @@ import {
 } from './geometry';
 import { heightBelief, tapeErrorMm, type RoundSize } from './heightBelief';
 import type { Motif } from './motif';
+import { requireSizes } from './requireSizes';
 
 export interface MeasuredRound extends RoundGeometry {
   /** Standard deviation of `acrossMm`. */
@@ -93,26 +93,3 @@ const widthShare = ({ source }: Gauge): number =>
   source === 'swatch'
     ? 0
     : UNMEASURED_WIDTH_SPREAD ** 2 / (UNMEASURED_WIDTH_SPREAD ** 2 + UNMEASURED_HEIGHT_SPREAD ** 2);
-
-function requireSizes({ rounds }: Motif, sizes: readonly RoundSize[]): void {
-  const outside = sizes.find(
-    ({ round }) => !(Number.isInteger(round) && round >= 1 && round <= rounds.length),
-  );
-  if (outside) {
-    throw new DomainError(
-      'no-such-round',
-      `measuredMotif requires rounds 1 to ${rounds.length}, got ${outside.round}`,
-    );
-  }
-  const byRound = [...sizes].sort((a, b) => a.round - b.round);
-  byRound.forEach(({ round, acrossMm }, i) => {
-    const before = byRound[i - 1];
-    const isGrown = acrossMm > (before?.acrossMm ?? 0) && acrossMm < Infinity;
-    if (!isGrown || before?.round === round) {
-      throw new DomainError(
-        'sizes-do-not-grow',
-        `measuredMotif requires sizes that grow from round to round, got ${acrossMm} after round ${round}`,
-      );
-    }
-  });
-}
