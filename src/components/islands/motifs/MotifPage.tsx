@@ -1,5 +1,6 @@
 import type { GaugeSwatch } from '../../../lib/swatches/swatchRecord';
 import type { Units } from '../../../lib/units/display';
+import type { PresentedMadeMotif } from '../../../schemas/madeMotif';
 import type { PresentedMotif, PresentedMotifVersion } from '../../../schemas/motif';
 import type { PresentedOwnStitch } from '../../../schemas/ownStitch';
 import type { Terms } from '../../planner/stitchWord';
@@ -12,6 +13,9 @@ export interface MotifPageProps {
   /** Saves of a motif of one's own, newest first. */
   versions: PresentedMotifVersion[];
   stitches: PresentedOwnStitch[];
+  /** Motifs that the person made of it and measured. */
+  made: PresentedMadeMotif[];
+  signedIn: boolean;
   swatches: GaugeSwatch[];
   units: Units;
   terms: Terms;

@@ -16,20 +16,20 @@ import { StitchesSection } from '../pattern/StitchesSection';
 import { usePatternDraft, type PatternDraft } from '../pattern/usePatternDraft';
 import { useOwnStitches } from '../stitches/useOwnStitches';
 import { DeleteMotif } from './DeleteMotif';
-import { JoinFits } from './JoinFits';
+import { BelowMotif } from './BelowMotif';
 import type { MotifPageProps } from './MotifPage';
 import { MotifVersions } from './MotifVersions';
 import { useMotifSaving } from './useMotifSaving';
 
 /** A motif of one's own: changed in its text, saved as its next version. */
 export function OwnMotif(props: MotifPageProps) {
-  const { presented, versions, swatches, units, terms } = props;
+  const { presented, versions, swatches, made, signedIn, units, terms } = props;
   const saving = useMotifSaving(presented);
   const { kept, version, conflict } = saving;
   const { key } = kept;
   const { draft, setDraft, isChanged } = usePatternDraft(draftOf(kept), key);
   useLeaveWarning(isChanged);
-  const own = useOwnStitches({ signedIn: true, initial: props.stitches });
+  const own = useOwnStitches({ signedIn, initial: props.stitches });
   const keptStitches = kept.pattern.stitches;
   const stitches = useMemo(
     () => withKept(own.stitches, keptStitches),
@@ -114,7 +114,9 @@ export function OwnMotif(props: MotifPageProps) {
             />
           </div>
         }
-        below={(shown) => <JoinFits {...shown} />}
+        below={(shown) => (
+          <BelowMotif {...{ shown, made, signedIn }} motifKey={key} motifVersion={version} />
+        )}
       />
       {conflict && (
         <ConflictDialog

@@ -1,14 +1,15 @@
 import { PencilLine } from 'lucide-react';
 import { ButtonLink } from '../../ui/Button';
 import { PatternEditor } from '../pattern/PatternEditor';
-import { JoinFits } from './JoinFits';
+import { BelowMotif } from './BelowMotif';
 import type { MotifPageProps } from './MotifPage';
 
 /** Rounds that a ready-made motif is shown with: most can be worked to many more. */
 const FIRST_ROUNDS = 4;
 
 /** A ready-made motif: to look at, to plan, to change as one's own. */
-export function ReadyMotif({ presented, swatches, units, terms }: MotifPageProps) {
+export function ReadyMotif(props: MotifPageProps) {
+  const { presented, swatches, made, signedIn, units, terms } = props;
   const { key, pattern, version } = presented;
   return (
     <PatternEditor
@@ -23,7 +24,9 @@ export function ReadyMotif({ presented, swatches, units, terms }: MotifPageProps
           Change it as my own
         </ButtonLink>
       }
-      below={(shown) => <JoinFits {...shown} />}
+      below={(shown) => (
+        <BelowMotif {...{ shown, made, signedIn }} motifKey={key} motifVersion={version} />
+      )}
     />
   );
 }

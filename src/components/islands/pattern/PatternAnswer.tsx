@@ -51,7 +51,7 @@ export function PatternAnswer(props: PatternAnswerProps & { actions?: ReactNode 
           kind="primary"
           icon={LayoutGrid}
           aria-disabled={planning.why !== null}
-          onClick={planning.plan}
+          onClick={() => planning.plan()}
         >
           Plan a blanket
         </Button>
@@ -82,7 +82,7 @@ export function PatternBar({ reading, geometry, units, planning }: PatternAnswer
       detail={problemsInWords(diagnostics)}
       action={
         planning.why === null && (
-          <Button kind="primary" onClick={planning.plan}>
+          <Button kind="primary" onClick={() => planning.plan()}>
             Plan
           </Button>
         )

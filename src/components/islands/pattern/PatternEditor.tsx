@@ -38,7 +38,7 @@ import { nextProblem, Problems } from './Problems';
 import { ReadRounds } from './ReadRounds';
 import type { PatternDraft } from './usePatternDraft';
 import { usePatternReading } from './usePatternReading';
-import { usePlanning } from './usePlanning';
+import { usePlanning, type Planning } from './usePlanning';
 
 /** Fetched once there is something to draw. */
 const SymbolChart = lazy(async () => ({
@@ -54,6 +54,8 @@ export interface ShownMotif {
   gaugeChoice: GaugeChoice | undefined;
   units: Units;
   terms: Terms;
+  /** Goes to the estimator with what a made one has told. */
+  onPlan: Planning['plan'];
 }
 
 export interface PatternEditorProps {
@@ -251,7 +253,12 @@ export function PatternEditor(props: PatternEditorProps) {
               onGo={goToRound}
             />
           </section>
-          {below?.({ motif, gauge, gaugeChoice: read.gaugeChoice, units, terms: shownTerms })}
+          {below?.({
+            ...{ motif, gauge, units },
+            gaugeChoice: read.gaugeChoice,
+            terms: shownTerms,
+            onPlan: planning.plan,
+          })}
           <div className="mt-10">
             <CleanPattern
               key={terms}

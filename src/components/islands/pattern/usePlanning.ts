@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import type { MadeMotif } from '../../../lib/plan/madeMotif';
 import type { Reading } from '../../../lib/pattern/reading';
 import { noPlanBecause, planMotif, type MotifIdentity } from './planMotif';
 
@@ -7,17 +8,18 @@ export interface Planning {
   why: string | null;
   /** What went wrong with the last try, or null. */
   problem: string | null;
-  plan: () => void;
+  /** With what a motif that was made has told, if it was measured. */
+  plan: (made?: MadeMotif) => void;
 }
 
 /** Hands the motif that was read to the estimator of the front page, and goes there. */
 export function usePlanning(reading: Reading, name: string, motif: MotifIdentity): Planning {
   const [problem, setProblem] = useState<string | null>(null);
   const why = noPlanBecause(reading);
-  async function plan() {
-    const wrong = await planMotif(reading, name, motif);
+  async function plan(made: MadeMotif | null) {
+    const wrong = await planMotif(reading, name, motif, made);
     setProblem(wrong);
     if (wrong === null) location.assign('/');
   }
-  return { why, problem, plan: () => (why === null ? void plan() : undefined) };
+  return { why, problem, plan: (made) => (why === null ? void plan(made ?? null) : undefined) };
 }

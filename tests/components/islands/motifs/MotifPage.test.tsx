@@ -30,6 +30,8 @@ const show = (presented = ready('group-square'), terms: 'us' | 'uk' = 'us') =>
       {...{ presented, terms }}
       versions={[]}
       stitches={[]}
+      made={[]}
+      signedIn
       swatches={[swatch]}
       units="metric"
     />,

@@ -44,6 +44,8 @@ const show = () =>
       presented={kept(2)}
       {...{ versions }}
       stitches={[]}
+      made={[]}
+      signedIn
       swatches={[]}
       units="metric"
       terms="us"
