@@ -20,7 +20,7 @@ export function symbolInWords(symbol: ChartSymbol, reading: Reading, terms: Term
   const { into } = stitch;
   const where =
     into.kind === 'place'
-      ? ` in ${placeWord(below[into.index]?.code ?? '', terms)}`
+      ? ` ${into.gap ? 'between' : 'in'} ${placeWord(below[into.index]?.code ?? '', terms)}${into.gap ? ' and the next' : ''}`
       : isOnLast(stitch)
         ? ON_LAST
         : INTO[into.kind];
@@ -63,9 +63,11 @@ export const sideWords = (
 export function runInto(run: StitchRun, terms: Terms): string {
   const { into, count } = run;
   if (isOnLast(run)) return ON_LAST.trim();
-  if (into.kind !== 'place') return INTO[into.kind].replace(/^ in /, '') || 'nothing';
+  if (into.kind !== 'place' && into.kind !== 'gap')
+    return INTO[into.kind].replace(/^ in /, '') || 'nothing';
   const each = count === 1 ? '' : into.inOne ? ', all in one' : ', one in each';
-  return placeWord(into.code, terms) + each;
+  const word = placeWord(into.code, terms);
+  return (into.kind === 'gap' ? `between ${word} and the next` : word) + each;
 }
 
 export const runRole = (run: StitchRun): string => roleOf(run).replace(/^, /, '');

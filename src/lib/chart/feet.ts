@@ -1,5 +1,12 @@
-import type { Place, WorkedRound } from '../pattern/reading';
+import type { Into, Place, WorkedRound } from '../pattern/reading';
 import type { RoundElement } from './elements';
+
+/** A gap is half a place on from the place before it. */
+const GAP = 0.5;
+
+/** The place of the round below that a stitch stands in, by its index, or null for none. */
+export const placeOf = (into: Into | undefined): number | null =>
+  into?.kind === 'place' ? into.index + (into.gap ? GAP : 0) : null;
 
 /**
  * Places of the round below that each element stands in. A decrease gathers as many stitches as it has
@@ -10,12 +17,11 @@ export function feetOf(
   elements: readonly RoundElement[],
   below: readonly Place[],
 ): number[][] {
-  const taken = new Set(
-    round.stitches.flatMap(({ into }) => (into.kind === 'place' ? [into.index] : [])),
-  );
+  const taken = new Set(round.stitches.flatMap(({ into }) => placeOf(into) ?? []));
   return elements.map((element): number[] => {
     const { into } = round.stitches[element.members[0] ?? -1] ?? {};
     if (element.kind === 'loop' || into?.kind !== 'place' || !below[into.index]) return [];
+    if (into.gap) return [into.index + GAP];
     return legPlaces(into.index, element.legs, round.turned ? -1 : 1, below, taken);
   });
 }

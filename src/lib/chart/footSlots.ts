@@ -1,5 +1,6 @@
 import type { ArrangedRound } from './arranged';
-import type { Ground } from './ground';
+import { placeOf } from './feet';
+import type { DrawnPlace, Ground } from './ground';
 import { add, towards, type Point } from './point';
 
 /** Distances from a place to what stands in it, in stitch widths: ours, so that symbols stand free. */
@@ -11,7 +12,7 @@ const CLEAR = {
   dotOnStitch: 0.2,
   dotOnSpace: 0.38,
   afterDot: 0.24,
-  besideDot: 0.34,
+  besideDot: 0.44,
   beforeHead: 0.16,
 } as const;
 /** How far apart the feet in one place stand, at most, and of the room that it has. */
@@ -33,10 +34,7 @@ export interface FootSlots {
 export function footSlots(arranged: ArrangedRound, ground: Ground): FootSlots {
   const { feet, travel, round, alongs, direction, elements } = arranged;
   const w = ground.gauge.stitchWidthMm;
-  const travelPlaces = travel.map((member) => {
-    const into = round.stitches[member]?.into;
-    return into?.kind === 'place' ? into.index : null;
-  });
+  const travelPlaces = travel.map((member) => placeOf(round.stitches[member]?.into));
   // The chain that stands where the walk ends stands on its last slip stitch.
   const walkEnds = travelPlaces.length - 1;
   const begins = elements[0]?.kind === 'column' && elements[0].beginning !== null;
@@ -60,7 +58,7 @@ export function footSlots(arranged: ArrangedRound, ground: Ground): FootSlots {
   const postClear = { stitch: CLEAR.hook, space: CLEAR.hook } as const;
   const dotClear = { stitch: CLEAR.dotOnStitch, space: CLEAR.dotOnSpace } as const;
   const pointOf = (place: number, key: string, clear: Clear) => {
-    const drawn = ground.below[place];
+    const drawn = drawnPlace(place, ground, round.turned ? -1 : 1);
     const keys = users.get(place) ?? [];
     if (!drawn) return null;
     const { isSpace, roomMm, outward, at } = drawn;
@@ -98,5 +96,22 @@ export function footSlots(arranged: ArrangedRound, ground: Ground): FootSlots {
       const key = onWalk && slot === walkEnds ? '0' : `travel ${slot}`;
       return pointOf(place, key, dotClear);
     },
+  };
+}
+
+/** A place of the round below; a gap lies in the middle of the two it is between, and is as open as a space. */
+function drawnPlace(place: number, { below }: Ground, step: 1 | -1): DrawnPlace | undefined {
+  const before = below[Math.floor(place)];
+  const after = below[(Math.floor(place) + step + below.length) % below.length];
+  if (Number.isInteger(place) || !before || !after) return before;
+  const middle = (one: Point, other: Point): Point => [
+    (one[0] + other[0]) / 2,
+    (one[1] + other[1]) / 2,
+  ];
+  return {
+    ...before,
+    isSpace: true,
+    at: middle(before.at, after.at),
+    outward: middle(before.outward, after.outward),
   };
 }

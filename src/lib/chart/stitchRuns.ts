@@ -1,3 +1,4 @@
+import { placeOf } from './feet';
 import type { Place, Role, WorkedRound, WorkedStitch } from '../pattern/reading';
 
 /** Equal stitches one after another: a line of the table that says what the chart shows. */
@@ -7,9 +8,9 @@ export interface StitchRun {
   readonly count: number;
   /** Index of the first of them in the round. */
   readonly first: number;
-  /** US code of what they are worked into, "ch-2" for a space; or what else they hang on. */
+  /** US code of what they are worked into or, in a gap, after, "ch-2" for a space; or what else they hang on. */
   readonly into:
-    | { readonly kind: 'place'; readonly code: string; readonly inOne: boolean }
+    | { readonly kind: 'place' | 'gap'; readonly code: string; readonly inOne: boolean }
     | { readonly kind: 'ring' | 'round-start' | 'own-chain' | 'none' };
   readonly side: number;
   readonly corner: number | null;
@@ -32,7 +33,7 @@ export function stitchRuns(round: WorkedRound, below: readonly Place[]): StitchR
 /** The run with one stitch more; null where some would share a place and others not. */
 function withOneMore(run: StitchRun, before: WorkedStitch, stitch: WorkedStitch): StitchRun | null {
   const { into, count } = run;
-  if (into.kind !== 'place') return { ...run, count: count + 1 };
+  if (into.kind !== 'place' && into.kind !== 'gap') return { ...run, count: count + 1 };
   const inOne = sameInto(before, stitch);
   return count === 1 || into.inOne === inOne
     ? { ...run, count: count + 1, into: { ...into, inOne } }
@@ -45,14 +46,14 @@ function runOf(stitch: WorkedStitch, first: number, below: readonly Place[]): St
     ...{ code, role, count: 1, first, side, corner },
     into:
       into.kind === 'place'
-        ? { kind: 'place', code: below[into.index]?.code ?? '', inOne: true }
+        ? { kind: into.gap ? 'gap' : 'place', code: below[into.index]?.code ?? '', inOne: true }
         : { kind: into.kind },
   };
 }
 
 function alike(before: WorkedStitch, next: WorkedStitch, below: readonly Place[]): boolean {
   const codeBelow = ({ into }: WorkedStitch) =>
-    into.kind === 'place' ? below[into.index]?.code : into.kind;
+    into.kind === 'place' ? `${below[into.index]?.code} ${into.gap ?? ''}` : into.kind;
   return (
     before.code === next.code &&
     before.role === next.role &&
@@ -63,4 +64,4 @@ function alike(before: WorkedStitch, next: WorkedStitch, below: readonly Place[]
 }
 
 const sameInto = (one: WorkedStitch, other: WorkedStitch): boolean =>
-  one.into.kind === 'place' && other.into.kind === 'place' && one.into.index === other.into.index;
+  one.into.kind === 'place' && placeOf(one.into) === placeOf(other.into);

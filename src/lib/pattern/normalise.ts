@@ -19,7 +19,7 @@ const SAME: ReadonlyMap<string, string> = new Map([
   ...each('\u201c\u201d\u201e\u201f\u2033\u00ab\u00bb', '"'),
   ...each('\u2217\u204e\u2731\u2732\u2733\u273b\uff0a\ufe61', '*'),
   ...each('\u00d7\u2715\u2716\u2a2f', 'x'),
-  ...each('\u2022\u25e6\u25aa\u25cf\u00b7', ' '),
+  ...each('#\u2022\u25e6\u25aa\u25cf\u00b7', ' '),
   ['\u2051', '**'],
   ['\u2026', '...'],
   ['\ufb00', 'ff'],
@@ -41,7 +41,12 @@ const SAME: ReadonlyMap<string, string> = new Map([
 export function normalise(text: string): PlainText {
   const plain: string[] = [];
   const offsets: number[] = [];
+  const bold = boldMarks(text);
   for (let i = 0; i < text.length; i += 1) {
+    if (bold.has(i)) {
+      push(plain, offsets, ' ', i);
+      continue;
+    }
     if (text[i] === '\r' && text[i + 1] === '\n') continue;
     const broken = brokenWord(text, i);
     if (broken > 0) {
@@ -93,4 +98,20 @@ const isSmall = (character = ''): boolean => character === character.toLowerCase
 
 function each(characters: string, same: string): [string, string][] {
   return [...characters].map((character) => [character, same]);
+}
+
+const BOLD_HEADER = /^[ \t]*\*\*(?=(?:rnd|round|rd|row)s?\b)/i;
+
+/** "**Rnd 1:** …", as notes are written down: the stars round a header are no repeat marks. */
+function boldMarks(text: string): ReadonlySet<number> {
+  const marks = new Set<number>();
+  let from = 0;
+  for (const line of text.split('\n')) {
+    const opening = BOLD_HEADER.exec(line)?.[0].length ?? 0;
+    const closing = opening > 0 ? line.indexOf('**', opening) : -1;
+    if (closing > 0)
+      for (const at of [opening - 2, opening - 1, closing, closing + 1]) marks.add(from + at);
+    from += line.length + 1;
+  }
+  return marks;
 }

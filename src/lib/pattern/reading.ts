@@ -18,12 +18,13 @@ export interface ReadOptions {
 }
 
 /**
- * What a stitch is worked into. `place`: a place of the round below, by its index there;
+ * What a stitch is worked into. `place`: a place of the round below, by its index there, or, with `gap`,
+ * between that place and the one that comes after it as this round meets them;
  * `round-start`: the first stitch of its own round, which a joining stitch closes to;
  * `own-chain`: chains just made, as of a picot; `none`: chains, which hang on nothing.
  */
 export type Into =
-  | { readonly kind: 'place'; readonly index: number }
+  | { readonly kind: 'place'; readonly index: number; readonly gap?: true }
   | { readonly kind: 'ring' }
   | { readonly kind: 'round-start' }
   | { readonly kind: 'own-chain' }

@@ -7,9 +7,13 @@ export interface Amount {
   readonly sizes: readonly number[] | null;
 }
 
-/** What kind of place is meant: "st", "dc", "ch-2 sp", "sp", "corner". */
+/**
+ * What kind of place is meant: "st", "dc", "ch-2 sp", "sp", "corner"; gap: between two stitches;
+ * gap-of-groups: between groups of stitches, whether there are chains there or not.
+ */
 export interface PlaceFilter {
-  readonly of: 'stitch' | 'space' | 'stitch-or-space' | 'corner' | 'corner-space';
+  readonly of:
+    'stitch' | 'space' | 'stitch-or-space' | 'corner' | 'corner-space' | 'gap' | 'gap-of-groups';
   /** US code of the stitch named, or null for any. */
   readonly code: StitchCode | null;
   /** Chains of the space named, or null for any. */

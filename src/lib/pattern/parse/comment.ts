@@ -11,7 +11,7 @@ const OPENERS: ReadonlySet<string> = new Set(
 );
 /** Words by which a sentence without a stitch is still an instruction. */
 const VERBS: ReadonlySet<string> = new Set(
-  'turn join joining fasten rep repeat sk skip miss change cut break attach magic with using rejoin rotate mr mc'.split(
+  'turn join joining fasten rep repeat sk skip miss change cut break attach magic adjustable sliding with using rejoin rotate mr mc'.split(
     ' ',
   ),
 );

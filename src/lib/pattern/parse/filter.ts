@@ -1,4 +1,5 @@
 import type { PlaceFilter } from '../syntax';
+import { betweenWhat } from './between';
 import { tellForeign } from './foreign';
 import type { ParseState } from './parseState';
 
@@ -39,7 +40,7 @@ export function readFilter(state: ParseState): PlaceFilter | null {
 
 /** Without any word of corners. */
 function plainFilter(state: ParseState): PlaceFilter | null {
-  if (state.take('sp')) return filterOf('space');
+  if (state.take('sp')) return spaceOrGap(state);
   if (state.take('st')) return ANY_STITCH;
   if (state.isWord('ch') || state.isWord('chain') || state.isWord('chs')) return chainSpace(state);
   if (state.isWord('chsp') || state.isWord('chsps')) {
@@ -53,6 +54,12 @@ function plainFilter(state: ParseState): PlaceFilter | null {
   state.at = term.next;
   if (state.means('st')) state.at += 1;
   return filterOf('stitch', term.code);
+}
+
+/** "sp" is one of chains, and "sp between dc" none. */
+function spaceOrGap(state: ParseState): PlaceFilter {
+  const gap = state.means('between') ? betweenWhat(state) : null;
+  return gap?.filter ?? filterOf('space');
 }
 
 /** "ch-2 sp", "ch 2 sp", "ch-sp", "ch-3 loop", "ch-2 corner sp", "ch-2"; "chs" of a foundation. */

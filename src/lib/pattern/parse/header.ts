@@ -36,7 +36,7 @@ export const isRepeatLine = (state: ParseState): boolean =>
 /** Tokens of "Rnd 1", "Rnds 3-5", "1st Rnd", "Next rnd", "R4"; 0 where none of them stands. */
 function headerLength(state: ParseState): number {
   const ordinal = state.peek().kind === 'ordinal';
-  if (ordinal || state.means('next') || state.means('last')) {
+  if (ordinal || state.means('next') || state.means('last') || state.means('first')) {
     const word = state.peek(1).text;
     const found =
       /^(rnd|round|rd|row)$/.test(word) &&

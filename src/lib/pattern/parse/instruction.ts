@@ -6,6 +6,7 @@ import { ANY_STITCH, readFilter } from './filter';
 import { readJoin } from './join';
 import { amountOf, type ParseState } from './parseState';
 import { readPlacedFirst } from './placedFirst';
+import { isMagic, ringLength } from './ring';
 import { readStitchStep } from './stitchStep';
 import { readUnknown } from './unknown';
 import { readWheres } from './where';
@@ -34,10 +35,7 @@ function plainWord(state: ParseState, first: number): Step[] | null {
   if (state.means('turn')) return plain(state, first, 'turn', 1);
   if (state.isWord('fasten') || state.isWord('cut') || state.isWord('break'))
     return fastenOff(state, first);
-  if (state.isWord('magic') || state.isWord('mr') || state.isWord('mc'))
-    return magicRing(state, first);
-  if (state.isWord('adjustable') && state.means('ring', 1))
-    return plain(state, first, 'magic-ring', 2);
+  if (isMagic(state)) return plain(state, first, 'magic-ring', ringLength(state));
   if (state.means('with') || state.isWord('change')) return colour(state, first);
   if (state.isWord('rs') || state.isWord('ws') || state.isWord('right') || state.isWord('wrong'))
     return facing(state);
@@ -125,13 +123,6 @@ function fastenOff(state: ParseState, first: number): Step[] {
   if (state.isWord('off')) state.at += 1;
   readColour(state);
   return [{ kind: 'fasten-off', ...state.spanFrom(first) }];
-}
-
-function magicRing(state: ParseState, first: number): Step[] {
-  state.at += 1;
-  if (state.isWord('adjustable')) state.at += 1;
-  if (state.means('ring') || state.isWord('loop')) state.at += 1;
-  return [{ kind: 'magic-ring', ...state.spanFrom(first) }];
 }
 
 /** "with B", "change to colour C", "using coral". */

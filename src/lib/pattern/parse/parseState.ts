@@ -68,6 +68,12 @@ export class ParseState {
     return (token.kind === 'word' || token.kind === 'ordinal') && meaningOf(token.text) === meaning;
   }
 
+  /** What the word that stands here stands for, or null. */
+  meaningHere(): string | null {
+    const { kind, text } = this.peek();
+    return kind === 'word' || kind === 'ordinal' ? meaningOf(text) : null;
+  }
+
   /** Steps over a word of this meaning, if it stands here. */
   take(meaning: string): boolean {
     const found = this.means(meaning);

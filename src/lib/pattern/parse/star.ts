@@ -44,6 +44,7 @@ export function readStar(state: ParseState, close: string | null): Step[] {
         },
       ];
     }
+    isRepeatedAfter(state);
   }
   if (!repeatsFromStar(state)) {
     const message = 'Nothing repeats from this *: "rep from *" is missing. It is worked once.';
@@ -71,9 +72,15 @@ export function closesStar(state: ParseState): boolean {
   if (!state.isMark('*')) return false;
   const start = state.at;
   state.at += 1;
-  const found = readTimes(state) !== null;
+  const found = readTimes(state) !== null || isRepeatedAfter(state);
   state.at = start;
   return found;
+}
+
+/** "*sc in next st, inc*, rep between * and * around": steps over the mark between. */
+function isRepeatedAfter(state: ParseState): boolean {
+  if (!state.takeMark(',')) state.takeMark(';');
+  return repeatsFromStar(state);
 }
 
 /** Whether "rep from *" stands here; also "rep between *s", "rep * to *". */
@@ -90,6 +97,8 @@ export function repeatsFromStar(state: ParseState): boolean {
 export function readRepeat(state: ParseState): { times: Times; endsAtMark: boolean } {
   while (state.peek().kind === 'word') state.at += 1;
   if (!state.takeMark('*')) state.takeMark('**');
+  // "between * and *" names both ends.
+  if (state.means('and') && state.isMark('*', 1)) state.at += 2;
   let endsAtMark = takeToMark(state);
   const times = readTotal(state);
   endsAtMark = takeEnding(state) || endsAtMark;

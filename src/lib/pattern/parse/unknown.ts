@@ -2,6 +2,7 @@ import type { Step } from '../syntax';
 import { isKnown } from './comment';
 import { correctWord } from './correct';
 import { readInstruction } from './instruction';
+import { TOLD_WORDS } from '../terms/words';
 import type { ParseState } from './parseState';
 
 /**
@@ -11,8 +12,9 @@ import type { ParseState } from './parseState';
 export function readUnknown(state: ParseState, first: number): Step[] {
   const token = state.peek();
   const afterNumber = state.at > first && state.last().kind === 'number';
-  const looksWorked = afterNumber || followedByPlace(state);
-  if ((looksWorked || token.text.length <= 6) && correctWord(state)) {
+  const isTold = TOLD_WORDS.has(token.text);
+  const looksWorked = !isTold && (afterNumber || followedByPlace(state));
+  if (!isTold && (looksWorked || token.text.length <= 6) && correctWord(state)) {
     state.at = first;
     return readInstruction(state);
   }

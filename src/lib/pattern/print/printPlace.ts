@@ -21,6 +21,10 @@ export function printFilter(
       return code === null ? stitches : words.stitch(code);
     case 'stitch-or-space':
       return `${stitches} and ${spaces()}`;
+    case 'gap':
+      return `${spaces()} between ${code === null ? words.word('sts') : words.stitch(code)}`;
+    case 'gap-of-groups':
+      return `${spaces()} between groups`;
     case 'corner':
       return many ? 'corners' : 'corner';
     case 'corner-space':

@@ -2,14 +2,14 @@ import { tokenize } from '../tokenize';
 import { lexiconOf } from './lexicon';
 import { readStitch } from './readStitch';
 import { COMPOUND_WORDS, INSERTION_WORDS, NAME_BEGINNINGS, STITCH_WORDS } from './stitchWords';
-import { meaningOf, numberWord, ordinalWord, PLAIN_WORDS, timesWord } from './words';
+import { meaningOf, numberWord, ordinalWord, PLAIN_WORDS, timesWord, TOLD_WORDS } from './words';
 
 /** Words that the parser asks for by themselves, beside those of `words.ts`. */
 const PARSER_WORDS: ReadonlySet<string> = new Set(
   (
     'acts adjustable at back break by change chsp chsps close color colour crochet cut does fasten ' +
     'facing finish form forming front group groups have magic making mc cc mr new off only petal ' +
-    'petals picot picots post posts right rs should side sides skip standing stands sts tch tog total ' +
+    'petals picot picots post posts right rs should side sides skip standing stands sts tbl tch tog total ' +
     'throughout turning wrong ws yarn yo yoh'
   ).split(' '),
 );
@@ -30,6 +30,7 @@ export function isTakenWord(abbreviation: string): boolean {
 const isKnownWord = (word: string): boolean =>
   PARSER_WORDS.has(word) ||
   PLAIN_WORDS.has(word) ||
+  TOLD_WORDS.has(word) ||
   meaningOf(word) !== null ||
   numberWord(word) !== null ||
   ordinalWord(word) !== null ||

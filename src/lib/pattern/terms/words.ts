@@ -116,3 +116,8 @@ export const PLAIN_WORDS: ReadonlySet<string> = new Set(
     'do not see per side sides yarn hook tip tips note notes hint right wrong front back left'
   ).split(' '),
 );
+
+/** Words of the trade that tell the maker something and make no stitch: markers, "approx", "cont in pat". */
+export const TOLD_WORDS: ReadonlySet<string> = new Set(
+  'alt approx cont m marker markers pat patt pm sm'.split(' '),
+);

@@ -6,7 +6,7 @@ import { intoOf } from './run';
 /** A new yarn begins in any place of a kind; joined with a stitch, that stitch is made. */
 export function workAttach(hand: Hand, step: AttachStep): boolean {
   if (step.colour !== null) hand.colour = step.colour;
-  let position: number | 'ring' = hand.isRing ? 'ring' : Math.max(0, hand.at);
+  let position: number | 'ring' = hand.isRing ? 'ring' : hand.here;
   const [where] = step.where;
   if (where && !hand.isRing) {
     const positions = positionsOf(hand, where, step, 1);
@@ -14,7 +14,7 @@ export function workAttach(hand: Hand, step: AttachStep): boolean {
     position = positions[0] ?? position;
     if (typeof position === 'number' && position > 0 && !hand.begun) {
       hand.beginAt(position);
-      position = 0;
+      position = hand.home;
     }
   }
   if (step.code === null) return true;

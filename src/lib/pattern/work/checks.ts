@@ -12,7 +12,7 @@ export function checkUnworked(hand: Hand, text: RoundText, report: Report): void
   if (hand.isRing || hand.explained || hand.budget.spent || hand.worked === 0) return;
   let stitches = 0;
   const spaces = new Map<string, number>();
-  for (let position = hand.at + 1; position < hand.size; position += 1) {
+  for (let position = hand.next; position < hand.size; position += 1) {
     const place = hand.placeAt(position);
     if (place?.kind === 'space') spaces.set(place.code, (spaces.get(place.code) ?? 0) + 1);
     else stitches += 1;

@@ -2,7 +2,11 @@ import type { Into, Role } from '../reading';
 import type { Span } from '../span';
 import type { PlaceFilter } from '../syntax';
 import { familyOf } from './family';
+import { isGap, matchesGap } from './gap';
 import type { Below, Budget, DraftPlace, DraftStitch } from './state';
+
+/** Where the hook stands before it has worked into anything. */
+const BEFORE = -1;
 
 /** Everything about a hand that an attempt may have to take back. */
 interface Snapshot {
@@ -21,14 +25,15 @@ interface Snapshot {
 /**
  * The hand that works one round: it walks the places of the round below in order and makes stitches.
  * Positions count from the place where the round begins: 0 to `size` - 1, and `size` is that place again.
+ * The gap after a place is half a position on.
  */
 export class Hand {
   readonly stitches: DraftStitch[] = [];
   readonly places: DraftPlace[] = [];
   /** Chains made since the last stitch: a space, once the next stitch is made. */
   pending: number[] = [];
-  /** Position last worked into; -1 before the first. */
-  at = -1;
+  /** Position last worked into; `BEFORE` the first. */
+  at = BEFORE;
   /** Whether a stitch or a chain has been made: slip stitches before it only travel. */
   begun = false;
   joined = false;
@@ -37,6 +42,10 @@ export class Hand {
   turned = false;
   /** The round is worked back the way the last one came. */
   isBack = false;
+  /** A row ends where it ends; a round comes back to where it began. */
+  isRow = false;
+  /** Position where the round begins: half a place before the first where that is a gap. */
+  home = 0;
   colour: string | null = null;
   /** Most stitches and spaces passed over between two places worked into. */
   passedStitches = 0;
@@ -69,13 +78,29 @@ export class Hand {
     return this.below.order.length;
   }
 
+  /** The position where the hook stands: where the round begins, before it has worked into anything. */
+  get here(): number {
+    return this.at === BEFORE ? this.home : this.at;
+  }
+
+  /** The next whole position. */
+  get next(): number {
+    return Math.floor(this.at) + 1;
+  }
+
+  /** The hook stands where the round begins, and that place is then worked. */
+  stand(): void {
+    this.at = this.here;
+  }
+
   get isRing(): boolean {
     return this.below.kind !== 'places';
   }
 
   /** Index in `below.places` of a position. */
   indexAt(position: number): number {
-    return this.below.order[(this.start + position) % this.size] ?? 0;
+    const steps = this.start + Math.floor(position) + this.size;
+    return this.below.order[steps % this.size] ?? 0;
   }
 
   placeAt(position: number) {
@@ -84,13 +109,18 @@ export class Hand {
 
   /** The round begins at this position: what was slip-stitched over comes last. */
   beginAt(position: number): void {
-    this.start = (this.start + position) % Math.max(1, this.size);
-    this.at = 0;
+    this.start = (this.start + Math.ceil(position)) % Math.max(1, this.size);
+    this.home = position - Math.ceil(position);
+    this.at = this.home;
   }
 
-  /** The next position from `from` on that a filter means, or -1. */
-  find(filter: PlaceFilter, from: number, span: Span, limit = this.limit): number {
-    for (let position = from; position < limit; position += 1) {
+  /** The next position after `after` that a filter means, or -1. */
+  find(filter: PlaceFilter, after: number, span: Span, limit = this.limit): number {
+    const gaps = isGap(filter);
+    // From where a round begins to the gap that it begins in there is nothing.
+    const end = gaps ? Math.min(limit, this.size + this.home - (this.isRow ? 1 : 0)) : limit;
+    const first = gaps ? Math.floor(Math.max(0, after) * 2 + 1) / 2 : Math.floor(after) + 1;
+    for (let position = first; position < end; position += gaps ? 0.5 : 1) {
       if (!this.budget.step(span)) return -1;
       if (this.matches(filter, position)) return position;
     }
@@ -100,6 +130,7 @@ export class Hand {
   matches(filter: PlaceFilter, position: number): boolean {
     const place = this.placeAt(position);
     if (!place) return false;
+    if (isGap(filter)) return matchesGap(this, filter, position);
     if (filter.of === 'corner') return place.corner !== null;
     if (filter.of === 'corner-space' && place.corner === null) return false;
     if (filter.of === 'stitch-or-space') return true;
@@ -114,11 +145,11 @@ export class Hand {
   moveTo(position: number): void {
     let stitches = 0;
     let spaces = 0;
-    for (let passed = this.at + 1; passed < position && passed < this.size; passed += 1) {
+    for (let passed = this.next; passed < position && passed < this.size; passed += 1) {
       if (this.placeAt(passed)?.kind === 'space') spaces += 1;
       else stitches += 1;
     }
-    if (this.at >= 0 || this.begun) {
+    if (this.at !== BEFORE || this.begun) {
       this.passedStitches = Math.max(this.passedStitches, stitches);
       this.passedSpaces = Math.max(this.passedSpaces, spaces);
     }
@@ -189,4 +220,6 @@ export class Hand {
   }
 }
 
-const indexOf = (into: Into): number => (into.kind === 'place' ? into.index : -1);
+/** A gap is half a place on. */
+export const indexOf = (into: Into): number =>
+  into.kind === 'place' ? into.index + (into.gap ? 0.5 : 0) : -1;

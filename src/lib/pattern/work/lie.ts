@@ -25,7 +25,7 @@ export function liesOf(places: readonly DraftPlace[], below: Below): Lie[] {
     const from = places[left]?.into ?? -1;
     const to = places[right]?.into ?? -1;
     if (place.kind === 'stitch' || from < 0 || to < 0) {
-      const corner = place.into >= 0 ? (below.places[place.into]?.corner ?? null) : null;
+      const corner = below.places[place.into]?.corner ?? null;
       const width = place.kind === 'stitch' ? 1 : place.chains;
       return { left, right, reach: 0, inPlace: below.kind === 'ring', corner, width };
     }
@@ -65,14 +65,21 @@ function middlesOf({ places, order }: Below) {
     total += width;
     if (place && place.corner !== null) cornersAt.push({ rank: i, corner: place.corner });
   });
+  // The gap after a place lies where that place ends.
+  const middleOf = (index: number): number =>
+    Number.isInteger(index)
+      ? (middle.get(index) ?? 0)
+      : (middle.get(Math.floor(index)) ?? 0) + (places[Math.floor(index)]?.width ?? 1) / 2;
+  const rankOf = (index: number): number =>
+    (rank.get(Math.floor(index)) ?? 0) + (Number.isInteger(index) ? 0 : 0.5);
   return {
     between(from: number, to: number): number {
-      const distance = (middle.get(to) ?? 0) - (middle.get(from) ?? 0);
+      const distance = middleOf(to) - middleOf(from);
       return distance < 0 ? distance + total : distance;
     },
     cornerBetween(from: number, to: number): number | null {
-      const start = rank.get(from) ?? 0;
-      const end = (rank.get(to) ?? 0) + ((rank.get(to) ?? 0) < start ? order.length : 0);
+      const start = rankOf(from);
+      const end = rankOf(to) + (rankOf(to) < start ? order.length : 0);
       const found = cornersAt.find(
         (each) =>
           (each.rank > start && each.rank < end) ||

@@ -22,7 +22,7 @@ export function positionsOf(
     case 'each':
       return eachOne(hand, where.filter, where.until, span);
     case 'same':
-      if (hand.at < 0) hand.moveTo(0);
+      if (hand.at !== hand.here) hand.moveTo(hand.here);
       return [hand.at];
     case 'first':
       return firstOne(hand, where.filter, span);
@@ -43,7 +43,7 @@ function inRing(hand: Hand, where: Where, span: Span): Position[] {
       span,
       'The ring is closed: this round is worked into the one below.',
     );
-    return [Math.max(0, hand.at)];
+    return [hand.here];
   }
   const named =
     where.kind === 'next' || where.kind === 'last' || where.kind === 'each' || where.kind === 'any';
@@ -67,7 +67,7 @@ function nextOnes(hand: Hand, filter: PlaceFilter, count: number, span: Span): P
 
 /** The next place; a space where the round began may be come back to at its end. */
 function nextOne(hand: Hand, filter: PlaceFilter, span: Span): number {
-  const position = hand.find(filter, hand.at + 1, span);
+  const position = hand.find(filter, hand.at, span);
   if (position >= 0 || hand.attempts > 0 || hand.at >= hand.size) return position;
   const backToStart = filter.of !== 'stitch' && hand.at > 0 && hand.matches(filter, 0);
   return backToStart && hand.placeAt(0)?.kind === 'space' ? hand.size : -1;
@@ -94,16 +94,15 @@ function missing(
 
 function lastOnes(hand: Hand, filter: PlaceFilter, count: number, span: Span): Position[] | null {
   let left = 0;
-  for (let position = hand.at + 1; position < hand.size; position += 1) {
-    if (hand.matches(filter, position)) left += 1;
-  }
-  if (!hand.budget.step(span, hand.size)) return [];
+  let position = hand.find(filter, hand.at, span, hand.size);
+  for (; position >= 0; position = hand.find(filter, position, span, hand.size)) left += 1;
+  if (hand.budget.spent) return [];
   if (left > count) {
     const over = left - count;
     const message = `${over} ${filterInWords(filter, over)} stand before the last ${count}: they are left unworked.`;
     tell(hand, 'unworked', span, message);
     for (let i = 0; i < over; i += 1) {
-      const position = hand.find(filter, hand.at + 1, span);
+      const position = hand.find(filter, hand.at, span);
       if (position >= 0) hand.at = position;
     }
   }
@@ -114,7 +113,7 @@ function eachOne(hand: Hand, filter: PlaceFilter, until: Until, span: Span): Pos
   const limit = Math.min(hand.limit, limitOf(hand, until, span));
   const positions: Position[] = [];
   for (;;) {
-    const position = hand.find(filter, hand.at + 1, span, limit);
+    const position = hand.find(filter, hand.at, span, limit);
     if (position < 0) break;
     hand.moveTo(position);
     positions.push(position);
@@ -134,7 +133,7 @@ export function limitOf(hand: Hand, until: Until, span: Span): number {
   if (until.to === 'left') {
     let left = until.amount.value;
     let position = hand.size;
-    while (position > hand.at + 1 && left > 0 && hand.budget.step(span)) {
+    while (position > hand.next && left > 0 && hand.budget.step(span)) {
       position -= 1;
       if (hand.placeAt(position)?.kind === 'stitch') left -= 1;
     }
@@ -142,31 +141,30 @@ export function limitOf(hand: Hand, until: Until, span: Span): number {
   }
   const filter: PlaceFilter =
     until.to === 'corner' ? { of: 'corner', code: null, chains: null } : until.filter;
-  const position = hand.find(filter, hand.at + 1, span, hand.size);
+  const position = hand.find(filter, hand.at, span, hand.size);
   return position < 0 ? hand.size : position;
 }
 
 function firstOne(hand: Hand, filter: PlaceFilter, span: Span): Position[] | null {
   if (hand.matches(filter, 0)) {
-    if (hand.at <= 0) hand.at = 0;
-    else hand.at = hand.size;
+    hand.at = hand.at <= 0 ? hand.home : hand.size;
     hand.worked += 1;
-    return [0];
+    return [hand.home];
   }
   if (hand.at < 0) return nextOnes(hand, filter, 1, span);
   tell(hand, 'no-such-place', span, `The round does not begin in a ${filterInWords(filter)}.`);
-  return [0];
+  return [hand.home];
 }
 
 function anyOne(hand: Hand, filter: PlaceFilter, span: Span): Position[] | null {
-  const position = hand.find(filter, 0, span);
+  const position = hand.find(filter, -1, span);
   if (position < 0) {
     const message = `The round below has no ${filterInWords(filter)}.`;
     tell(hand, 'no-such-place', span, message);
-    return [Math.max(0, hand.at)];
+    return [hand.here];
   }
   hand.beginAt(position);
-  return [0];
+  return [hand.home];
 }
 
 /** Top of the turning chain: the last place of a row, the first of a round. */

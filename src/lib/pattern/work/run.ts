@@ -61,7 +61,13 @@ function workStep(hand: Hand, step: Step, ahead: Ahead): boolean {
 
 /** What a stitch at a position hangs on. */
 export const intoOf = (hand: Hand, position: number | 'ring'): Into =>
-  position === 'ring' ? { kind: 'ring' } : { kind: 'place', index: hand.indexAt(position) };
+  position === 'ring'
+    ? { kind: 'ring' }
+    : {
+        kind: 'place',
+        index: hand.indexAt(position),
+        ...(!Number.isInteger(position) && { gap: true }),
+      };
 
 /** Says a problem of the work, unless a repeat is only trying. */
 export function tell(

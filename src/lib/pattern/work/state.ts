@@ -16,7 +16,7 @@ export interface DraftStitch {
   readonly span: Span;
 }
 
-/** A place of the round that is being worked. `into`: the place below it, or -1 for none. */
+/** A place of the round that is being worked. `into`: the place below it, half a place on for the gap after it, or -1 for none. */
 export interface DraftPlace {
   readonly kind: 'stitch' | 'space';
   readonly code: string;
@@ -28,6 +28,8 @@ export interface DraftPlace {
 export interface Below {
   readonly kind: 'ring' | 'places' | 'nothing';
   readonly places: readonly Place[];
+  /** What each of the places is worked into itself: a space into nothing, -1. */
+  readonly into: readonly number[];
   readonly corner: Corner | null;
   /** Indices of `places` in the order the hook meets them. */
   readonly order: readonly number[];

@@ -5,6 +5,8 @@ import type { PlaceFilter } from '../syntax';
 export function filterInWords({ of, code, chains }: PlaceFilter, count = 1): string {
   const s = count === 1 ? '' : 's';
   if (of === 'corner') return `corner${s}`;
+  if (of === 'gap-of-groups') return `sp${s} between groups`;
+  if (of === 'gap') return `sp${s} between ${code === null ? 'sts' : abbreviationOf(code)}`;
   const corner = of === 'corner-space' ? 'corner ' : '';
   if (of === 'stitch') return code === null ? `st${s}` : abbreviationOf(code);
   if (of === 'stitch-or-space') return `st${s} or sp${s}`;

@@ -3,7 +3,7 @@ import type { Stitch } from '../../stitches/stitch';
 import { BASIC_STITCHES, knownStitch, stitch } from '../../stitches/stitchTable';
 import type { ChainStep, StandsFor, Step, StitchStep } from '../syntax';
 import { baseOf } from './family';
-import type { Hand } from './hand';
+import { indexOf, type Hand } from './hand';
 import { intoOf, tell, type Ahead } from './run';
 import { beginAfterTravel } from './workStitch';
 
@@ -46,9 +46,9 @@ function beginningCluster({ steps, next }: Ahead): string | null {
 }
 
 function leadCluster(hand: Hand, step: ChainStep, code: string): boolean {
-  if (!hand.isRing && hand.at < 0) hand.at = 0;
+  if (!hand.isRing) hand.stand();
   hand.begun = true;
-  const into = hand.isRing ? intoOf(hand, 'ring') : intoOf(hand, Math.max(0, hand.at));
+  const into = hand.isRing ? intoOf(hand, 'ring') : intoOf(hand, hand.here);
   const from = hand.stitches.length;
   for (let i = 0; i < step.amount.value; i += 1) hand.chain('standing', into, step);
   hand.lead = { code, from };
@@ -62,9 +62,9 @@ const ruled = (hand: Hand, { amount }: ChainStep): StandsFor | null =>
 function standingStitch(hand: Hand, step: ChainStep, code: string, spaceChains: number): void {
   if (hand.isRing && hand.below.kind === 'nothing')
     tell(hand, 'no-ring', step, 'There is no ring to work into yet.');
-  if (!hand.isRing && hand.at < 0) hand.at = 0;
+  if (!hand.isRing) hand.stand();
   hand.worked += 1;
-  const into = hand.isRing ? intoOf(hand, 'ring') : intoOf(hand, Math.max(0, hand.at));
+  const into = hand.isRing ? intoOf(hand, 'ring') : intoOf(hand, hand.here);
   const chains = Math.max(0, step.amount.value - spaceChains);
   tellHeight(hand, step, code, chains, spaceChains);
   hand.closeSpace();
@@ -72,7 +72,7 @@ function standingStitch(hand: Hand, step: ChainStep, code: string, spaceChains: 
     kind: 'stitch',
     code,
     chains: 0,
-    into: into.kind === 'place' ? into.index : -1,
+    into: indexOf(into),
   });
   for (let i = 0; i < chains; i += 1) {
     hand.chain('standing', into, step);

@@ -44,6 +44,7 @@ export function workPattern(
     const hand = new Hand(isBack ? turned(below, end) : below, budget, isBack ? 0 : start);
     hand.colour = text.colour ?? colour;
     hand.isBack = isBack;
+    hand.isRow = text.kind === 'row';
     work(hand, planned);
     checkUnworked(hand, text, report);
     hands.push({ hand, text });
@@ -53,7 +54,7 @@ export function workPattern(
     texts.push(text);
     seeming.push(finished.seeming);
     colour = hand.colour;
-    below = belowRound(finished.round);
+    below = belowRound(finished.round, hand);
     start = hand.endsInSpace ? Math.max(0, finished.round.places.length - 1) : 0;
   }
   const joined = hands.some(({ hand }) => hand.joined);
@@ -79,16 +80,25 @@ const foundationColour = ({ foundation }: PatternText): string | null => {
 };
 
 function belowRing(ring: WorkedRing): Below {
-  if (ring.kind === 'none') return { kind: 'nothing', places: [], corner: null, order: [] };
-  if (ring.kind !== 'chain-row') return { kind: 'ring', places: [], corner: null, order: [] };
-  return inOrder(ring.places, null);
+  if (ring.kind === 'chain-row') return inOrder(ring.places, [], null);
+  return { ...inOrder([], [], null), kind: ring.kind === 'none' ? 'nothing' : 'ring' };
 }
 
-const belowRound = ({ places, corner }: WorkedRound): Below => inOrder(places, corner);
+const belowRound = ({ places, corner }: WorkedRound, hand: Hand): Below =>
+  inOrder(
+    places,
+    hand.places.map(({ into }) => into),
+    corner,
+  );
 
-const inOrder = (places: readonly Place[], corner: Below['corner']): Below => ({
+const inOrder = (
+  places: readonly Place[],
+  into: readonly number[],
+  corner: Below['corner'],
+): Below => ({
   kind: places.length > 0 ? 'places' : 'nothing',
   places,
+  into,
   corner,
   order: places.map((_, i) => i),
 });

@@ -75,11 +75,11 @@ function attempt(hand: Hand, step: RepeatStep): Attempt {
   return { result, mark };
 }
 
-const nothingLeft = (hand: Hand): boolean => hand.at + 1 >= hand.limit;
+const nothingLeft = (hand: Hand): boolean => hand.next >= hand.limit;
 
 /** Says by how much the repeat does not come out even, and with how many stitches it would. */
 function tellUneven(hand: Hand, step: RepeatStep, each: number): void {
-  const left = hand.limit - hand.at - 1;
+  const left = hand.limit - hand.next;
   const leftStitches = counted(left, 'st');
   hand.explained = true;
   if (each === 0) {

@@ -12,7 +12,7 @@ export function workSkip(hand: Hand, step: SkipStep): boolean {
   const filter = step.filter.code === 'ch' && !hasChains(hand) ? chainsAsSpace(step) : step.filter;
   const times = filter === step.filter ? step.amount.value : 1;
   for (let i = 0; i < times; i += 1) {
-    const position = hand.find(filter, hand.at + 1, step);
+    const position = hand.find(filter, hand.at, step);
     if (position < 0) {
       if (hand.attempts > 0) return false;
       const message = `This skips ${counted(times, 'st')}, but the round below has ${i} more ${filterInWords(filter, i)}.`;

@@ -53,7 +53,7 @@ function workWhere(hand: Hand, step: StitchStep, where: Where): boolean {
   const onePlace = hand.isRing || (where.kind === 'next' && where.filter.of !== 'stitch');
   const isTravel = travels(hand, step, where);
   // The round below was joined at its first stitch, where the hook stands: the next one is the second.
-  if (isTravel && hand.at < 0 && !hand.isRing && where.kind === 'next') hand.at = 0;
+  if (isTravel && !hand.isRing && where.kind === 'next') hand.stand();
   const together = takes > 1 && !onePlace && where.kind !== 'same' && where.kind !== 'first';
   const legs = together && where.kind === 'next' && where.amount.value >= takes;
   const positions = positionsOf(
