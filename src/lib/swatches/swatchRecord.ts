@@ -41,6 +41,8 @@ export interface GaugeSwatch {
   readonly id: string;
   readonly name: string;
   readonly swatch: PlanSwatch;
+  /** Of the yarn it is worked in; null where that is not known. */
+  readonly weightCategory: WeightCategory | null;
 }
 
 /** A flat swatch as kept: its counts, every measurement of it, and its yarn when that is known. */

@@ -16,11 +16,6 @@ export const DC12 =
 export const SQUARE =
   'Ch 4, join with sl st to form ring.\nRnd 1: Ch 3 (counts as dc), 2 dc in ring, ch 2, ' +
   '*3 dc in ring, ch 2; rep from * 2 more times; join with sl st in top of beg ch-3. (12 dc, 4 ch-2 sps)\nRnd 2: ';
-/** 12 dc with a chain after each. */
-export const MESH =
-  DC12 +
-  'Ch 4 (counts as dc and ch-1 sp), *dc in next dc, ch 1; rep from * around; ' +
-  'join with sl st in 3rd ch of beg ch-4. (12 dc, 12 ch-1 sps)\nRnd 3: ';
 
 /** What a round counts: "12 dc + 4 ch-2". */
 export const counts = ({ tally, spaces }: WorkedRound): string =>

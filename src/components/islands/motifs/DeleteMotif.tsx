@@ -29,7 +29,7 @@ export function DeleteMotif({ motifKey, name, onDeleted }: DeleteMotifProps) {
         open={isAsking}
         onOpenChange={setAsking}
         title={`Delete “${name}”?`}
-        description="It goes with all its versions. Blankets planned with it keep its rounds."
+        description="It goes with all its versions and what you measured of it. Blankets planned with it keep its rounds."
         actions={
           <>
             <Button

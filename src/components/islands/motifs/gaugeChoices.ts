@@ -15,11 +15,11 @@ export interface GaugeChoice {
 export function gaugeChoices(swatches: readonly GaugeSwatch[], units: Units): GaugeChoice[] {
   const span = GAUGE_SPAN[units].words;
   return [
-    ...swatches.map(({ id, name, swatch }): GaugeChoice => ({
+    ...swatches.map(({ id, name, swatch, weightCategory }): GaugeChoice => ({
       key: id,
       word: `my swatch: ${name}`,
       swatch,
-      category: 4,
+      category: weightCategory ?? 4,
     })),
     ...YARN_CATEGORIES.map(({ category, name }): GaugeChoice => ({
       key: `weight-${category}`,

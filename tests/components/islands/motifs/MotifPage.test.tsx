@@ -16,6 +16,7 @@ const ready = (key: string) => presentReadyMotif(key) as PresentedMotif;
 const swatch = {
   id: '3f1d9d6e-58b2-4f0e-9a3c-6d2b8f0a7c41',
   name: 'Mine',
+  weightCategory: null,
   swatch: {
     stitch: 'sc',
     stitches: 20,

@@ -1,4 +1,5 @@
 import { beforeEach, describe, expect, it } from 'vitest';
+import { MadeMotifRow } from '../../../../db/models';
 import { LIBRARY_MOTIFS } from '../../../../src/lib/motifs/readyMotifs';
 import { GET, POST } from '../../../../src/pages/api/motifs';
 import * as motif from '../../../../src/pages/api/motifs/[id]';
@@ -9,7 +10,7 @@ import type { CurrentUser } from '../../../../src/schemas/user';
 import { MOTIF_EXAMPLE } from '../../../../src/server/examples';
 import { callRoute } from '../../../support/callRoute';
 import { emptyDatabase } from '../../../support/database';
-import { buildMotif, buildUser } from '../../../support/factories';
+import { buildMadeMotif, buildMotif, buildUser } from '../../../support/factories';
 import { LONG_STITCH } from '../../../support/longStitch';
 import { expectFieldErrors } from '../../../support/refusals';
 
@@ -172,11 +173,15 @@ describe('/api/motifs/[id]', () => {
     expect(refused?.json.error.current).toEqual(saved?.json);
   });
 
-  it('deletes my own', async () => {
+  it('deletes my own, with what was measured of it', async () => {
     const { key } = await buildMotif(user);
+    await buildMadeMotif(user, { motifKey: key, motifVersion: 1, rounds: 1, sizes: [] });
+    await buildMadeMotif(user);
     const call = { method: 'DELETE', user, params: { id: key } };
     expect((await callRoute(motif.DELETE, call)).status).toBe(204);
     expect((await callRoute(motif.DELETE, call)).status).toBe(404);
+    expect(await MadeMotifRow.count({ where: { motifKey: key } })).toBe(0);
+    expect(await MadeMotifRow.count()).toBe(1);
   });
 });
 
