@@ -11,7 +11,7 @@ export { loopsOf } from './stitches/loops';
 export { swatchCounts } from './stitches/swatchCounts';
 export type { LoopHeight, Motif, MotifRound, MotifSides, Ring } from './motifs/motif';
 export { MOTIF_SIDES } from './motifs/motif';
-export { LIBRARY_MOTIFS, READY_MOTIFS, readyMotif } from './motifs/readyMotifs';
+export { READY_MOTIFS, readyMotif } from './motifs/readyMotifs';
 export { READY_PATTERNS } from './motifs/ready/readyPatterns';
 export { motifGeometry } from './motifs/geometry';
 export { motifKind, type MotifKind } from './motifs/motifKind';

@@ -1,4 +1,5 @@
 import * as z from './zod';
+import { EDGES, LAYOUTS } from '../lib/layout/layouts';
 import { CAUSES, PARTS, type Estimate } from '../lib/ledger/ledger';
 
 const figure = z.number();
@@ -69,16 +70,25 @@ const nextMeasurement = z.strictObject({
 
 /** The whole answer for a plan: the library's own value, to the last digit. */
 export const estimateSchema = z.strictObject({
-  layout: z.literal(['square', 'offset-hexagons']),
+  layout: z.literal(LAYOUTS),
+  edge: z.literal(EDGES),
   rows: count,
   columns: count,
   counts: z.strictObject({
     motifs: count,
-    joinedSides: count,
-    outerSides: count,
+    halves: count,
+    quarters: count,
+    fillers: count,
+    halfFillers: count,
+    quarterFillers: count,
+    joinedSides: figure,
+    outerSides: figure,
     insideJunctions: count,
     edgeJunctions: count,
     outerCorners: count,
+    gatheredLinks: count,
+    crossedLinks: count,
+    seamLines: count,
   }),
   colourwayMotifs: z.array(count),
   size: z.strictObject({

@@ -1,10 +1,12 @@
 import * as z from './zod';
+import { EDGES, LAYOUTS } from '../lib/layout/layouts';
 import { CONFIDENCES } from '../lib/plan/plan';
 import { lengthM, massG, priceMinor, widthMm } from '../lib/units/quantities';
 import { choice, counted, hex, list, measured, name, strict } from './fields';
 import { PLAN_LIMITS, POSSIBLE } from './limits';
 
 import { checkPlan } from './planChecks';
+import { placementSchema } from './placement';
 import { checkPutUp, checkStitchSize } from './possible';
 import { currencySchema } from './preferences';
 import { knownStitch, stitchCounts } from './stitchCounts';
@@ -138,6 +140,10 @@ export const planSchema = strict('Plan', {
     .transform(widthMm)
     .nullable(),
   size,
+  layout: choice('Layout', LAYOUTS).nullable().default(null),
+  edge: choice('Edge', EDGES).default('toothed'),
+  secondMotif: motifIndex.nullable().default(null),
+  placement: placementSchema.default({ rule: { by: 'diagonals', width: 1 }, painted: [] }),
   join: strict('Join', { key: name('Key of the join', PLAN_LIMITS.keyLength), colour: colourKey }),
   corners: choice('Corners', ['gathered', 'crossed']),
   border: list(

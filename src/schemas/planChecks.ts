@@ -1,5 +1,5 @@
 import { readyJoin } from '../lib/joins/readyJoins';
-import { layoutFor } from '../lib/layout/layouts';
+import { layoutFacts, layoutFor } from '../lib/layout/layouts';
 import type { Plan } from '../lib/plan/plan';
 
 interface Issues {
@@ -19,18 +19,7 @@ export function checkPlan(plan: Plan, issues: Issues): void {
     if (!keys.has(key)) wrong(path, `There is no colour with the key ${key}`);
   };
 
-  const sides = plan.motifs[0]?.sides;
-  if (sides !== undefined && layoutFor(sides) === null) {
-    wrong(['motifs', 0, 'sides'], `Motifs of ${sides} sides cannot be laid out yet`);
-  }
-  plan.motifs.forEach((motif, index) => {
-    if (motif.sides !== sides) {
-      wrong(
-        ['motifs', index, 'sides'],
-        'All motifs of a blanket must have the same number of sides',
-      );
-    }
-  });
+  checkMotifs(plan, wrong);
 
   plan.colourways.forEach(({ motifIndex, roundColours }, index) => {
     const motif = plan.motifs[motifIndex];
@@ -59,4 +48,45 @@ export function checkPlan(plan: Plan, issues: Issues): void {
       wrong(['evidence', index, 'motifIndex'], `There is no motif number ${piece.motifIndex}`);
     }
   });
+}
+
+/** Every motif must have the shape of its places. */
+function checkMotifs(
+  { motifs, layout, secondMotif, colourways }: Plan,
+  wrong: (path: (string | number)[], message: string) => void,
+): void {
+  const mains = motifs.flatMap((motif, index) => (index === secondMotif ? [] : [{ motif, index }]));
+  const sides = mains[0]?.motif.sides;
+  if (sides === undefined) {
+    wrong(['secondMotif'], 'The second motif cannot be the only one');
+    return;
+  }
+  const facts = layoutFacts(layout ?? layoutFor(sides));
+  for (const { motif, index } of mains) {
+    if (motif.sides !== sides) {
+      wrong(
+        ['motifs', index, 'sides'],
+        'All motifs of a blanket must have the same number of sides',
+      );
+    }
+  }
+  if (!facts.sides.includes(sides)) {
+    wrong(['layout'], `Motifs of ${sides} sides cannot lie in the layout “${facts.name}”`);
+  }
+  const second = secondMotif === null ? null : motifs[secondMotif];
+  if (facts.secondSides === null && second !== null) {
+    wrong(['secondMotif'], `The layout “${facts.name}” has no place for a second motif`);
+  }
+  if (facts.secondSides !== null && second?.sides !== facts.secondSides) {
+    wrong(
+      ['secondMotif'],
+      `The layout “${facts.name}” needs a second motif of ${facts.secondSides} sides`,
+    );
+  }
+  const isWorked = (isSecond: boolean): boolean =>
+    colourways.some(({ motifIndex }) => (motifIndex === secondMotif) === isSecond);
+  if (!isWorked(false)) wrong(['colourways'], 'The main motif has no colourway');
+  if (facts.secondSides !== null && !isWorked(true)) {
+    wrong(['colourways'], 'The second motif has no colourway');
+  }
 }

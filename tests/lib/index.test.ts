@@ -18,11 +18,11 @@ describe('the library', () => {
     });
   });
 
-  it('imports nothing but itself, arithmetic and CSV', () => {
+  it('imports nothing but itself, arithmetic, seeded chance, colour and CSV', () => {
     const foreign = sources.flatMap(({ name, text }) =>
       [...text.matchAll(/(?:from|import)\s+'([^']+)'/g)]
         .map(([, from = '']) => `${name}: ${from}`)
-        .filter((line) => !/: (\.|mathjs|@stdlib\/|papaparse$)/.test(line)),
+        .filter((line) => !/: (\.|mathjs|@stdlib\/|pure-rand\/|culori|papaparse$)/.test(line)),
     );
     expect(foreign).toEqual([]);
   });

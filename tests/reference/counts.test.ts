@@ -1,7 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { readyMotif } from '../../src/lib';
-import { countsOf, gridCounts } from '../../src/lib/layout/gridCounts';
+import { gridCounts } from '../../src/lib/layout/gridCounts';
 import { planeMap, type Outline } from '../../src/lib/layout/planeMap';
+import { HEXAGONS, SQUARES } from '../support/arrangements';
 import { referenceRows } from '../support/reference';
 
 const upTo = (most: number): number[] => Array.from({ length: most }, (_, i) => i + 1);
@@ -25,15 +26,15 @@ describe('square grids', () => {
   it.each(referenceRows<'rows' | 'columns' | 'seams'>('square-grid-seams.csv'))(
     'of $rows × $columns have $seams seams',
     ({ rows, columns, seams }) => {
-      expect(gridCounts('square', Number(rows), Number(columns)).joinedSides).toBe(Number(seams));
+      expect(gridCounts(SQUARES, Number(rows), Number(columns)).joinedSides).toBe(Number(seams));
     },
   );
 
   it('follow the published formulas for every size up to 60 × 60', () => {
     for (const R of upTo(60)) {
       for (const C of upTo(60)) {
-        const counts = gridCounts('square', R, C);
-        expect(counts).toEqual({
+        const counts = gridCounts(SQUARES, R, C);
+        expect(counts).toMatchObject({
           motifs: R * C,
           joinedSides: R * (C - 1) + C * (R - 1),
           outerSides: 2 * (R + C),
@@ -51,7 +52,7 @@ describe('offset rows of hexagons', () => {
   it.each(referenceRows<'rows' | 'columns' | 'seams'>('hexagon-rows.csv'))(
     'of $rows × $columns have $seams seams',
     ({ rows, columns, seams }) => {
-      const counts = gridCounts('offset-hexagons', Number(rows), Number(columns));
+      const counts = gridCounts(HEXAGONS, Number(rows), Number(columns));
       expect(counts.joinedSides).toBe(Number(seams));
     },
   );
@@ -59,7 +60,7 @@ describe('offset rows of hexagons', () => {
   it('follow the published formula for every size up to 60 × 60', () => {
     for (const R of upTo(60)) {
       for (const C of upTo(60)) {
-        const counts = gridCounts('offset-hexagons', R, C);
+        const counts = gridCounts(HEXAGONS, R, C);
         expect(counts.joinedSides).toBe(3 * R * C - 2 * R - 2 * C + 1);
         expect(6 * R * C).toBe(2 * counts.joinedSides + counts.outerSides);
       }
@@ -98,10 +99,10 @@ describe('patches of hexagons round one', () => {
     (row) => {
       const k = Number(row.rings);
       const map = planeMap(patch(k));
-      const counts = countsOf(map);
-      expect(counts.motifs).toBe(Number(row.motifs)); // centred hexagonal numbers, OEIS A003215
-      expect(counts.joinedSides).toBe(Number(row.seams));
-      expect(counts.outerSides).toBe(Number(row.outer_sides));
+      const joined = map.sides.filter(({ motifs }) => motifs.length === 2).length;
+      expect(map.outlines).toHaveLength(Number(row.motifs)); // centred hexagonal numbers, OEIS A003215
+      expect(joined).toBe(Number(row.seams));
+      expect(map.sides.length - joined).toBe(Number(row.outer_sides));
       expect(map.corners).toHaveLength(6 * k ** 2); // published: 24 for two rings
       expect(map.corners.length - map.sides.length + (map.outlines.length + 1)).toBe(2);
     },

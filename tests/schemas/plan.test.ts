@@ -116,7 +116,7 @@ describe('planSchema', () => {
     [['join', 'key'], 'glue', 'There is no join named glue'],
     [['border', 2, 'colour'], 'c9', 'There is no colour with the key c9'],
     [['evidence', 0, 'motifIndex'], 7, 'There is no motif number 7'],
-    [['motifs', 0, 'sides'], 3, 'Motifs of 3 sides cannot be laid out yet'],
+    [['layout'], 'triangles', 'Motifs of 4 sides cannot lie in the layout “triangles”'],
     [
       ['motifs', 0, 'rounds', 1, 'travel', 'sl st'],
       9,
@@ -152,6 +152,37 @@ describe('planSchema', () => {
     plan.motifs = [plan.motifs[0]!, { ...plan.motifs[0]!, sides: 6 }];
     expect(errorsOf(plan)).toEqual({
       'motifs.1.sides': 'All motifs of a blanket must have the same number of sides',
+    });
+  });
+
+  it('wants a second motif where the layout has places for it, and none elsewhere', () => {
+    expect(errorsOf({ ...plain(), layout: 'large-and-small' })).toMatchObject({
+      secondMotif: 'The layout “large and small” needs a second motif of 4 sides',
+      colourways: 'The second motif has no colourway',
+    });
+    expect(errorsOf({ ...plain(), secondMotif: 0 })).toEqual({
+      secondMotif: 'The second motif cannot be the only one',
+    });
+    const two = plain();
+    two.motifs = [two.motifs[0]!, two.motifs[0]!];
+    expect(errorsOf({ ...two, secondMotif: 1 })).toEqual({
+      secondMotif: 'The layout “square grid” has no place for a second motif',
+    });
+  });
+
+  it('reads a plan from before layouts and placements: the usual ones', () => {
+    const { layout, edge, secondMotif, placement, ...older } = plain();
+    expect([layout, edge, secondMotif]).toEqual([null, 'toothed', null]);
+    expect(planSchema.parse(older)).toEqual(planSchema.parse({ ...older, placement }));
+  });
+
+  it('says what is wrong with a placement', () => {
+    const rule = { by: 'diagonals', width: 1 };
+    expect(errorsOf({ ...plain(), placement: { rule, painted: [[0, 0, 0, 0]] } })).toEqual({
+      'placement.painted.0.2': expect.stringContaining('Motifs painted'),
+    });
+    expect(errorsOf({ ...plain(), placement: { rule: { by: 'wish' }, painted: [] } })).toEqual({
+      'placement.rule.by': 'Placement must be stripes, a repeat, a gradient or at random',
     });
   });
 

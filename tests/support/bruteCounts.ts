@@ -5,7 +5,7 @@ import type { Layout } from '../../src/lib/layout/layouts';
  * Counts of a layout from the coordinates of its corners alone, without names, parity or steps:
  * two motifs share a side when the middles of the sides fall on one point.
  */
-export function bruteCounts(layout: Layout, rows: number, columns: number): GridCounts {
+export function bruteCounts(layout: Layout, rows: number, columns: number): Partial<GridCounts> {
   const outline = layout === 'square' ? squareAt : hexagonAt;
   const sidesAt = new Map<string, number>();
   const motifsAt = new Map<string, number>();

@@ -15,6 +15,9 @@ import {
   type PlanSwatch,
   type WeightCategory,
 } from '../../src/lib';
+import { layoutFacts, layoutFor, layoutsFor, EDGES } from '../../src/lib/layout/layouts';
+import { withMotif } from '../../src/lib/plan/edits';
+import { withLayout } from '../../src/lib/plan/layoutEdits';
 
 /** Properties are tried on the same cases every time; fast-check prints them when one fails. */
 export const FIXED_SEED = { seed: 20_261_201, numRuns: 60 } as const;
@@ -29,10 +32,10 @@ export function frozen<T>(value: T): T {
 export const buildPlan = (change: Partial<Plan> = {}): Plan =>
   frozen({ ...structuredClone(EXAMPLE_PLAN), ...change });
 
-/** One motif in one colour, a single colour of yarn, no border and nothing measured. */
+/** One motif in one colour, a single colour of yarn, no border and nothing measured, in its usual layout. */
 export function plainPlan(key: string, change: Partial<Plan> = {}, rounds = Infinity): Plan {
   const motif = readyMotif(key, rounds) as Motif;
-  return buildPlan({
+  const plan = buildPlan({
     colours: [{ key: 'c1', name: 'Skerry', hex: '#2f5d73' }],
     swatch: null,
     evidence: [],
@@ -43,6 +46,7 @@ export function plainPlan(key: string, change: Partial<Plan> = {}, rounds = Infi
     border: [],
     ...change,
   });
+  return frozen(withLayout(plan, plan.layout));
 }
 
 export const weighed = (pieceG: number, resolutionG: number): PlanEvidence['reading'] => ({
@@ -94,10 +98,15 @@ export const anyEvidence: fc.Arbitrary<PlanEvidence> = fc.oneof(
   }),
 );
 
-/** Plans of every ready motif, join, corner, border and confidence. */
+/** Motifs that fill a layout by themselves. */
+const LONE_MOTIFS = READY_MOTIFS.filter(
+  ({ sides }) => layoutFacts(layoutFor(sides)).secondSides === null,
+);
+
+/** Plans of every ready motif that fills its layout, every join, corner, border and confidence. */
 export const anyPlan: fc.Arbitrary<Plan> = fc
   .record({
-    motif: fc.constantFrom(...READY_MOTIFS),
+    motif: fc.constantFrom(...LONE_MOTIFS),
     rounds: fc.integer({ min: 1, max: 5 }),
     join: fc.constantFrom(...READY_JOINS),
     joinColour: colourKey,
@@ -138,4 +147,19 @@ export const anyPlan: fc.Arbitrary<Plan> = fc
       border: parts.border,
       confidence: parts.confidence,
     });
+  });
+
+/** The same, in every layout that the motif can lie in, octagons too, with either edge. */
+export const anyLaidPlan: fc.Arbitrary<Plan> = fc
+  .record({
+    plan: anyPlan,
+    motif: fc.constantFrom(...READY_MOTIFS),
+    layout: fc.nat(10),
+    edge: fc.constantFrom(...EDGES),
+  })
+  .map(({ plan, motif, layout, edge }) => {
+    const layouts = layoutsFor(motif.sides);
+    const worked = { ...motif, rounds: motif.rounds.slice(0, 4) };
+    const laid = withLayout(withMotif(plan, worked), layouts[layout % layouts.length] ?? null);
+    return frozen({ ...laid, edge });
   });

@@ -1,6 +1,6 @@
 import type { Join } from '../../lib/joins/join';
 import type { MotifSides } from '../../lib/motifs/motif';
-import { fixed, polygonPoints } from './polygonPoints';
+import { fixed, polygonPoints } from '../../lib/motifs/polygonPoints';
 
 interface JoinLoopsProps {
   join: Join;

@@ -1,7 +1,7 @@
 import { joinFit } from '../../lib/joins/fit';
 import type { Join } from '../../lib/joins/join';
 import { READY_JOINS } from '../../lib/joins/readyJoins';
-import { joinStitches } from '../../lib/ledger/blanketOf';
+import { joinStitches } from '../../lib/ledger/pieces';
 import type { Motif, MotifSides } from '../../lib/motifs/motif';
 import { EXAMPLE_PLAN } from '../../lib/plan/examplePlan';
 import { stitch } from '../../lib/stitches/stitchTable';

@@ -4,10 +4,10 @@ import {
   withColour,
   withColourway,
   withoutColour,
-  withoutColourway,
   withRoundColour,
 } from '../../lib/plan/edits';
 import type { Plan } from '../../lib/plan/plan';
+import { withoutColourway } from '../../lib/plan/withoutMotif';
 import { PLAN_LIMITS } from '../../schemas/limits';
 import { Button } from '../ui/Button';
 import { Sheet } from '../ui/Dialog';

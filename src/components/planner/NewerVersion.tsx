@@ -1,6 +1,5 @@
 import { useEffect, useState } from 'react';
 import { getMotif } from '../../client/queries/motifs';
-import { layoutFor } from '../../lib/layout/layouts';
 import { motifChanges, type MotifChanges } from '../../lib/motifs/motifChanges';
 import type { MotifChoice } from '../../lib/motifs/motifChoices';
 import type { Motif } from '../../lib/motifs/motif';
@@ -72,11 +71,9 @@ export default function NewerVersion({ plan, choice, change, terms }: NewerVersi
         </a>
       </p>
       <div className="mt-2 flex flex-wrap gap-2">
-        {layoutFor(now.sides) && (
-          <Button small onClick={() => take(now)}>
-            Take version {newer.version}
-          </Button>
-        )}
+        <Button small onClick={() => take(now)}>
+          Take version {newer.version}
+        </Button>
         <Button
           small
           kind="quiet"

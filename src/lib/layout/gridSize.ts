@@ -1,10 +1,16 @@
+import { apothemsAcross } from '../motifs/geometry';
+import type { MotifSides } from '../motifs/motif';
 import type { PlanSize } from '../plan/plan';
-import { MOST_ROWS } from './gridCounts';
-import type { Layout } from './layouts';
+import { along, MOST_ROWS } from './gridCounts';
+import { cornerInsets, placed } from './lattice';
+import { layoutFaces } from './layoutFaces';
+import type { Arrangement } from './layouts';
 
 /** What sets the size of a blanket, in mm. */
 export interface GridMeasures {
-  /** Motif, flat to flat. */
+  /** Of the main motif. */
+  readonly sides: MotifSides;
+  /** Main motif, as `MotifGeometry.acrossMm`. */
   readonly acrossMm: number;
   /** Added by each seam. */
   readonly seamMm: number;
@@ -19,44 +25,96 @@ export interface GridSize {
   readonly heightMm: number;
 }
 
+/** Half of a motif with half a seam round it, in mm: the unit of a layout's lattice. */
+export const cellApothemMm = ({ sides, acrossMm, seamMm }: GridMeasures): number =>
+  acrossMm / apothemsAcross(sides) + seamMm / 2;
+
 /**
- * Finished size: columns × motif + (columns - 1) × seam + 2 × (edge + border), and so on down.
- * Rows of hexagons nest by a quarter of their height and stand half a motif right of one another.
+ * Finished size: the outermost motifs, with rounds that a join adds outside them, and the border.
  *
  * Example: 8 × 10 squares of 142 mm, 5 mm seams, no edge, 15 mm border: 1201 × 1495 mm.
  */
 export function gridSize(
-  layout: Layout,
+  arrangement: Arrangement,
   rows: number,
   columns: number,
   measures: GridMeasures,
 ): GridSize {
-  const { acrossMm, seamMm } = measures;
+  const extent = along(rows, (r) => along(columns, (c) => smallExtent(arrangement, r, c)));
+  const apothemMm = cellApothemMm(measures);
   const outsideMm = 2 * (measures.edgeMm + measures.borderMm);
-  const straight = (count: number): number => count * acrossMm + (count - 1) * seamMm + outsideMm;
-  if (layout === 'square') return { widthMm: straight(columns), heightMm: straight(rows) };
-  const sideMm = acrossMm / Math.sqrt(3);
-  const rowMm = 1.5 * sideMm + (Math.sqrt(3) / 2) * seamMm;
+  const halfSeamMm = measures.seamMm / 2;
   return {
-    widthMm: straight(columns) + (rows > 1 ? (acrossMm + seamMm) / 2 : 0),
-    heightMm: 2 * sideMm + (rows - 1) * rowMm + outsideMm,
+    widthMm: extent.width * apothemMm - extent.widthInset * halfSeamMm + outsideMm,
+    heightMm: extent.height * apothemMm - extent.heightInset * halfSeamMm + outsideMm,
   };
+}
+
+/** Where the lattice's own corner lies in the finished blanket, in mm from its top left corner. */
+export function gridOrigin(
+  arrangement: Arrangement,
+  rows: number,
+  columns: number,
+  { seamMm, edgeMm, borderMm }: GridMeasures,
+): readonly [xMm: number, yMm: number] {
+  const { leftInset, topInset } = smallExtent(arrangement, Math.min(rows, 2), Math.min(columns, 2));
+  const outsideMm = edgeMm + borderMm;
+  return [outsideMm - (leftInset * seamMm) / 2, outsideMm - (topInset * seamMm) / 2];
+}
+
+/**
+ * Size of the motifs' cells in their apothems, how often half a seam goes off it in all, and on
+ * the left and at the top.
+ */
+type Extent = Readonly<
+  Record<'width' | 'height' | 'widthInset' | 'heightInset' | 'leftInset' | 'topInset', number>
+>;
+
+const known = new Map<string, Extent>();
+
+function smallExtent(arrangement: Arrangement, rows: number, columns: number): Extent {
+  const key = `${arrangement.layout} ${arrangement.edge} ${rows} ${columns}`;
+  const extent = known.get(key) ?? extentOf(arrangement, rows, columns);
+  known.set(key, extent);
+  return extent;
+}
+
+function extentOf(arrangement: Arrangement, rows: number, columns: number): Extent {
+  const points = layoutFaces(arrangement, rows, columns).flatMap((face) => {
+    const outline = face.points.map((point) => placed(arrangement.layout, point));
+    const insets = cornerInsets(outline);
+    return outline.map((at, i) => ({ at, inset: insets[i] as [number, number] }));
+  });
+  const [width, widthInset, leftInset] = span(points, 0);
+  const [height, heightInset, topInset] = span(points, 1);
+  return { width, widthInset, leftInset, height, heightInset, topInset };
+}
+
+function span(
+  points: readonly { at: readonly number[]; inset: readonly number[] }[],
+  axis: 0 | 1,
+): [size: number, inset: number, firstInset: number] {
+  // Of corners equally far out, the one that reaches furthest once drawn in counts.
+  const along = points
+    .map(({ at, inset }) => [at[axis] ?? 0, inset[axis] ?? 0] as const)
+    .sort((left, right) => left[0] - right[0] || left[1] - right[1]);
+  const first = along[0] ?? [0, 0];
+  const furthest = along.at(-1)?.[0] ?? 0;
+  const last = along.filter(([at]) => furthest - at < 1e-9);
+  return [furthest - first[0], first[1] - Math.max(...last.map(([, inset]) => inset)), first[1]];
 }
 
 /** Rows and columns of a plan: as given, or those whose finished size meets its target. */
 export function gridFor(
-  layout: Layout,
+  arrangement: Arrangement,
   size: PlanSize,
   measures: GridMeasures,
 ): { rows: number; columns: number } {
   if (size.by === 'grid') return { rows: size.rows, columns: size.columns };
-  const rows = countFor(size.heightMm, size.rule, (n) => gridSize(layout, n, 1, measures).heightMm);
-  const columns = countFor(
-    size.widthMm,
-    size.rule,
-    (n) => gridSize(layout, rows, n, measures).widthMm,
-  );
-  return { rows, columns };
+  const heightMm = (n: number): number => gridSize(arrangement, n, 1, measures).heightMm;
+  const rows = countFor(size.heightMm, size.rule, heightMm);
+  const widthMm = (n: number): number => gridSize(arrangement, rows, n, measures).widthMm;
+  return { rows, columns: countFor(size.widthMm, size.rule, widthMm) };
 }
 
 function countFor(

@@ -1,44 +1,63 @@
 import type { MotifSides } from '../motifs/motif';
-import { planeMap, type PlaneMap } from './planeMap';
 
-/** Square grid (squares, and circles that touch their four neighbours), or hexagons in offset rows. */
-export type Layout = 'square' | 'offset-hexagons';
+/** The ways motifs can lie: each a plane map of faces that share sides and corners. */
+export const LAYOUTS = [
+  'square',
+  'brick',
+  'on-point',
+  'large-and-small',
+  'offset-hexagons',
+  'triangles',
+  'octagons',
+] as const;
+export type Layout = (typeof LAYOUTS)[number];
 
-/** The layout that motifs of this many sides are planned in, or null where there is none yet. */
-export function layoutFor(sides: MotifSides): Layout | null {
-  if (sides === 6) return 'offset-hexagons';
-  return sides === 4 || sides === 0 ? 'square' : null;
+/** What the outline does where rows do not end alike: left as it is, or filled with half motifs. */
+export const EDGES = ['toothed', 'straight'] as const;
+export type Edge = (typeof EDGES)[number];
+
+/** How the motifs of a blanket lie. */
+export interface Arrangement {
+  readonly layout: Layout;
+  readonly edge: Edge;
 }
 
-/** Plane map of `rows` × `columns` motifs, row by row; odd rows of hexagons stand half a motif right. */
-export function layoutMap(layout: Layout, rows: number, columns: number): PlaneMap {
-  const outline = layout === 'square' ? squareOutline : hexagonOutline;
-  return planeMap(
-    Array.from({ length: rows * columns }, (_, i) =>
-      outline(Math.floor(i / columns), i % columns).map(([x, y]) => `${x},${y}`),
-    ),
-  );
+export interface LayoutFacts {
+  /** As a person chooses it: "offset rows". */
+  readonly name: string;
+  /** Shapes of its main motif. */
+  readonly sides: readonly MotifSides[];
+  /** Sides of the second motif that it needs between or beside the main ones, or null. */
+  readonly secondSides: MotifSides | null;
+  /** Whether half motifs can straighten its edge. */
+  readonly hasTeeth: boolean;
+  /** What `rows` and `columns` count: "motifs", or "blocks" where a block holds several. */
+  readonly unit: 'motifs' | 'blocks';
 }
 
-type Point = readonly [x: number, y: number];
+const FACTS: Readonly<Record<Layout, LayoutFacts>> = {
+  square: facts('square grid', [4, 0]),
+  brick: facts('offset rows', [4], { hasTeeth: true }),
+  'on-point': facts('on point', [4], { hasTeeth: true }),
+  'large-and-small': facts('large and small', [4], { secondSides: 4, unit: 'blocks' }),
+  'offset-hexagons': facts('hexagons', [6], { hasTeeth: true }),
+  triangles: facts('triangles', [3], { hasTeeth: true }),
+  octagons: facts('octagons and squares', [8], { hasTeeth: true, secondSides: 4 }),
+};
 
-const squareOutline = (row: number, column: number): Point[] => [
-  [column, row],
-  [column + 1, row],
-  [column + 1, row + 1],
-  [column, row + 1],
-];
-
-/** Pointed top; x in half widths, y in quarters of the height, so that every corner is a whole number. */
-function hexagonOutline(row: number, column: number): Point[] {
-  const x = 2 * column + (row % 2);
-  const y = 3 * row;
-  return [
-    [x + 1, y],
-    [x + 2, y + 1],
-    [x + 2, y + 3],
-    [x + 1, y + 4],
-    [x, y + 3],
-    [x, y + 1],
-  ];
+function facts(
+  name: string,
+  sides: readonly MotifSides[],
+  rest: Partial<LayoutFacts> = {},
+): LayoutFacts {
+  return { name, sides, secondSides: null, hasTeeth: false, unit: 'motifs', ...rest };
 }
+
+export const layoutFacts = (layout: Layout): LayoutFacts => FACTS[layout];
+
+/** The layouts that motifs of this many sides can lie in, the usual one first. */
+export const layoutsFor = (sides: MotifSides): Layout[] =>
+  LAYOUTS.filter((layout) => FACTS[layout].sides.includes(sides));
+
+/** The layout that motifs of this many sides are planned in unless another is chosen: `layoutFor(6)` is "offset-hexagons". */
+export const layoutFor = (sides: MotifSides): Layout => layoutsFor(sides)[0] as Layout;

@@ -34,11 +34,11 @@ export function estimate(plan: Plan): Estimate {
   ]);
   const skeins = colours.reduce((sum, colour) => sum + colour.skeins, 0);
   return {
-    layout: blanket.layout,
+    ...blanket.arrangement,
     rows: blanket.rows,
     columns: blanket.columns,
     counts: blanket.counts,
-    colourwayMotifs: blanket.colourwayMotifs,
+    colourwayMotifs: blanket.places.map(({ motifs, fillers }) => motifs + fillers),
     size: blanket.size,
     stitchWidthMm: blanket.gauge.stitchWidthMm,
     motifs: blanket.geometries,

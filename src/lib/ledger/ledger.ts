@@ -1,6 +1,6 @@
 import type { FitResult } from '../joins/fit';
 import type { GridCounts } from '../layout/gridCounts';
-import type { Layout } from '../layout/layouts';
+import type { Arrangement } from '../layout/layouts';
 import type { MotifGeometry } from '../motifs/geometry';
 import type { StitchCode } from '../stitches/stitch';
 
@@ -100,12 +100,11 @@ export interface FinishedSize {
   readonly borderMm: number;
 }
 
-export interface Estimate {
-  readonly layout: Layout;
+export interface Estimate extends Arrangement {
   readonly rows: number;
   readonly columns: number;
   readonly counts: GridCounts;
-  /** Motifs in each colourway of the plan. */
+  /** Whole motifs in each colourway of the plan. */
   readonly colourwayMotifs: readonly number[];
   readonly size: FinishedSize;
   readonly stitchWidthMm: number;

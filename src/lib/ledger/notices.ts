@@ -1,9 +1,10 @@
 import { expectedM, learnHand, handVarianceM2 } from '../hand/hand';
 import { joinFit } from '../joins/fit';
 import type { Motif } from '../motifs/motif';
-import type { Plan } from '../plan/plan';
+import { mainMotif, type Plan } from '../plan/plan';
 import { stitchWidthRangeMm, YARN_CATEGORIES } from '../yarnCategories';
-import { joinStitches, type Blanket } from './blanketOf';
+import type { Blanket } from './blanketOf';
+import { joinStitches } from './pieces';
 import { evidenceOf } from './evidenceOf';
 import type { Notice } from './ledger';
 
@@ -23,6 +24,8 @@ export function noticesOf(blanket: Blanket): Notice[] {
     ...readingNotices(blanket),
     ...fitNotices(blanket),
     ...flatnessNotices(blanket),
+    ...secondMotifNotices(blanket),
+    ...partNotices(blanket),
     ...cautions(blanket),
   ];
 }
@@ -61,9 +64,10 @@ function readingNotices({ plan, gauge }: Blanket): Notice[] {
 }
 
 function fitNotices({ plan, join, sideStitches }: Blanket): Notice[] {
-  const motif = plan.motifs[0] as Motif;
+  const motif = mainMotif(plan);
   const { fits, words } = joinFit(join, motif, sideStitches);
-  const counts = [...new Set(plan.motifs.map(joinStitches))];
+  const mains = plan.motifs.filter((_, i) => i !== plan.secondMotif);
+  const counts = [...new Set(mains.map(joinStitches))];
   return [
     ...(fits ? [] : [question('join-does-not-fit', `${join.name} on ${motif.name}: ${words}`)]),
     ...(counts.length > 1
@@ -84,7 +88,7 @@ const question = (code: string, message: string): Notice => ({
 });
 
 function flatnessNotices({ plan, geometries }: Blanket): Notice[] {
-  const sides = geometries.map(({ acrossMm }) => acrossMm);
+  const sides = geometries.flatMap(({ acrossMm }, i) => (i === plan.secondMotif ? [] : [acrossMm]));
   const differ = Math.max(...sides) > (1 + SIDE_TOLERANCE) * Math.min(...sides);
   return [
     ...geometries.flatMap(({ trouble }, i): Notice[] =>
@@ -107,6 +111,40 @@ function flatnessNotices({ plan, geometries }: Blanket): Notice[] {
           },
         ]
       : []),
+  ];
+}
+
+/** Whether the second motif is as large as its places. */
+function secondMotifNotices({ plan, arrangement, geometries, size }: Blanket): Notice[] {
+  const second = geometries[plan.secondMotif ?? -1];
+  const main = geometries.find((_, i) => i !== plan.secondMotif);
+  if (!second || !main) return [];
+  const roomMm =
+    arrangement.layout === 'octagons' ? main.sideMm : (main.acrossMm - size.seamMm) / 2;
+  if (Math.abs(second.acrossMm - roomMm) <= SIDE_TOLERANCE * roomMm) return [];
+  return [
+    question(
+      'second-motif-size',
+      `The second motif is ${second.acrossMm.toFixed(0)} mm across, its places ${roomMm.toFixed(0)} mm: take more or fewer rounds of it.`,
+    ),
+  ];
+}
+
+/** What is planned by halves is not yet a pattern. */
+function partNotices({ counts }: Blanket): Notice[] {
+  const halves = counts.halves + counts.halfFillers;
+  const quarters = counts.quarters + counts.quarterFillers;
+  if (halves + quarters === 0) return [];
+  const parts = [
+    halves > 0 ? `${halves} half` : '',
+    quarters > 0 ? `${quarters} quarter` : '',
+  ].filter((words) => words !== '');
+  return [
+    {
+      code: 'half-motifs',
+      severity: 'note',
+      message: `${parts.join(' and ')} motifs straighten the edge. They are planned with half or a quarter of each round's stitches; a written half motif differs a little.`,
+    },
   ];
 }
 

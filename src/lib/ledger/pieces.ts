@@ -1,9 +1,11 @@
 import { borderRounds } from '../border/borderRounds';
 import type { Join } from '../joins/join';
 import { countsOnSide, outerSideStitches } from '../joins/joinCounts';
+import type { SlotCounts } from '../colour/colourwayPlaces';
+import { SLOT_FACTS, SLOTS, type Slot } from '../layout/face';
 import type { GridCounts } from '../layout/gridCounts';
 import type { Motif } from '../motifs/motif';
-import type { Colourway, Plan } from '../plan/plan';
+import { mainMotif, type Colourway, type Plan } from '../plan/plan';
 import { addCounts, scaleCounts, subtractCounts } from '../stitches/counts';
 import type { StitchCounts } from '../stitches/stitch';
 import type { Part } from './ledger';
@@ -30,14 +32,13 @@ export interface PieceContext {
   readonly plan: Plan;
   readonly join: Join;
   readonly counts: GridCounts;
-  readonly colourwayMotifs: readonly number[];
+  /** Whole, half and quarter motifs of each colourway. */
+  readonly places: readonly SlotCounts[];
   /** Stitches of a side in the motif's own count, and where two circles touch. */
   readonly sideStitches: number;
   /** Length of one seam. */
   readonly seamMm: number;
   readonly cornerLinks: number;
-  /** Long lines of seams: where a join's yarn is attached and cut. */
-  readonly seamLines: number;
 }
 
 /** Sides and corners that a join finds on one motif; a circle has four places to touch and no corner. */
@@ -47,11 +48,26 @@ export const joinSidesOf = (motif: Motif): number => (motif.sides === 0 ? 4 : mo
 const openSideStitches = (motif: Motif, sideStitches: number): number =>
   motif.sides === 0 ? (motif.rounds.at(-1)?.perSide ?? 0) / joinSidesOf(motif) : sideStitches;
 
+const SLOT_WORDS: Readonly<Record<Slot, string>> = {
+  motifs: '',
+  fillers: '',
+  halves: ' (half motifs)',
+  halfFillers: ' (half motifs)',
+  quarters: ' (quarter motifs)',
+  quarterFillers: ' (quarter motifs)',
+};
+
+/** Motifs of a colourway, halves and quarters counted as such. */
+const wholeMotifs = (places: SlotCounts): number =>
+  SLOTS.reduce((sum, slot) => sum + places[slot] * SLOT_FACTS[slot].share, 0);
+
 /** Every piece of the blanket, by colour; its cost grows with the colourways, not with the area. */
 export function piecesOf(context: PieceContext): PieceGroup[] {
   return [
     ...context.plan.colourways.flatMap((colourway, i) =>
-      motifPieces(context, colourway, context.colourwayMotifs[i] ?? 0),
+      SLOTS.flatMap((slot) =>
+        motifPieces(context, colourway, context.places[i]?.[slot] ?? 0, slot),
+      ),
     ),
     ...joinPieces(context),
     ...borderPieces(context),
@@ -72,28 +88,35 @@ const worked = (
   seamMm,
 });
 
-/** A motif's rounds in one colourway, one group for each of its colours. */
+/**
+ * A motif's rounds in one colourway, one group for each of its colours. Half a motif is worked to
+ * and fro with half the stitches of each round (ours: written half motifs differ a little).
+ */
 export function motifPieces(
   { plan }: Pick<PieceContext, 'plan'>,
   { motifIndex, roundColours }: Colourway,
   count: number,
+  slot: Slot = 'motifs',
 ): PieceGroup[] {
+  if (count === 0) return [];
+  const { share } = SLOT_FACTS[slot];
   const motif = plan.motifs[motifIndex] as Motif;
   const lines = new Map<string, PieceLine[]>();
   motif.rounds.forEach((round, i) => {
     const colour = roundColours[i] as string;
     const attached = i === 0 || roundColours[i - 1] !== colour;
     const ring = i === 0 ? motif.ring.made : {};
-    const made = addCounts(ring, attached ? subtractCounts(round.made, round.travel) : round.made);
+    const whole = addCounts(ring, attached ? subtractCounts(round.made, round.travel) : round.made);
+    const made = share === 1 ? whole : scaleCounts(whole, share);
     const ofColour = lines.get(colour) ?? [];
-    ofColour.push(worked('rounds', round.label, made, attached ? 2 : 0));
+    ofColour.push(worked('rounds', round.label + SLOT_WORDS[slot], made, attached ? 2 : 0));
     lines.set(colour, ofColour);
   });
   return [...lines].map(([colour, ofColour]) => ({ colour, count, lines: ofColour }));
 }
 
 function joinPieces(context: PieceContext): PieceGroup[] {
-  const { plan, join, counts, sideStitches, seamMm, seamLines } = context;
+  const { plan, join, counts, sideStitches, seamMm } = context;
   const { colour } = plan.join;
   const seam = countsOnSide(join, join.perSeam, sideStitches);
   const links = scaleCounts(join.perLink, context.cornerLinks);
@@ -109,7 +132,7 @@ function joinPieces(context: PieceContext): PieceGroup[] {
     { colour, count: 1, lines: [worked('join', `${join.name}: corners`, links)] },
   ];
   if (join.attached === 'line') {
-    groups.push({ colour, count: seamLines, lines: [worked('join', join.name, {}, 2)] });
+    groups.push({ colour, count: counts.seamLines, lines: [worked('join', join.name, {}, 2)] });
   } else {
     groups.push(...addedRounds(context));
   }
@@ -117,39 +140,51 @@ function joinPieces(context: PieceContext): PieceGroup[] {
 }
 
 /** Rounds that a join adds to every motif, and the tails of attaching its yarn there. */
-function addedRounds({ plan, join, colourwayMotifs, sideStitches }: PieceContext): PieceGroup[] {
-  return plan.colourways.map(({ motifIndex, roundColours }, i) => {
+function addedRounds({ plan, join, places, sideStitches }: PieceContext): PieceGroup[] {
+  return plan.colourways.flatMap(({ motifIndex, roundColours }, i) => {
     const motif = plan.motifs[motifIndex] as Motif;
-    const n = openSideStitches(motif, sideStitches);
+    const side = motifIndex === plan.secondMotif ? joinStitches(motif) : sideStitches;
+    const n = openSideStitches(motif, side);
     const made = addCounts(
       scaleCounts(countsOnSide(join, join.perMotifSide, n), joinSidesOf(motif)),
       scaleCounts(join.perMotifCorner, motif.sides),
     );
     const carriesOn = roundColours.at(-1) === plan.join.colour;
-    return {
+    return SLOTS.map((slot): PieceGroup => ({
       colour: plan.join.colour,
-      count: colourwayMotifs[i] ?? 0,
-      lines: [worked('join', `${join.name}: added rounds`, made, carriesOn ? 0 : 2)],
-    };
+      count: places[i]?.[slot] ?? 0,
+      lines: [
+        worked(
+          'join',
+          `${join.name}: added rounds${SLOT_WORDS[slot]}`,
+          scaleCounts(made, SLOT_FACTS[slot].share),
+          carriesOn ? 0 : 2,
+        ),
+      ],
+    }));
   });
 }
 
 /** Links worked in the yarn of each motif's last round: shared out over the motifs. */
-function lastRoundLinks(
-  { plan, join, counts, colourwayMotifs }: PieceContext,
-  links: StitchCounts,
-): PieceGroup[] {
+function lastRoundLinks({ plan, join, places }: PieceContext, links: StitchCounts): PieceGroup[] {
+  const all = places.reduce((sum, each) => sum + wholeMotifs(each), 0);
   return plan.colourways.map(({ roundColours }, i) => ({
     colour: roundColours.at(-1) as string,
-    count: colourwayMotifs[i] ?? 0,
-    lines: [worked('join', join.name, scaleCounts(links, 1 / counts.motifs))],
+    count: wholeMotifs(places[i] as SlotCounts),
+    lines: [worked('join', join.name, scaleCounts(links, 1 / all))],
   }));
+}
+
+/** Stitches of a side between corner centres; an eighth of a circle touches each neighbour (ours). */
+export function joinStitches(motif: Motif): number {
+  const perSide = motif.rounds.at(-1)?.perSide ?? 0;
+  return motif.sides === 0 ? Math.floor(perSide / (2 * joinSidesOf(motif))) : perSide;
 }
 
 function borderPieces({ plan, join, counts, sideStitches }: PieceContext): PieceGroup[] {
   const codes = plan.border.map(({ stitch }) => stitch);
   const sides = counts.outerSides;
-  const n = outerSideStitches(join, openSideStitches(plan.motifs[0] as Motif, sideStitches));
+  const n = outerSideStitches(join, openSideStitches(mainMotif(plan), sideStitches));
   return borderRounds(codes, counts, n).map((made, i) => {
     const colour = plan.border[i]?.colour as string;
     const attached = i === 0 || plan.border[i - 1]?.colour !== colour;

@@ -10,7 +10,7 @@ export interface MotifChoice {
   readonly version: number | null;
 }
 
-/** The motifs that a blanket can be laid out of: the first is the group square of 8 rounds. */
+/** The ready-made motifs: the first is the group square of 8 rounds. */
 export const motifChoices = (): MotifChoice[] =>
   READY_MOTIFS.map(({ key, name, rounds }) => ({
     key,

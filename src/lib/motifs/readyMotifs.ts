@@ -1,4 +1,3 @@
-import { layoutFor } from '../layout/layouts';
 import { motifOf } from '../pattern/motifOf';
 import { readPattern } from '../pattern/readPattern';
 import type { Motif } from './motif';
@@ -25,15 +24,10 @@ function readWhenAsked({ key, name, sides, text }: ReadyPattern): Motif {
 }
 
 /** Every ready-made motif, each with every round it can be worked to. */
-export const LIBRARY_MOTIFS: readonly Motif[] = READY_PATTERNS.map(readWhenAsked);
-
-/** Those that a blanket can be laid out of. */
-export const READY_MOTIFS: readonly Motif[] = LIBRARY_MOTIFS.filter(
-  ({ sides }) => layoutFor(sides) !== null,
-);
+export const READY_MOTIFS: readonly Motif[] = READY_PATTERNS.map(readWhenAsked);
 
 /** The ready-made motif of this key, worked to `rounds` rounds at most; null when there is none. */
 export function readyMotif(key: string, rounds = Infinity): Motif | null {
-  const motif = LIBRARY_MOTIFS.find((each) => each.key === key);
+  const motif = READY_MOTIFS.find((each) => each.key === key);
   return motif ? { ...motif, rounds: motif.rounds.slice(0, rounds) } : null;
 }

@@ -2,39 +2,46 @@ import type { StitchCode } from '../stitches/stitch';
 import { addCounts, scaleCounts } from '../stitches/counts';
 import type { Motif } from '../motifs/motif';
 import { motifPieces } from '../ledger/pieces';
-import type { Colourway, Plan, PlanColour, PlanEvidence } from './plan';
+import { layoutFacts } from '../layout/layouts';
+import { withLayout } from './layoutEdits';
+import { mainMotif, type Colourway, type Plan, type PlanColour, type PlanEvidence } from './plan';
 
 /**
- * The plan with its first motif replaced. Colours of rounds stay where there is such a round; new
- * rounds begin the colours again. Motifs already weighed stay as evidence of what they were.
+ * The plan with its main motif replaced. Colours of rounds stay where there is such a round; new
+ * rounds begin the colours again. Motifs already weighed stay as evidence of what they were. A
+ * layout that does not suit the new shape gives way to its usual one.
  */
 export function withMotif(plan: Plan, motif: Motif): Plan {
+  const main = plan.motifs.indexOf(mainMotif(plan));
   const colourways = plan.colourways.map((colourway): Colourway => {
-    if (colourway.motifIndex !== 0) return colourway;
+    if (colourway.motifIndex !== main) return colourway;
     const old = colourway.roundColours;
     return {
       ...colourway,
       roundColours: motif.rounds.map((_, i) => old[i % old.length] as string),
     };
   });
-  return {
+  const changed: Plan = {
     ...plan,
-    motifs: [motif, ...plan.motifs.slice(1)],
+    motifs: plan.motifs.map((each, i) => (i === main ? motif : each)),
     colourways,
     motifSideMm: null,
-    evidence: plan.evidence.map((item) => asCounted(plan, item)),
+    evidence: plan.evidence.map((item) => asCounted(plan, main, item)),
   };
+  if (motif.sides === plan.motifs[main]?.sides) return changed;
+  const suits = plan.layout !== null && layoutFacts(plan.layout).sides.includes(motif.sides);
+  return withLayout(changed, suits ? plan.layout : null);
 }
 
 /** Weighed motifs as a counted piece, so that the reading survives a change of motif. */
-function asCounted(plan: Plan, item: PlanEvidence): PlanEvidence {
-  const colourway = plan.colourways.find(({ motifIndex }) => motifIndex === 0);
-  if (item.piece !== 'motifs' || item.motifIndex !== 0 || !colourway) return item;
+function asCounted(plan: Plan, main: number, item: PlanEvidence): PlanEvidence {
+  const colourway = plan.colourways.find(({ motifIndex }) => motifIndex === main);
+  if (item.piece !== 'motifs' || item.motifIndex !== main || !colourway) return item;
   const lines = motifPieces({ plan }, colourway, item.count).flatMap((group) => group.lines);
   const made = lines.reduce((sum, line) => addCounts(sum, line.made), {});
   return {
     piece: 'counted',
-    label: `${item.count} × ${plan.motifs[0]?.name ?? 'motif'}`.slice(0, 80),
+    label: `${item.count} × ${plan.motifs[main]?.name ?? 'motif'}`.slice(0, 80),
     made: scaleCounts(made, item.count),
     tails: item.count * lines.reduce((sum, { tails }) => sum + tails, 0),
     reading: item.reading,
@@ -63,12 +70,6 @@ export const withColourway = (plan: Plan): Plan => ({
   ...plan,
   colourways: [...plan.colourways, plan.colourways.at(-1) as Colourway],
 });
-
-/** The plan without one of its colourways; the last one stays. */
-export const withoutColourway = (plan: Plan, index: number): Plan =>
-  plan.colourways.length === 1
-    ? plan
-    : { ...plan, colourways: plan.colourways.filter((_, i) => i !== index) };
 
 /** The plan with a further colour, under a key that no other has. */
 export function withColour(plan: Plan, colour: Omit<PlanColour, 'key'>): Plan {

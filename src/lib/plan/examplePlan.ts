@@ -1,3 +1,4 @@
+import { DIAGONALS } from '../colour/placement';
 import { readyMotif } from '../motifs/readyMotifs';
 import type { Motif } from '../motifs/motif';
 import { lengthM, massG, priceMinor, widthMm } from '../units/quantities';
@@ -35,6 +36,10 @@ export const EXAMPLE_PLAN: Plan = {
   ],
   motifSideMm: null,
   size: { by: 'grid', rows: 10, columns: 8 },
+  layout: null,
+  edge: 'toothed',
+  secondMotif: null,
+  placement: DIAGONALS,
   join: { key: 'flat-braid', colour: 'c1' },
   corners: 'crossed',
   border: [

@@ -1,3 +1,5 @@
+import type { Placement } from '../colour/placement';
+import type { Edge, Layout } from '../layout/layouts';
 import type { Motif } from '../motifs/motif';
 import type { StitchCode, StitchCounts } from '../stitches/stitch';
 import type { LengthM, MassG, PriceMinor, WidthMm } from '../units/quantities';
@@ -77,10 +79,7 @@ export interface BorderRound {
 export const CONFIDENCES = [0.5, 0.8, 0.9, 0.95, 0.99] as const;
 export type Confidence = (typeof CONFIDENCES)[number];
 
-/**
- * Everything an estimate depends on. Colourways alternate along the diagonals of the grid:
- * the motif in row r and column c is colourway (r + c) modulo their number.
- */
+/** Everything an estimate depends on. */
 export interface Plan {
   readonly yarn: PlanYarn;
   readonly colours: readonly PlanColour[];
@@ -91,6 +90,13 @@ export interface Plan {
   /** Measured side of a finished motif (flat to flat for a hexagon, across for a circle); null to compute it. */
   readonly motifSideMm: WidthMm | null;
   readonly size: PlanSize;
+  /** How the motifs lie; null as motifs of this shape usually do. */
+  readonly layout: Layout | null;
+  readonly edge: Edge;
+  /** Which of `motifs` lies in the second places of a layout that has them, else null. */
+  readonly secondMotif: number | null;
+  /** Which colourway lies where. */
+  readonly placement: Placement;
   readonly join: { readonly key: string; readonly colour: string };
   readonly corners: 'gathered' | 'crossed';
   readonly border: readonly BorderRound[];
@@ -98,3 +104,7 @@ export interface Plan {
   /** The maker's own timing; null takes the program's. */
   readonly secondsPerMove: number | null;
 }
+
+/** The main motif of a plan: the first that does not lie in second places. */
+export const mainMotif = ({ motifs, secondMotif }: Pick<Plan, 'motifs' | 'secondMotif'>): Motif =>
+  motifs.find((_, i) => i !== secondMotif) as Motif;

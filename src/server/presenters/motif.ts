@@ -1,5 +1,5 @@
 import type { MotifRow, MotifVersion } from '../../../db/models';
-import { LIBRARY_MOTIFS } from '../../lib/motifs/readyMotifs';
+import { READY_MOTIFS } from '../../lib/motifs/readyMotifs';
 import { READY_PATTERNS } from '../../lib/motifs/ready/readyPatterns';
 import type { ReadyPattern } from '../../lib/motifs/ready/readyPattern';
 import type { MotifSummary, PresentedMotif, PresentedMotifVersion } from '../../schemas/motif';
@@ -54,7 +54,7 @@ const READY: ReadonlyMap<string, () => PresentedMotif> = new Map(
 );
 
 function presentPattern({ key, name, sides, text }: ReadyPattern): PresentedMotif {
-  const motif = LIBRARY_MOTIFS.find((each) => each.key === key);
+  const motif = READY_MOTIFS.find((each) => each.key === key);
   return {
     key,
     readyMade: true,

@@ -1,8 +1,7 @@
 import { fn, col, type Transaction } from 'sequelize';
 import { MotifRow, MotifVersion } from '../../../db/models';
-import { layoutFor } from '../../lib/layout/layouts';
 import { motifChoices, type MotifChoice } from '../../lib/motifs/motifChoices';
-import { LIBRARY_MOTIFS } from '../../lib/motifs/readyMotifs';
+import { READY_MOTIFS } from '../../lib/motifs/readyMotifs';
 import type { ListQuery } from '../../schemas/fields';
 import { KEPT_LIMITS } from '../../schemas/limits';
 import type { MotifSummary, PresentedMotif, PresentedMotifVersion } from '../../schemas/motif';
@@ -17,14 +16,14 @@ import {
 } from '../presenters/motif';
 import { loadOwn } from './own';
 
-const EVERYTHING: ListQuery = { limit: KEPT_LIMITS.motifs + LIBRARY_MOTIFS.length, offset: 0 };
+const EVERYTHING: ListQuery = { limit: KEPT_LIMITS.motifs + READY_MOTIFS.length, offset: 0 };
 
 /** The ready-made motifs, then one's own by name; without a user, the ready-made ones. */
 export async function listMotifs(
   user: CurrentUser | null,
   { limit, offset }: ListQuery = EVERYTHING,
 ): Promise<{ items: MotifSummary[]; total: number }> {
-  const ready = LIBRARY_MOTIFS.flatMap(({ key }) => {
+  const ready = READY_MOTIFS.flatMap(({ key }) => {
     const presented = presentReadyMotif(key);
     if (!presented) return [];
     const { pattern: _text, ...summary } = presented;
@@ -54,12 +53,12 @@ export async function getMotif(
   return ready ?? presentOwnMotif(await loadOwn(MotifRow, user, key, { transaction }));
 }
 
-/** What a planner offers: one's own motifs and the ready-made ones that a blanket can be laid out of. */
+/** What a planner offers: one's own motifs and the ready-made ones. */
 export async function planMotifChoices(user: CurrentUser | null): Promise<MotifChoice[]> {
   const own = user ? await ownMotifs(user) : [];
   return [
-    ...own.flatMap(({ key, name, sides, version, motif }) =>
-      motif && layoutFor(sides) ? [{ key, name, rounds: motif.rounds.length, version }] : [],
+    ...own.flatMap(({ key, name, version, motif }) =>
+      motif ? [{ key, name, rounds: motif.rounds.length, version }] : [],
     ),
     ...motifChoices(),
   ];

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { inLibrary, libraryItem } from '../../../src/components/motifs/library';
-import { gaugeOf, LIBRARY_MOTIFS } from '../../../src/lib';
+import { gaugeOf, READY_MOTIFS } from '../../../src/lib';
 import type { MotifSummary } from '../../../src/schemas/motif';
 import { libraryQuery } from '../../../src/schemas/motifLibrary';
 import { presentReadyMotif } from '../../../src/server/presenters/motif';
@@ -15,10 +15,9 @@ const unfinished: MotifSummary = {
   motif: null,
   problems: { errors: 2, warnings: 0 },
 };
-const items = [
-  ...LIBRARY_MOTIFS.flatMap(({ key }) => presentReadyMotif(key) ?? []),
-  unfinished,
-].map((summary) => libraryItem(summary, gaugeOf(null, 4)));
+const items = [...READY_MOTIFS.flatMap(({ key }) => presentReadyMotif(key) ?? []), unfinished].map(
+  (summary) => libraryItem(summary, gaugeOf(null, 4)),
+);
 const found = (search: Record<string, string>) =>
   inLibrary(items, libraryQuery.parse(search)).map(({ summary }) => summary.name);
 

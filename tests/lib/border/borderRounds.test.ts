@@ -1,9 +1,10 @@
 import { describe, expect, it } from 'vitest';
 import { borderRounds } from '../../../src/lib/border/borderRounds';
 import { gridCounts } from '../../../src/lib/layout/gridCounts';
+import { HEXAGONS, SQUARES } from '../../support/arrangements';
 import { frozen } from '../../support/plans';
 
-const squares = gridCounts('square', 10, 8);
+const squares = gridCounts(SQUARES, 10, 8);
 
 describe('borderRounds', () => {
   it('gives its worked example', () => {
@@ -19,7 +20,7 @@ describe('borderRounds', () => {
   });
 
   it('goes round a single motif', () => {
-    expect(borderRounds(['sc'], gridCounts('square', 1, 1), 15)).toEqual([
+    expect(borderRounds(['sc'], gridCounts(SQUARES, 1, 1), 15)).toEqual([
       { sc: 4 * 15 + 12, ch: 1, 'sl st': 1 },
     ]);
   });
@@ -40,7 +41,7 @@ describe('borderRounds', () => {
   });
 
   it('holds a stitch at every outer corner of hexagons and grows at four of them', () => {
-    const hexagons = gridCounts('offset-hexagons', 3, 4);
+    const hexagons = gridCounts(HEXAGONS, 3, 4);
     const { outerSides, edgeJunctions, outerCorners } = hexagons;
     const all = outerSides * 10 + edgeJunctions * 2 + outerCorners;
     expect(outerCorners).toBeGreaterThan(4);

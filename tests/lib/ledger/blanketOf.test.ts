@@ -1,22 +1,23 @@
 import { describe, expect, it } from 'vitest';
 import { DomainError } from '../../../src/lib/errors';
-import { blanketOf, joinStitches } from '../../../src/lib/ledger/blanketOf';
+import { blanketOf } from '../../../src/lib/ledger/blanketOf';
+import { joinStitches } from '../../../src/lib/ledger/pieces';
 import type { Motif } from '../../../src/lib/motifs/motif';
 import { readyMotif } from '../../../src/lib/motifs/readyMotifs';
 import { widthMm } from '../../../src/lib/units/quantities';
+import { HEXAGONS, SQUARES } from '../../support/arrangements';
 import { buildPlan, plainPlan } from '../../support/plans';
 
 describe('blanketOf', () => {
   it('lays the front page out', () => {
     const blanket = blanketOf(buildPlan());
     expect(blanket).toMatchObject({
-      layout: 'square',
+      arrangement: SQUARES,
       rows: 10,
       columns: 8,
       sideStitches: 15,
-      seamLines: 9 + 7,
       cornerLinks: 63 * 2 + 32,
-      colourwayMotifs: [27, 27, 26],
+      places: [27, 27, 26].map((motifs) => ({ motifs, halves: 0 })),
     });
   });
 
@@ -69,21 +70,21 @@ describe('blanketOf', () => {
   it('counts an eighth of a circle where two touch, and no corners', () => {
     const blanket = blanketOf(plainPlan('circle'));
     const { acrossMm } = blanket.geometries[0] as { acrossMm: number };
-    expect(blanket).toMatchObject({ layout: 'square', sideStitches: 7, cornerLinks: 0 });
+    expect(blanket).toMatchObject({ arrangement: SQUARES, sideStitches: 7, cornerLinks: 0 });
     expect(blanket.seamMm).toBeCloseTo((Math.PI * acrossMm) / 8, 10);
   });
 
   it('lays hexagons in offset rows', () => {
     expect(blanketOf(plainPlan('hexagon'))).toMatchObject({
-      layout: 'offset-hexagons',
+      arrangement: HEXAGONS,
       sideStitches: 10,
     });
   });
 
-  it('refuses a shape without a layout and a join it does not know', () => {
-    const triangle: Motif = { ...(readyMotif('group-square', 2) as Motif), sides: 3 };
-    const colourways = [{ motifIndex: 0, roundColours: ['c1', 'c1'] }];
-    expect(() => blanketOf(buildPlan({ motifs: [triangle], colourways }))).toThrow(DomainError);
+  it('refuses a layout that has no place for the motifs, and a join it does not know', () => {
+    const hexagons = plainPlan('hexagon', { layout: null });
+    expect(() => blanketOf({ ...hexagons, layout: 'square' })).toThrow(DomainError);
+    expect(() => blanketOf({ ...plainPlan('octagon'), secondMotif: null })).toThrow(DomainError);
     const unknown = buildPlan({ join: { key: 'no-such', colour: 'c1' } });
     expect(() => blanketOf(unknown)).toThrow('got "no-such"');
   });

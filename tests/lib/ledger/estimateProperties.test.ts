@@ -14,7 +14,7 @@ import {
   type Estimate,
   type Plan,
 } from '../../../src/lib';
-import { anyEvidence, anyPlan, FIXED_SEED } from '../../support/plans';
+import { anyEvidence, anyLaidPlan, anyPlan, FIXED_SEED, plainPlan } from '../../support/plans';
 
 const roundsM = ({ parts }: Estimate): number =>
   parts.filter(({ part }) => part === 'rounds').reduce((sum, each) => sum + each.lengthM, 0);
@@ -173,11 +173,40 @@ describe('estimate, whatever the plan', () => {
         for (const each of compareJoins(plan, READY_JOINS)) {
           const own = estimate({ ...plan, join: { ...plan.join, key: each.join.key } });
           expect([own.rows, own.columns]).toEqual([rows, columns]);
-          expect(each.widthMm).toBeGreaterThanOrEqual(columns * acrossMm);
+          // Strips of triangles hold two in the width of a side.
+          if (plan.motifs[0]?.sides === 3) continue;
+          expect(each.widthMm).toBeGreaterThanOrEqual(columns * acrossMm - 1e-9);
         }
       }),
       { ...FIXED_SEED, numRuns: 15 },
     );
+  });
+
+  it('adds up in every layout: parts to the total, motifs to the layout, within a real size', () => {
+    fc.assert(
+      fc.property(anyLaidPlan, (plan) => {
+        const { totals, parts, counts, colourwayMotifs, size } = estimate(plan);
+        const inParts = parts.reduce(
+          (sum, { part, lengthM }) => (part === 'allowance' ? sum : sum + lengthM),
+          0,
+        );
+        expect(inParts).toBeCloseTo(totals.meanM, 6);
+        const motifs = colourwayMotifs.reduce((sum, each) => sum + each, 0);
+        expect(motifs).toBe(counts.motifs + counts.fillers);
+        expect(size.widthMm).toBeGreaterThan(0);
+        expect(size.heightMm).toBeGreaterThan(0);
+      }),
+      FIXED_SEED,
+    );
+  });
+
+  it('takes half the yarn of a motif for half of it', () => {
+    const plan = plainPlan('group-square', { layout: 'brick', edge: 'straight' });
+    const one: Plan = { ...plan, layout: 'square', size: { by: 'grid', rows: 1, columns: 1 } };
+    const { counts } = estimate(plan);
+    expect(counts.halves).toBe(4);
+    const motifs = counts.motifs + counts.halves / 2;
+    close(roundsM(estimate(plan)), motifs * roundsM(estimate(one)), 1e-9);
   });
 
   it('changes nothing of a plan that is frozen all the way down', () => {

@@ -13,7 +13,7 @@ import {
 } from '../../../src/lib/motifs/heightBelief';
 import { measuredMotif } from '../../../src/lib/motifs/measuredMotif';
 import type { Motif } from '../../../src/lib/motifs/motif';
-import { LIBRARY_MOTIFS, readyMotif } from '../../../src/lib/motifs/readyMotifs';
+import { READY_MOTIFS, readyMotif } from '../../../src/lib/motifs/readyMotifs';
 import { FIXED_SEED, frozen } from '../../support/plans';
 
 /** 7.5 mm wide; sc 6.9 and all else 13.8 mm tall, each known to 3 %. */
@@ -82,29 +82,26 @@ describe('measuredMotif', () => {
     expect(rounds[0]?.heightMm).toBeCloseTo(6.9 + (share * gain * 2.45) / 2, 10);
   });
 
-  it.each(LIBRARY_MOTIFS)(
-    'is the computed geometry of $key before anything is measured',
-    (entry) => {
-      const motif = readyMotif(entry.key) as Motif;
-      for (const known of [gauge, gaugeOf(null, 4)]) {
-        const computed = motifGeometry(motif, known, null);
-        const measured = measuredMotif(motif, known, []);
-        expect(measured.acrossMm).toBeCloseTo(computed.acrossMm, 9);
-        expect(measured.sideMm).toBeCloseTo(computed.sideMm, 9);
-        expect(measured.trouble).toEqual(computed.trouble);
-        measured.rounds.forEach((round, i) =>
-          expect(round).toMatchObject({
-            label: computed.rounds[i]?.label,
-            heightMm: expect.closeTo(computed.rounds[i]?.heightMm as number, 9),
-            acrossMm: expect.closeTo(computed.rounds[i]?.acrossMm as number, 9),
-            fullness: expect.closeTo(computed.rounds[i]?.fullness as number, 9),
-            measuredMm: null,
-            questioned: false,
-          }),
-        );
-      }
-    },
-  );
+  it.each(READY_MOTIFS)('is the computed geometry of $key before anything is measured', (entry) => {
+    const motif = readyMotif(entry.key) as Motif;
+    for (const known of [gauge, gaugeOf(null, 4)]) {
+      const computed = motifGeometry(motif, known, null);
+      const measured = measuredMotif(motif, known, []);
+      expect(measured.acrossMm).toBeCloseTo(computed.acrossMm, 9);
+      expect(measured.sideMm).toBeCloseTo(computed.sideMm, 9);
+      expect(measured.trouble).toEqual(computed.trouble);
+      measured.rounds.forEach((round, i) =>
+        expect(round).toMatchObject({
+          label: computed.rounds[i]?.label,
+          heightMm: expect.closeTo(computed.rounds[i]?.heightMm as number, 9),
+          acrossMm: expect.closeTo(computed.rounds[i]?.acrossMm as number, 9),
+          fullness: expect.closeTo(computed.rounds[i]?.fullness as number, 9),
+          measuredMm: null,
+          questioned: false,
+        }),
+      );
+    }
+  });
 
   it('is then as sure as the gauge is, less what rounds and ring differ of themselves', () => {
     const heightsMm = groupSquare.rounds.map((round) => roundHeightMm(round, gauge));

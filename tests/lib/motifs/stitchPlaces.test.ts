@@ -23,7 +23,8 @@ describe.each(READY_MOTIFS.map(({ key, name }) => [name, key] as const))(
         expect(outerMm).toBeGreaterThan(innerMm);
         if (i > 0) expect(innerMm).toBeCloseTo(rounds[i - 1]?.outerMm ?? NaN, 9);
       });
-      expect(2 * (rounds.at(-1)?.outerMm ?? 0)).toBeCloseTo(ACROSS_MM, 9);
+      const apothems = motif.sides === 3 ? 3 : 2;
+      expect(apothems * (rounds.at(-1)?.outerMm ?? 0)).toBeCloseTo(ACROSS_MM, 9);
     });
 
     it('places every stitch that the pattern counts, once', () => {

@@ -8,9 +8,9 @@ import {
   withEvidence,
   withMotif,
   withoutColour,
-  withoutColourway,
   withRoundColour,
 } from '../../../src/lib/plan/edits';
+import { withoutColourway } from '../../../src/lib/plan/withoutMotif';
 import { planSchema } from '../../../src/schemas/plan';
 import { buildPlan, weighed } from '../../support/plans';
 

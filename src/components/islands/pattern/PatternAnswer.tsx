@@ -1,7 +1,7 @@
 import { LayoutGrid } from 'lucide-react';
 import type { ReactNode } from 'react';
 import type { MotifGeometry } from '../../../lib/motifs/geometry';
-import { joinStitches } from '../../../lib/ledger/blanketOf';
+import { joinStitches } from '../../../lib/ledger/pieces';
 import { motifOf } from '../../../lib/pattern/motifOf';
 import type { Reading } from '../../../lib/pattern/reading';
 import { showFabric, type Units } from '../../../lib/units/display';

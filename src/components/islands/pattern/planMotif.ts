@@ -1,4 +1,3 @@
-import { layoutFor } from '../../../lib/layout/layouts';
 import { EXAMPLE_PLAN } from '../../../lib/plan/examplePlan';
 import { withMotif } from '../../../lib/plan/edits';
 import { withMadeMotif, type MadeMotif } from '../../../lib/plan/madeMotif';
@@ -8,10 +7,10 @@ import { workedTo } from '../../motifs/motifWords';
 import { storedPlan, storePlan } from '../../planner/planStorage';
 
 /** Why a blanket cannot be planned of this motif, or null when it can. */
-export function noPlanBecause({ rounds, sides }: Reading): string | null {
+export function noPlanBecause({ rounds }: Reading): string | null {
   if (rounds.length === 0) return 'There are no rounds yet.';
   if (rounds[0]?.kind === 'row') return 'A piece worked in rows is no motif to join.';
-  return layoutFor(sides) === null ? 'There is no layout for motifs of this shape yet.' : null;
+  return null;
 }
 
 /** Which motif a reading is, for the plan that takes it. */

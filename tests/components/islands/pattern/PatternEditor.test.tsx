@@ -129,13 +129,6 @@ describe('PatternEditor', () => {
     expect(counted()).toBe('14 sc');
   });
 
-  it('plans no blanket of a shape that has no layout, and says so', () => {
-    render(<Editor sides={8} text={RIGHT} />);
-    const plan = screen.getByRole('button', { name: 'Plan a blanket' });
-    expect(plan.getAttribute('aria-disabled')).toBe('true');
-    expect(screen.getByText('There is no layout for motifs of this shape yet.')).toBeTruthy();
-  });
-
   it('prints a clean page in full words', () => {
     render(<Editor text={RIGHT} />);
     fireEvent.click(screen.getByRole('radio', { name: 'Full words' }));

@@ -1,6 +1,6 @@
 import { beforeEach, describe, expect, it } from 'vitest';
 import { MadeMotifRow } from '../../../../db/models';
-import { LIBRARY_MOTIFS } from '../../../../src/lib/motifs/readyMotifs';
+import { READY_MOTIFS } from '../../../../src/lib/motifs/readyMotifs';
 import { GET, POST } from '../../../../src/pages/api/motifs';
 import * as motif from '../../../../src/pages/api/motifs/[id]';
 import * as versions from '../../../../src/pages/api/motifs/[id]/versions';
@@ -40,15 +40,15 @@ describe('GET /api/motifs', () => {
   it('lists the ready-made ones to anyone', async () => {
     await buildMotif(user);
     const { status, json } = await callRoute(GET);
-    expect([status, json.total]).toEqual([200, LIBRARY_MOTIFS.length]);
+    expect([status, json.total]).toEqual([200, READY_MOTIFS.length]);
     expect(json.items[0]).toEqual({
-      key: LIBRARY_MOTIFS[0]?.key,
+      key: READY_MOTIFS[0]?.key,
       readyMade: true,
       version: null,
       updatedAt: null,
-      name: LIBRARY_MOTIFS[0]?.name,
-      sides: LIBRARY_MOTIFS[0]?.sides,
-      motif: LIBRARY_MOTIFS[0],
+      name: READY_MOTIFS[0]?.name,
+      sides: READY_MOTIFS[0]?.sides,
+      motif: READY_MOTIFS[0],
       problems: { errors: 0, warnings: 0 },
     });
   });
@@ -57,12 +57,12 @@ describe('GET /api/motifs', () => {
     await buildMotif(await buildUser());
     const { pattern: _text, ...own } = await buildMotif(user);
     const { json } = await callRoute(GET, { user });
-    expect([json.total, json.items.at(-1)]).toEqual([LIBRARY_MOTIFS.length + 1, own]);
+    expect([json.total, json.items.at(-1)]).toEqual([READY_MOTIFS.length + 1, own]);
   });
 
   it('answers in pages', async () => {
     await buildMotif(user);
-    const url = `/api/motifs?limit=2&offset=${LIBRARY_MOTIFS.length - 1}`;
+    const url = `/api/motifs?limit=2&offset=${READY_MOTIFS.length - 1}`;
     const { json } = await callRoute(GET, { user, url });
     expect(json.items.map(({ readyMade }: { readyMade: boolean }) => readyMade)).toEqual([
       true,
@@ -90,7 +90,7 @@ describe('POST /api/motifs', () => {
       { change: { key: 'group-square' }, fields: { '': 'Motif has no field named key' } },
       { change: { rounds: [] }, fields: { '': 'Motif has no field named rounds' } },
     ]);
-    expect((await callRoute(GET, { user })).json.total).toBe(LIBRARY_MOTIFS.length);
+    expect((await callRoute(GET, { user })).json.total).toBe(READY_MOTIFS.length);
   });
 
   it('keeps the text and works its rounds', async () => {

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { fixed, polygonPoints } from '../../../src/components/blanket/polygonPoints';
+import { fixed, polygonPoints } from '../../../src/lib/motifs/polygonPoints';
 
 describe('fixed', () => {
   it('writes two decimals and never a negative zero', () => {
