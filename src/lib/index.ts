@@ -36,6 +36,7 @@ export type { FitResult } from './joins/fit';
 export { fitInWords, fitOf } from './joins/fit';
 export type { Join } from './joins/join';
 export { READY_JOINS, readyJoin } from './joins/readyJoins';
+export { joiningOrder } from './joining/joiningOrder';
 export { compareJoins, type JoinComparison } from './joins/compareJoins';
 // Plan, estimate and shopping
 export * from './plan/plan';
