@@ -1,11 +1,12 @@
 import { READY_JOINS } from '../../lib/joins/readyJoins';
 import { joinFit } from '../../lib/joins/fit';
-import type { Motif } from '../../lib/motifs/motif';
+import type { MotifChoice } from '../../lib/motifs/motifChoices';
 import type { Estimate } from '../../lib/ledger/ledger';
 import { withBorder } from '../../lib/plan/edits';
-import type { Plan } from '../../lib/plan/plan';
+import { mainMotif, type Plan } from '../../lib/plan/plan';
 import type { Units } from '../../lib/units/display';
 import { Select } from '../ui/Select';
+import { LayoutFields } from './LayoutFields';
 import { Section } from './Section';
 import { SizeFields } from './SizeFields';
 import { codeWord, type Terms } from './stitchWord';
@@ -17,18 +18,21 @@ interface BlanketSectionProps {
   units: Units;
   terms: Terms;
   change: ChangePlan;
+  choices: readonly MotifChoice[];
 }
 
 const BORDER_STITCHES = ['sc', 'hdc', 'dc'] as const;
 const MOST_BORDER_ROUNDS = 12;
 
 /** How many motifs, how they are joined, and what goes round them. */
-export function BlanketSection({ plan, estimate, units, terms, change }: BlanketSectionProps) {
+export function BlanketSection(props: BlanketSectionProps) {
+  const { plan, estimate, units, terms, change, choices } = props;
   const stitch = plan.border[0]?.stitch ?? 'sc';
   const rounds = Math.max(plan.border.length, MOST_BORDER_ROUNDS);
   return (
     <Section title="Blanket">
       <SizeFields {...{ plan, estimate, units, change }} />
+      <LayoutFields {...{ plan, change, choices }} />
       <div className="col-span-6">
         <Select
           label="Join"
@@ -38,7 +42,7 @@ export function BlanketSection({ plan, estimate, units, terms, change }: Blanket
           }
           options={READY_JOINS.map((join) => ({
             value: join.key,
-            word: joinFit(join, plan.motifs[0] as Motif, estimate.sideStitches).fits
+            word: joinFit(join, mainMotif(plan), estimate.sideStitches).fits
               ? join.name
               : `${join.name} · does not fit`,
           }))}

@@ -1,8 +1,9 @@
 import { Palette } from 'lucide-react';
 import { lazy } from 'react';
 import type { Estimate } from '../../lib/ledger/ledger';
+import type { MotifSides } from '../../lib/motifs/motif';
 import type { MotifChoice } from '../../lib/motifs/motifChoices';
-import type { Plan } from '../../lib/plan/plan';
+import { mainMotif, type Plan } from '../../lib/plan/plan';
 import { showFabric, type Units } from '../../lib/units/display';
 import { PLAN_LIMITS } from '../../schemas/limits';
 import { Button } from '../ui/Button';
@@ -17,6 +18,14 @@ import type { ChangePlan } from './usePlan';
 import { useMotifChoice } from './useMotifChoice';
 
 const NewerVersion = lazy(() => import('./NewerVersion'));
+
+const ACROSS_WORDS: Readonly<Record<MotifSides, string>> = {
+  0: 'Across, measured',
+  3: 'Height, measured',
+  4: 'Side, measured',
+  6: 'Flat to flat, measured',
+  8: 'Flat to flat, measured',
+};
 
 interface MotifSectionProps {
   plan: Plan;
@@ -33,18 +42,12 @@ export function MotifSection(props: MotifSectionProps) {
   const { plan, estimate, units, terms, change, choices, onColours } = props;
   const { choose, failed } = useMotifChoice(change);
   const isHere = useIsHere();
-  const motif = plan.motifs[0];
-  if (!motif) return null;
+  const motif = mainMotif(plan);
+  const motifIndex = plan.motifs.indexOf(motif);
   const choice = choices.find(({ key }) => key === motif.key);
   const rounds = choice?.rounds ?? motif.rounds.length;
   const isBehind = motif.version !== null && motif.version !== (choice?.version ?? null);
-  const computedMm = estimate.motifs[0]?.acrossMm ?? 0;
-  const across =
-    motif.sides === 0
-      ? 'Across, measured'
-      : motif.sides === 6
-        ? 'Flat to flat, measured'
-        : 'Side, measured';
+  const computedMm = estimate.motifs[motifIndex]?.acrossMm ?? 0;
   return (
     <Section title="Motif">
       <div className="col-span-6">
@@ -88,7 +91,7 @@ export function MotifSection(props: MotifSectionProps) {
       </div>
       <div className="col-span-3">
         <FabricField
-          label={across}
+          label={ACROSS_WORDS[motif.sides]}
           units={units}
           optional
           maxMm={PLAN_LIMITS.motifSideMm}

@@ -87,7 +87,7 @@ export function Planner(props: PlannerProps) {
             choices={motifChoices}
             onColours={() => setSheet('colours')}
           />
-          <BlanketSection {...shared} terms={terms} />
+          <BlanketSection {...shared} terms={terms} choices={motifChoices} />
         </form>
         <div className="grid content-start gap-8 px-4 pt-6 pb-10 lg:px-9" data-answer>
           {impossible && (

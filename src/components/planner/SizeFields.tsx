@@ -1,3 +1,4 @@
+import { layoutFacts, type LayoutFacts } from '../../lib/layout/layouts';
 import type { Estimate } from '../../lib/ledger/ledger';
 import type { Plan, PlanSize } from '../../lib/plan/plan';
 import type { Units } from '../../lib/units/display';
@@ -48,7 +49,7 @@ export function SizeFields({ plan, estimate, units, change }: SizeFieldsProps) {
         ]}
       />
       {size.by === 'grid' ? (
-        <GridFields {...{ size, change }} />
+        <GridFields {...{ size, change }} unit={layoutFacts(estimate.layout).unit} />
       ) : (
         <TargetFields {...{ size, units, change, estimate }} />
       )}
@@ -56,7 +57,15 @@ export function SizeFields({ plan, estimate, units, change }: SizeFieldsProps) {
   );
 }
 
-function GridFields({ size, change }: { size: PlanSize & { by: 'grid' }; change: ChangePlan }) {
+function GridFields({
+  size,
+  unit,
+  change,
+}: {
+  size: PlanSize & { by: 'grid' };
+  unit: LayoutFacts['unit'];
+  change: ChangePlan;
+}) {
   const field = (label: string, key: 'columns' | 'rows', max: number) => (
     <div className="col-span-3">
       <NumberField
@@ -78,7 +87,11 @@ function GridFields({ size, change }: { size: PlanSize & { by: 'grid' }; change:
   );
   return (
     <>
-      {field('Motifs across', 'columns', PLAN_LIMITS.gridColumns)}
+      {field(
+        unit === 'blocks' ? 'Blocks across' : 'Motifs across',
+        'columns',
+        PLAN_LIMITS.gridColumns,
+      )}
       {field('down', 'rows', PLAN_LIMITS.gridRows)}
     </>
   );
@@ -130,7 +143,7 @@ function TargetFields({
         />
       </div>
       <p className="col-span-6 -mt-1 text-sm text-ink-2" role="status">
-        {estimate.columns} × {estimate.rows} motifs
+        {estimate.columns} × {estimate.rows} {layoutFacts(estimate.layout).unit}
       </p>
     </>
   );

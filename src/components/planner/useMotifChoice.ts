@@ -11,13 +11,13 @@ interface ChoosingMotif {
 }
 
 /** Motifs and what reads them are fetched when one is chosen: the ready-made from the library, one's own from the account. */
-export function useMotifChoice(change: ChangePlan): ChoosingMotif {
+export function useMotifChoice(change: ChangePlan, put = withMotif): ChoosingMotif {
   const [failed, setFailed] = useState(false);
   async function fetchAndUse(choice: MotifChoice, rounds: number) {
     try {
       const motif = await fetchMotif(choice);
       if (motif) {
-        change((old) => withMotif(old, { ...motif, rounds: motif.rounds.slice(0, rounds) }));
+        change((old) => put(old, { ...motif, rounds: motif.rounds.slice(0, rounds) }));
       }
       setFailed(!motif);
     } catch {

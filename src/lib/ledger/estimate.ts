@@ -1,16 +1,16 @@
-import { handVarianceM2, learnHand, type Hand } from '../hand/hand';
+import { handVarianceM2, type Hand } from '../hand/hand';
 import { addUse, NO_YARN } from '../hand/yarnUse';
 import { fitOf } from '../joins/fit';
 import type { Plan } from '../plan/plan';
 import { probabilityShort, quantileM, SKEIN_SPREAD, skeinsFor } from '../skeins/skeins';
 import { normalQuantile } from '../stats/normal';
 import { blanketOf, type Blanket } from './blanketOf';
-import { colourLedger, useOfGroup, type ColourLedger } from './colourLedger';
-import { evidenceOf, swatchUse } from './evidenceOf';
+import { colourLedger, type ColourLedger } from './colourLedger';
+import { handOf } from './handOf';
 import { PARTS, type ColourEstimate, type Estimate, type LedgerLine } from './ledger';
 import { nextMeasurements } from './nextMeasurements';
 import { noticesOf } from './notices';
-import { piecesOf, type PieceGroup } from './pieces';
+import { piecesOf } from './pieces';
 import { uncertaintyOf } from './uncertainty';
 import { workingTimeS } from './workingTime';
 
@@ -56,15 +56,6 @@ export function estimate(plan: Plan): Estimate {
     notices: noticesOf(blanket),
     totals: totalsOf(plan, blanket, hand, ledgers, colours, lines),
   };
-}
-
-/** The hand learnt from the plan's evidence, for every stitch of the blanket, the evidence and the swatch. */
-function handOf({ plan, gauge }: Blanket, groups: readonly PieceGroup[]): Hand {
-  const evidence = evidenceOf(plan, gauge.stitchWidthMm);
-  const swatch = swatchUse(plan) ?? NO_YARN;
-  const uses = [...groups.map(useOfGroup), ...evidence.map(({ use }) => use), swatch];
-  const stitches = [...new Set(uses.flatMap(({ loops }) => [...loops.keys()]))].sort();
-  return learnHand(gauge.stitchWidthMm, stitches, evidence);
 }
 
 const varianceM2 = (ledger: ColourLedger): number =>

@@ -58,8 +58,8 @@ const SLOT_WORDS: Readonly<Record<Slot, string>> = {
 };
 
 /** Motifs of a colourway, halves and quarters counted as such. */
-const wholeMotifs = (places: SlotCounts): number =>
-  SLOTS.reduce((sum, slot) => sum + places[slot] * SLOT_FACTS[slot].share, 0);
+export const wholeMotifs = (places: SlotCounts | undefined): number =>
+  SLOTS.reduce((sum, slot) => sum + (places?.[slot] ?? 0) * SLOT_FACTS[slot].share, 0);
 
 /** Every piece of the blanket, by colour; its cost grows with the colourways, not with the area. */
 export function piecesOf(context: PieceContext): PieceGroup[] {
@@ -170,7 +170,7 @@ function lastRoundLinks({ plan, join, places }: PieceContext, links: StitchCount
   const all = places.reduce((sum, each) => sum + wholeMotifs(each), 0);
   return plan.colourways.map(({ roundColours }, i) => ({
     colour: roundColours.at(-1) as string,
-    count: wholeMotifs(places[i] as SlotCounts),
+    count: wholeMotifs(places[i]),
     lines: [worked('join', join.name, scaleCounts(links, 1 / all))],
   }));
 }

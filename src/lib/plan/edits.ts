@@ -65,10 +65,13 @@ export function withRoundColour(
   };
 }
 
-/** The plan with a further colourway, like its last. */
+/** The plan with a further colourway of the main motif, like the last of them. */
 export const withColourway = (plan: Plan): Plan => ({
   ...plan,
-  colourways: [...plan.colourways, plan.colourways.at(-1) as Colourway],
+  colourways: [
+    ...plan.colourways,
+    plan.colourways.findLast(({ motifIndex }) => motifIndex !== plan.secondMotif) as Colourway,
+  ],
 });
 
 /** The plan with a further colour, under a key that no other has. */

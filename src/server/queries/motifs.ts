@@ -57,8 +57,8 @@ export async function getMotif(
 export async function planMotifChoices(user: CurrentUser | null): Promise<MotifChoice[]> {
   const own = user ? await ownMotifs(user) : [];
   return [
-    ...own.flatMap(({ key, name, version, motif }) =>
-      motif ? [{ key, name, rounds: motif.rounds.length, version }] : [],
+    ...own.flatMap(({ key, name, sides, version, motif }) =>
+      motif ? [{ key, name, sides, rounds: motif.rounds.length, version }] : [],
     ),
     ...motifChoices(),
   ];

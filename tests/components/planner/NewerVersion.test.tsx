@@ -7,7 +7,7 @@ import { presentReadyMotif } from '../../../src/server/presenters/motif';
 const KEY = '3f1d9d6e-58b2-4f0e-9a3c-6d2b8f0a7c41';
 const old: Motif = { ...(readyMotif('solid-square', 4) as Motif), key: KEY, version: 1 };
 const plan: Plan = { ...EXAMPLE_PLAN, motifs: [old] };
-const choice = { key: KEY, name: 'Lock gate', rounds: 8, version: 2 };
+const choice = { key: KEY, sides: 4 as const, name: 'Lock gate', rounds: 8, version: 2 };
 const newer = {
   ...presentReadyMotif('group-square'),
   key: KEY,

@@ -8,6 +8,7 @@ describe('motifChoices', () => {
     expect(choices[0]).toEqual({
       key: 'group-square',
       name: 'Classic group square',
+      sides: 4,
       rounds: 8,
       version: null,
     });

@@ -1,0 +1,108 @@
+import { SLOT_FACTS } from '../layout/face';
+import type { BlanketMotif, LaidBlanket } from '../plan/blanketFaces';
+import type { Colourway, Plan } from '../plan/plan';
+import type { PaintedRun, Placement } from './placement';
+
+/** The plan with these motifs in one colourway; they keep it whatever the rule. */
+export function withPainted(plan: Plan, motifs: readonly BlanketMotif[], colourway: number): Plan {
+  const places = placesOf(plan);
+  for (const { face } of motifs) {
+    const second = SLOT_FACTS[face.slot].second;
+    places.set(key(second, face.row, face.column), colourway);
+  }
+  return withPlaces(plan, places);
+}
+
+/**
+ * The plan with one round of these motifs in another colour: in a colourway that has it so, or in
+ * a new one. `roundNumber` counts from 0; motifs without such a round stay as they are.
+ */
+export function withPaintedRound(
+  plan: Plan,
+  motifs: readonly BlanketMotif[],
+  roundNumber: number,
+  colour: string,
+): Plan {
+  let painted = plan;
+  for (const motif of motifs) {
+    const old = painted.colourways[motif.colourway];
+    if (!old || roundNumber >= old.roundColours.length) continue;
+    const wanted: Colourway = {
+      ...old,
+      roundColours: old.roundColours.map((each, i) => (i === roundNumber ? colour : each)),
+    };
+    const known = painted.colourways.findIndex((each) => isSame(each, wanted));
+    if (known < 0) painted = { ...painted, colourways: [...painted.colourways, wanted] };
+    const colourway = known < 0 ? painted.colourways.length - 1 : known;
+    painted = withPainted(painted, [motif], colourway);
+  }
+  return painted;
+}
+
+const isSame = (left: Colourway, right: Colourway): boolean =>
+  left.motifIndex === right.motifIndex && left.roundColours.join() === right.roundColours.join();
+
+/** The plan with every motif locked as it lies. */
+export function withAllLocked(plan: Plan, { motifs }: LaidBlanket): Plan {
+  const places = new Map<number, number>();
+  for (const { face, colourway } of motifs) {
+    places.set(key(SLOT_FACTS[face.slot].second, face.row, face.column), colourway);
+  }
+  return withPlaces(plan, places);
+}
+
+/** The plan with nothing painted or locked: the rule has its way everywhere. */
+export const withoutPaint = (plan: Plan): Plan => ({
+  ...plan,
+  placement: { ...plan.placement, painted: [] },
+});
+
+/** The motif at `start` and all of its colourway that hang together with it by their sides. */
+export function sameAround({ motifs, map }: LaidBlanket, start: number): BlanketMotif[] {
+  const neighbours = new Map<number, number[]>();
+  for (const { motifs: pair } of map().sides) {
+    const [one, other] = pair;
+    if (one === undefined || other === undefined) continue;
+    neighbours.set(one, [...(neighbours.get(one) ?? []), other]);
+    neighbours.set(other, [...(neighbours.get(other) ?? []), one]);
+  }
+  const colourway = motifs[start]?.colourway;
+  const found = new Set([start]);
+  for (const motif of found) {
+    for (const near of neighbours.get(motif) ?? []) {
+      if (motifs[near]?.colourway === colourway) found.add(near);
+    }
+  }
+  return [...found].flatMap((motif) => motifs[motif] ?? []);
+}
+
+const ROWS = 2_000;
+const COLUMNS = 2_000;
+const key = (second: boolean, row: number, column: number): number =>
+  ((second ? ROWS : 0) + row) * COLUMNS + column;
+
+function placesOf({ placement, colourways, secondMotif }: Plan): Map<number, number> {
+  const places = new Map<number, number>();
+  for (const [row, column, length, colourway] of placement.painted) {
+    const second = secondMotif !== null && colourways[colourway]?.motifIndex === secondMotif;
+    for (let i = 0; i < length; i += 1) places.set(key(second, row, column + i), colourway);
+  }
+  return places;
+}
+
+function withPlaces(plan: Plan, places: ReadonlyMap<number, number>): Plan {
+  const painted: PaintedRun[] = [];
+  let end = -1;
+  for (const place of [...places.keys()].sort((left, right) => left - right)) {
+    const colourway = places.get(place) as number;
+    const last = painted.at(-1);
+    if (last && place === end && last[3] === colourway) {
+      painted[painted.length - 1] = [last[0], last[1], last[2] + 1, colourway];
+    } else {
+      painted.push([Math.floor(place / COLUMNS) % ROWS, place % COLUMNS, 1, colourway]);
+    }
+    end = place + 1;
+  }
+  const placement: Placement = { ...plan.placement, painted };
+  return { ...plan, placement };
+}
