@@ -47,12 +47,13 @@ export function stampsOf(
       const corners = motif.sides === 0 ? 4 : motif.sides;
       const reachMm = cellMm / Math.cos(Math.PI / corners);
       const canvas = document.createElement('canvas');
-      canvas.width = canvas.height = Math.max(2, Math.ceil(2 * reachMm * pxPerMm));
+      canvas.width = canvas.height = Math.ceil(2 * reachMm * pxPerMm) + 2;
       const context = canvas.getContext('2d') as CanvasRenderingContext2D;
       context.setTransform(pxPerMm, 0, 0, pxPerMm, canvas.width / 2, canvas.height / 2);
       const open = readyJoin(plan.join.key)?.openness !== 'closed';
       context.fillStyle = open ? shadeOf(joinHex) : joinHex;
-      context.fill(new Path2D(`M${polygonPoints(corners, cellMm)}Z`));
+      // A little over its cell, so that no line of ground shows between neighbours.
+      context.fill(new Path2D(`M${polygonPoints(corners, cellMm + 0.6 / pxPerMm)}Z`));
       const gauge = gaugeOf(plan.swatch, plan.yarn.weightCategory);
       const rounds = motifStrokes(motif, gauge, acrossMm);
       context.lineCap = 'round';

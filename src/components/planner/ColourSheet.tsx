@@ -33,7 +33,7 @@ export function ColourSheet({ open, onOpenChange, plan, change }: ColourSheetPro
       open={open}
       onOpenChange={onOpenChange}
       title="Colours"
-      description="Colourways take turns along the diagonals of the blanket."
+      description="The yarns, and the colour of every round. Paint it says which colourway lies where."
     >
       <Colours {...{ plan, change }} />
       <Colourways {...{ plan, change }} />

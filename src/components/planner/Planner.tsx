@@ -29,6 +29,7 @@ import { YarnSection } from './YarnSection';
 const LedgerSheet = lazy(() => import('./LedgerSheet'));
 const CompareSheet = lazy(() => import('./CompareSheet'));
 const ShoppingSheet = lazy(() => import('./ShoppingSheet'));
+const PaintSheet = lazy(() => import('./paint/PaintSheet'));
 
 export interface PlannerPreferences {
   units: Units;
@@ -48,7 +49,7 @@ interface PlannerProps {
   shoppingHref?: string;
 }
 
-type OpenSheet = 'none' | 'colours' | 'ledger' | 'compare' | 'shopping';
+type OpenSheet = 'none' | 'colours' | 'paint' | 'ledger' | 'compare' | 'shopping';
 
 /** The estimator: inputs left, the answer and the picture right; everything recomputed at each change. */
 export function Planner(props: PlannerProps) {
@@ -103,6 +104,7 @@ export function Planner(props: PlannerProps) {
               <FinishedSize {...shared} />
               <div className="flex flex-wrap gap-3" data-chrome>
                 <ShoppingButton href={shoppingHref} onOpen={() => setSheet('shopping')} />
+                <Button onClick={() => setSheet('paint')}>Paint it</Button>
                 <Button onClick={() => setSheet('compare')}>Compare joins</Button>
                 <Button onClick={() => openLedger('all')}>Open the ledger</Button>
               </div>
@@ -133,6 +135,7 @@ export function Planner(props: PlannerProps) {
             onClose={close}
           />
         )}
+        {sheet === 'paint' && <PaintSheet {...shared} editing={editing} onClose={close} />}
         {sheet === 'compare' && <CompareSheet {...shared} onClose={close} />}
         {sheet === 'shopping' && <ShoppingSheet {...shared} onClose={close} />}
       </LoadedLater>

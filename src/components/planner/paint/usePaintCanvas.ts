@@ -1,0 +1,83 @@
+import { useCallback, useEffect, useMemo, useRef } from 'react';
+import { layStamps, stampsOf, type Stamp } from '../../blanket/paintBlanket';
+import { hexOf } from '../../blanket/hexOf';
+import type { Estimate } from '../../../lib/ledger/ledger';
+import { borderBands, outerOutlines } from '../../../lib/plan/borderBands';
+import { blanketFaces } from '../../../lib/plan/blanketFaces';
+import type { Plan } from '../../../lib/plan/plan';
+
+/** Most pixels a canvas is given: phones refuse more. */
+const MOST_PIXELS = 12_000_000;
+
+interface PaintCanvas {
+  readonly ref: React.RefObject<HTMLCanvasElement | null>;
+  /** Shows these motifs as `plan` has them, at once and without a render. */
+  readonly show: (plan: Plan, motifs: readonly number[]) => void;
+}
+
+/** A canvas with the blanket on it, `widthPx` wide: painted anew when the plan changes, and motif by motif in between. */
+export function usePaintCanvas(plan: Plan, estimate: Estimate, widthPx: number): PaintCanvas {
+  const ref = useRef<HTMLCanvasElement>(null);
+  const known = useRef<ReadonlyMap<string, Stamp>>(new Map());
+  const { widthMm, heightMm } = estimate.size;
+  const scale = useMemo(() => {
+    const density = typeof window === 'undefined' ? 1 : window.devicePixelRatio;
+    const wanted = (widthPx * density) / widthMm;
+    return Math.min(wanted, Math.sqrt(MOST_PIXELS / (widthMm * heightMm)));
+  }, [widthPx, widthMm, heightMm]);
+
+  const stamped = useCallback(
+    (shown: Plan): Stamp[] => {
+      const made = stampsOf(shown, estimate, scale, known.current);
+      known.current = new Map([...known.current, ...made.known]);
+      return made.stamps;
+    },
+    [estimate, scale],
+  );
+
+  useEffect(() => {
+    const canvas = ref.current;
+    const context = canvas?.getContext('2d');
+    if (!canvas || !context) return;
+    canvas.width = Math.ceil(widthMm * scale);
+    canvas.height = Math.ceil(heightMm * scale);
+    const { motifs } = blanketFaces(plan, estimate);
+    drawBorder(context, plan, estimate, scale);
+    layStamps(context, motifs, stamped(plan), scale);
+  }, [plan, estimate, scale, stamped, widthMm, heightMm]);
+
+  const show = useCallback(
+    (shown: Plan, motifs: readonly number[]) => {
+      const context = ref.current?.getContext('2d');
+      if (!context) return;
+      const all = blanketFaces(shown, estimate).motifs;
+      layStamps(
+        context,
+        motifs.flatMap((i) => all[i] ?? []),
+        stamped(shown),
+        scale,
+      );
+    },
+    [estimate, scale, stamped],
+  );
+  return { ref, show };
+}
+
+function drawBorder(
+  context: CanvasRenderingContext2D,
+  plan: Plan,
+  estimate: Estimate,
+  scale: number,
+): void {
+  const path = new Path2D(outerOutlines(blanketFaces(plan, estimate).motifs));
+  context.save();
+  context.scale(scale, scale);
+  context.lineJoin = 'miter';
+  for (const { reachMm, colour } of borderBands(plan, estimate)) {
+    context.fillStyle = context.strokeStyle = hexOf(plan, colour);
+    context.lineWidth = Math.max(0.01, 2 * reachMm);
+    context.stroke(path);
+    context.fill(path);
+  }
+  context.restore();
+}
