@@ -37,7 +37,9 @@ export { fitInWords, fitOf } from './joins/fit';
 export type { Join } from './joins/join';
 export { READY_JOINS, readyJoin } from './joins/readyJoins';
 export { joiningOrder } from './joining/joiningOrder';
-export { compareJoins, type JoinComparison } from './joins/compareJoins';
+export { compareJoins, compareTensions, type JoinComparison } from './joins/compareJoins';
+export { whyCheapest, type Why } from './joins/whyCheapest';
+export { whyInWords } from './joins/whyInWords';
 // Plan, estimate and shopping
 export * from './plan/plan';
 export { EXAMPLE_PLAN } from './plan/examplePlan';

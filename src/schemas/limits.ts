@@ -34,6 +34,14 @@ export const PLAN_LIMITS = {
   secondsPerMove: 60,
 } as const;
 
+/** The limits of joins compared at once. */
+export const COMPARE_LIMITS = {
+  joins: 40,
+  swatches: 12,
+  /** Joins × swatches × colourways: what the time of a comparison grows with. */
+  tried: 6_000,
+} as const;
+
 /** What no yarn and no stitch ever was: beyond these a number has been mistyped (ours). */
 export const POSSIBLE = {
   leastSkeinMassG: 0.1,
@@ -63,6 +71,9 @@ export const KEPT_LIMITS = {
   madeMotifs: 2_000,
   blankets: 1_000,
   revisionsPerBlanket: 200,
+  ticksAtOnce: 2_000,
+  ticksPerBlanket: 40_000,
+  weighingsPerBlanket: 200,
   shoppingLists: 1_000,
   lotCodeLength: 40,
   locationLength: 80,

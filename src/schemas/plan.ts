@@ -51,7 +51,8 @@ const yarn = strict('Yarn', {
   }).nullable(),
 });
 
-const swatch = strict('Swatch', {
+/** A flat piece worked to find the gauge. */
+export const planSwatchSchema = strict('Swatch', {
   stitch: knownStitch,
   stitches: swatchStitches,
   rows: swatchRows,
@@ -124,7 +125,7 @@ export const planSchema = strict('Plan', {
     1,
     PLAN_LIMITS.colours,
   ),
-  swatch: swatch.nullable(),
+  swatch: planSwatchSchema.nullable(),
   evidence: list('Weighed pieces', evidence, 0, PLAN_LIMITS.evidence),
   motifs: list('Motifs', motifSchema, 1, PLAN_LIMITS.motifs),
   colourways: list(

@@ -1,4 +1,5 @@
 import { benchCalibration } from './calibration.ts';
+import { benchCompareTime } from './compareTime.ts';
 import { benchEstimateTime } from './estimateTime.ts';
 import { benchPatternTime } from './patternTime.ts';
 import { benchPages } from './pages.ts';
@@ -9,6 +10,7 @@ import { benchTyping } from './typing.ts';
 /** `npm run bench`, or `npm run bench -- time pages` for some parts; BASE_URL is the built site. */
 const parts = {
   time: benchEstimateTime,
+  compare: benchCompareTime,
   pattern: benchPatternTime,
   typing: withSite(benchTyping),
   calibration: benchCalibration,
