@@ -7,6 +7,7 @@ import {
   type NonAttribute,
   type Sequelize,
 } from 'sequelize';
+import type { MakingOrder } from '../../src/lib/joining/makingOrder';
 import type { PlanInput } from '../../src/schemas/plan';
 import {
   countedColumn,
@@ -25,6 +26,9 @@ export class Blanket extends Model<InferAttributes<Blanket>, InferCreationAttrib
   declare plan: PlanInput;
   /** Which edition of the plan's schema wrote `plan`. */
   declare schemaVersion: number;
+  /** In which order its motifs are made, and when that was last said. */
+  declare makingOrder: CreationOptional<MakingOrder>;
+  declare makingOrderAt: CreationOptional<Date | null>;
   declare version: CreationOptional<number>;
   declare createdAt: CreationOptional<Date>;
   declare updatedAt: CreationOptional<Date>;
@@ -41,6 +45,8 @@ export function init(sequelize: Sequelize): void {
       title: textColumn(),
       plan: jsonColumn(),
       schemaVersion: countedColumn(),
+      makingOrder: { ...textColumn(), defaultValue: 'row-by-row' },
+      makingOrderAt: DataTypes.DATE,
       deletedAt: DataTypes.DATE,
       ...editedColumns(),
     },

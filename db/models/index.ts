@@ -7,6 +7,8 @@ import { Colourway, init as initColourway } from './Colourway';
 import { DyeLot, init as initDyeLot } from './DyeLot';
 import { EmailToken, init as initEmailToken } from './EmailToken';
 import { MadeMotifRow, init as initMadeMotifRow } from './MadeMotifRow';
+import { MakingTick, init as initMakingTick } from './MakingTick';
+import { MakingWeighing, init as initMakingWeighing } from './MakingWeighing';
 import { MotifRow, init as initMotifRow } from './MotifRow';
 import { MotifVersion, init as initMotifVersion } from './MotifVersion';
 import { OwnStitchRow, init as initOwnStitchRow } from './OwnStitchRow';
@@ -27,6 +29,8 @@ for (const init of [
   initDyeLot,
   initEmailToken,
   initMadeMotifRow,
+  initMakingTick,
+  initMakingWeighing,
   initMotifRow,
   initMotifVersion,
   initOwnStitchRow,
@@ -64,6 +68,8 @@ export {
   DyeLot,
   EmailToken,
   MadeMotifRow,
+  MakingTick,
+  MakingWeighing,
   MotifRow,
   MotifVersion,
   OwnStitchRow,

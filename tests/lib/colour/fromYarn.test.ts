@@ -14,7 +14,7 @@ const uses: fc.Arbitrary<Record<string, number>[]> = fc.array(
 describe('motifsFromYarn', () => {
   it('makes them by turns until a colour would not last', () => {
     // by hand: a for 10 motifs of 5 m; the first colourway stops there, the second goes on
-    const perMotifM = [{ a: 5, b: 1 }, { b: 1 }];
+    const perMotifM: Record<string, number>[] = [{ a: 5, b: 1 }, { b: 1 }];
     expect(
       motifsFromYarn({ perMotifM, besidesM: { a: 0 }, inHandM: { a: 52 }, motifs: 30 }),
     ).toEqual({ counts: [10, 20], missing: 0, short: ['a'] });

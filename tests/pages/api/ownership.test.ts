@@ -5,6 +5,7 @@ import { sequelize } from '../../../db/models';
 import * as blankets from '../../../src/pages/api/blankets';
 import * as blanket from '../../../src/pages/api/blankets/[id]';
 import * as colourLink from '../../../src/pages/api/blankets/[id]/colour-links/[colour]';
+import * as making from '../../../src/pages/api/blankets/[id]/making';
 import * as restore from '../../../src/pages/api/blankets/[id]/restore';
 import * as revisions from '../../../src/pages/api/blankets/[id]/revisions';
 import * as revision from '../../../src/pages/api/blankets/[id]/revisions/[version]';
@@ -71,6 +72,7 @@ const ONE: [string, object, Build][] = [
   ['motifs/[id]/versions/[version]/restore', restoreMotif, buildMotif],
   ['stitches/[id]', stitch, buildOwnStitch],
   ['blankets/[id]', blanket, buildBlanket],
+  ['blankets/[id]/making', making, buildBlanket],
   ['blankets/[id]/restore', restore, buildBlanket],
   ['blankets/[id]/revisions', revisions, buildBlanket],
   ['blankets/[id]/revisions/[version]', revision, buildBlanket],
