@@ -1,182 +1,158 @@
-import type { ColumnDef } from '@tanstack/react-table';
-import { Check } from 'lucide-react';
-import { useMemo } from 'react';
+import { Printer } from 'lucide-react';
+import { lazy, useMemo, useState } from 'react';
 import { download } from '../../client/download';
-import { compareJoins, type JoinComparison } from '../../lib/joins/compareJoins';
+import { compareTensions, type JoinComparison } from '../../lib/joins/compareJoins';
 import { READY_JOINS } from '../../lib/joins/readyJoins';
-import { toCsv } from '../../lib/csv/toCsv';
+import { whyCheapest } from '../../lib/joins/whyCheapest';
+import { whyInWords } from '../../lib/joins/whyInWords';
+import type { Terms } from '../../lib/pattern/reading';
 import type { Plan } from '../../lib/plan/plan';
-import {
-  showDuration,
-  showFabric,
-  showPrice,
-  showSize,
-  YARN_UNIT,
-  yarnFigure,
-  type Units,
-} from '../../lib/units/display';
+import type { GaugeSwatch } from '../../lib/swatches/swatchRecord';
+import type { Units } from '../../lib/units/display';
 import { Button } from '../ui/Button';
 import { DataTable } from '../ui/DataTable';
-import { JoinsChart } from './JoinsChart';
+import { LoadedLater } from '../ui/LoadedLater';
+import { printSheet } from '../ui/printSheet';
+import { Select } from '../ui/Select';
+import { Skeleton } from '../ui/Skeleton';
+import { joinColumns } from './joinColumns';
+import { JoinChoice } from './JoinChoice';
+import { JoinPictures } from './JoinPictures';
+import { joinsCsv } from './joinsCsv';
+import { OWN_TENSION, type Tension } from './tension';
+import { TensionChoice } from './TensionChoice';
+import { TensionsTable } from './TensionsTable';
+
+const JoinsChart = lazy(() => import('./JoinsChart'));
 
 interface CompareJoinsProps {
   plan: Plan;
   units: Units;
+  terms: Terms;
+  /** Swatches kept in the account, to compare hands by. */
+  kept?: readonly GaugeSwatch[];
   /** Takes a join over into the plan. */
   onUse?: (key: string) => void;
 }
 
-/** Every ready join on this blanket: table, and the same as a chart. */
-export default function CompareJoins({ plan, units, onUse }: CompareJoinsProps) {
-  const rows = useMemo(() => compareJoins(plan, READY_JOINS), [plan]);
-  return (
-    <div className="grid grid-cols-[minmax(0,1fr)] gap-6 pb-4">
-      <JoinsChart {...{ rows, plan, units }} />
-      <DataTable
-        caption="Joins on this blanket"
-        captionHidden
-        rows={rows}
-        columns={columnsFor(plan, units, onUse)}
-        rowId={({ join }) => join.key}
-        initialSorting={[{ id: 'join yarn', desc: false }]}
-        empty={<p>No join is known.</p>}
-        onExportCsv={(sorted) => download('joins.csv', 'text/csv', joinsCsv(sorted))}
-      />
-    </div>
-  );
-}
+const NONE: never[] = [];
 
-function columnsFor(
-  plan: Plan,
-  units: Units,
-  onUse?: (key: string) => void,
-): ColumnDef<JoinComparison>[] {
-  const yarnUnit = YARN_UNIT[units].word;
-  const currency = plan.yarn.price?.currency;
-  return [
-    {
-      id: 'join',
-      header: 'Join',
-      accessorFn: ({ join }) => join.name,
-      meta: { rowHeader: true },
-      cell: ({ row: { original } }) => (
-        <JoinName row={original} inUse={original.join.key === plan.join.key} onUse={onUse} />
-      ),
-    },
-    {
-      id: 'join yarn',
-      header: `Join, ${yarnUnit}`,
-      accessorKey: 'joinM',
-      meta: { figures: true },
-      cell: ({ row: { original } }) => yarnFigure(original.joinM, units),
-    },
-    {
-      id: 'all yarn',
-      header: `All, ${yarnUnit}`,
-      accessorKey: 'totalM',
-      meta: { figures: true },
-      cell: ({ row: { original } }) => yarnFigure(original.totalM, units),
-    },
-    { id: 'skeins', header: 'Skeins', accessorKey: 'skeins', meta: { figures: true } },
-    ...(currency
-      ? [
-          {
-            id: 'cost',
-            header: 'Cost',
-            accessorKey: 'costMinor',
-            meta: { figures: true },
-            cell: ({ row: { original } }: { row: { original: JoinComparison } }) =>
-              original.costMinor === null ? '' : showPrice(original.costMinor, currency),
-          },
-        ]
-      : []),
-    {
-      id: 'seam',
-      header: 'Seam adds',
-      accessorKey: 'seamMm',
-      meta: { figures: true },
-      cell: ({ row: { original } }) => showFabric(original.seamMm, units),
-    },
-    {
-      id: 'size',
-      header: 'Finished',
-      accessorKey: 'widthMm',
-      meta: { figures: true },
-      cell: ({ row: { original } }) => showSize(original.widthMm, original.heightMm, units),
-    },
-    { id: 'tails', header: 'Tails', accessorKey: 'tails', meta: { figures: true } },
-    {
-      id: 'time',
-      header: 'Time to join',
-      accessorKey: 'durationS',
-      meta: { figures: true },
-      cell: ({ row: { original } }) => showDuration(original.durationS),
-    },
-  ];
-}
-
-function JoinName({
-  row,
-  inUse,
+/** Joins tried on one blanket, for one hand or several: reason, chart, tables and pictures. */
+export default function CompareJoins({
+  plan,
+  units,
+  terms,
+  kept = NONE,
   onUse,
-}: {
-  row: JoinComparison;
-  inUse: boolean;
-  onUse?: (key: string) => void;
-}) {
-  const { join, fits, fitWords } = row;
+}: CompareJoinsProps) {
+  const [keys, setKeys] = useState(() => READY_JOINS.map(({ key }) => key));
+  const [tensions, setTensions] = useState<readonly Tension[]>([OWN_TENSION]);
+  const [shownId, setShownId] = useState(OWN_TENSION.id);
+  const joins = useMemo(() => READY_JOINS.filter(({ key }) => keys.includes(key)), [keys]);
+  const compared = useMemo(
+    () =>
+      compareTensions(
+        plan,
+        joins,
+        tensions.map(({ swatch }) => swatch),
+      ),
+    [plan, joins, tensions],
+  );
+  const shown = Math.max(
+    0,
+    tensions.findIndex(({ id }) => id === shownId),
+  );
+  const shared = { tensions, compared, plan, units };
   return (
-    <div className="max-w-72 min-w-48">
-      <b className="block">{join.name}</b>
-      <span
-        className={fits ? 'block text-sm font-normal text-ink-2' : 'block text-sm text-amber-ink'}
-      >
-        {fits ? 'Fits' : 'Does not fit'} · {join.surface}, {join.openness}
-        {join.reversible ? ', reversible' : ''} · {join.tool}
-      </span>
-      {!fits && <span className="block text-sm font-normal text-ink-2">{fitWords}</span>}
-      {inUse ? (
-        <span className="mt-1 inline-flex items-center gap-1 text-sm font-normal">
-          <Check size={15} aria-hidden /> in this plan
-        </span>
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-6 pb-4" data-sheet>
+      <h1 className="sheet-shown hidden">Joins compared in {plan.yarn.name}</h1>
+      <div className="not-printed grid gap-2">
+        <JoinChoice chosen={keys} onChoose={setKeys} />
+        <TensionChoice {...{ tensions, kept, units }} onChoose={setTensions} />
+      </div>
+      {joins.length === 0 ? (
+        <p>Choose at least one join.</p>
       ) : (
-        onUse && (
-          <Button kind="quiet" small className="-ms-3" onClick={() => onUse(join.key)}>
-            Use {join.name.charAt(0).toLowerCase() + join.name.slice(1)}
-          </Button>
-        )
+        <>
+          <Reasons {...{ tensions, compared, units, terms }} />
+          <LoadedLater
+            what="The chart"
+            fallback={<Skeleton label="The chart is loading" lines={6} />}
+          >
+            <JoinsChart {...shared} />
+          </LoadedLater>
+          <div>
+            <div className="not-printed mb-3 flex flex-wrap items-end gap-3">
+              {tensions.length > 1 && (
+                <Select
+                  className="w-60"
+                  label="Figures at the tension of"
+                  value={tensions[shown]?.id}
+                  onChange={({ target }) => setShownId(target.value)}
+                  options={tensions.map(({ id, name }) => ({ value: id, word: name }))}
+                />
+              )}
+              <Button icon={Printer} onClick={printSheet}>
+                Print
+              </Button>
+            </div>
+            <DataTable
+              caption={`Joins at the tension of ${inSentence(tensions[shown])}`}
+              captionHidden={tensions.length === 1}
+              rows={compared[shown] ?? NONE}
+              columns={joinColumns(plan, units, onUse)}
+              rowId={({ join }) => join.key}
+              initialSorting={[{ id: 'join yarn', desc: false }]}
+              empty={<p>No join is chosen.</p>}
+              pageSize={40}
+              onExportCsv={(rows) =>
+                download('joins.csv', 'text/csv', joinsCsv(inOrder(rows, compared, tensions)))
+              }
+            />
+          </div>
+          {tensions.length > 1 && <TensionsTable {...shared} />}
+          <JoinPictures {...{ plan, joins, units }} />
+        </>
       )}
     </div>
   );
 }
 
-function joinsCsv(rows: readonly JoinComparison[]): string {
-  return toCsv(
-    [
-      'join',
-      'fits',
-      'join_m',
-      'all_m',
-      'skeins',
-      'seam_mm',
-      'width_mm',
-      'height_mm',
-      'tails',
-      'time_s',
-      'cost_minor',
-    ],
-    rows.map((row) => [
-      row.join.name,
-      row.fits ? 'yes' : 'no',
-      row.joinM,
-      row.totalM,
-      row.skeins,
-      row.seamMm,
-      row.widthMm,
-      row.heightMm,
-      row.tails,
-      row.durationS,
-      row.costMinor,
-    ]),
+interface ReasonsProps {
+  tensions: readonly Tension[];
+  compared: readonly (readonly JoinComparison[])[];
+  units: Units;
+  terms: Terms;
+}
+
+/** Why the thriftiest join is: once for each hand for which that is another sentence. */
+function Reasons({ tensions, compared, units, terms }: ReasonsProps) {
+  return (
+    <div className="grid max-w-[70ch] gap-1" aria-live="polite">
+      {tensions.map(({ id, name }, i) => {
+        const why = whyCheapest(compared[i] ?? NONE);
+        if (!why) return null;
+        return (
+          <p key={id}>
+            {tensions.length > 1 && <b>{name}: </b>}
+            {whyInWords(why, units, terms)}
+          </p>
+        );
+      })}
+    </div>
   );
 }
+
+const inSentence = (tension: Tension | undefined): string =>
+  !tension || tension.id === OWN_TENSION.id ? 'this plan' : tension.name;
+
+/** Every tension's rows, in the order that the table shows. */
+const inOrder = (
+  rows: readonly JoinComparison[],
+  compared: readonly (readonly JoinComparison[])[],
+  tensions: readonly Tension[],
+) =>
+  tensions.map(({ name }, i) => ({
+    tension: name,
+    rows: rows.flatMap(({ join }) => compared[i]?.find((each) => each.join.key === join.key) ?? []),
+  }));

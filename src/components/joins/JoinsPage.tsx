@@ -1,21 +1,28 @@
 import { READY_JOINS } from '../../lib/joins/readyJoins';
+import type { Terms } from '../../lib/pattern/reading';
 import type { Plan } from '../../lib/plan/plan';
+import type { GaugeSwatch } from '../../lib/swatches/swatchRecord';
 import type { Units } from '../../lib/units/display';
 import { Select } from '../ui/Select';
-import { useUnits } from '../ui/useUnits';
+import { useTerms, useUnits } from '../ui/useUnits';
 import CompareJoins from './CompareJoins';
 
 interface JoinsPageProps {
   plan: Plan;
   units: Units;
+  terms: Terms;
+  /** Swatches kept in the account. */
+  kept: readonly GaugeSwatch[];
   /** Id of the blanket compared on; null is the example. */
   chosen: string | null;
   blankets: readonly { id: string; title: string }[];
 }
 
 /** The joins side by side on one blanket, then each in words. */
-export default function JoinsPage({ plan, units: initial, chosen, blankets }: JoinsPageProps) {
-  const units = useUnits(initial);
+export default function JoinsPage(props: JoinsPageProps) {
+  const { plan, kept, chosen, blankets } = props;
+  const units = useUnits(props.units);
+  const terms = useTerms(props.terms);
   return (
     <div className="grid grid-cols-[minmax(0,1fr)] gap-8 pb-10">
       <header className="flex flex-wrap items-end justify-between gap-4">
@@ -39,7 +46,7 @@ export default function JoinsPage({ plan, units: initial, chosen, blankets }: Jo
           ]}
         />
       </header>
-      <CompareJoins plan={plan} units={units} />
+      <CompareJoins {...{ plan, units, terms, kept }} />
       <section>
         <h2>Each join in words</h2>
         <dl className="mt-3 grid gap-x-10 gap-y-5 md:grid-cols-2">

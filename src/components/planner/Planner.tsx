@@ -136,7 +136,14 @@ export function Planner(props: PlannerProps) {
           />
         )}
         {sheet === 'paint' && <PaintSheet {...shared} editing={editing} onClose={close} />}
-        {sheet === 'compare' && <CompareSheet {...shared} onClose={close} />}
+        {sheet === 'compare' && (
+          <CompareSheet
+            {...shared}
+            terms={terms}
+            inAccount={shoppingHref !== undefined}
+            onClose={close}
+          />
+        )}
         {sheet === 'shopping' && <ShoppingSheet {...shared} onClose={close} />}
       </LoadedLater>
     </>

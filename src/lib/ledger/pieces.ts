@@ -115,7 +115,7 @@ export function motifPieces(
   return [...lines].map(([colour, ofColour]) => ({ colour, count, lines: ofColour }));
 }
 
-function joinPieces(context: PieceContext): PieceGroup[] {
+export function joinPieces(context: PieceContext): PieceGroup[] {
   const { plan, join, counts, sideStitches, seamMm } = context;
   const { colour } = plan.join;
   const seam = countsOnSide(join, join.perSeam, sideStitches);
@@ -168,6 +168,7 @@ function addedRounds({ plan, join, places, sideStitches }: PieceContext): PieceG
 /** Links worked in the yarn of each motif's last round: shared out over the motifs. */
 function lastRoundLinks({ plan, join, places }: PieceContext, links: StitchCounts): PieceGroup[] {
   const all = places.reduce((sum, each) => sum + wholeMotifs(each), 0);
+  if (all === 0) return [];
   return plan.colourways.map(({ roundColours }, i) => ({
     colour: roundColours.at(-1) as string,
     count: wholeMotifs(places[i]),

@@ -1,6 +1,5 @@
-import { swatchGauge } from '../../lib/swatches/swatchGauge';
+import { gaugeSwatch } from '../../lib/swatches/gaugeSwatch';
 import type { GaugeSwatch } from '../../lib/swatches/swatchRecord';
-import { widthMm } from '../../lib/units/quantities';
 import type { CurrentUser } from '../../schemas/user';
 import { listSwatches } from './swatches';
 import { listYarnChoices } from './yarnChoices';
@@ -9,12 +8,10 @@ import { listYarnChoices } from './yarnChoices';
 export async function listGaugeSwatches(user: CurrentUser): Promise<GaugeSwatch[]> {
   const [{ items }, yarns] = await Promise.all([listSwatches(user), listYarnChoices(user)]);
   const categories = new Map(yarns.map(({ id, weightCategory }) => [id, weightCategory]));
-  return items.flatMap(({ id, name, yarnId, measurements, ...counts }): GaugeSwatch[] => {
-    const { stitch, stitches, rows } = counts;
-    const gauge = swatchGauge({ stitch, stitches, rows, measurements, yarn: null });
-    if (!gauge) return [];
-    const size = { widthMm: widthMm(gauge.widthMm), heightMm: widthMm(gauge.heightMm) };
-    const weightCategory = categories.get(yarnId ?? '') ?? null;
-    return [{ id, name, swatch: { stitch, stitches, rows, ...size }, weightCategory }];
+  return items.flatMap((kept): GaugeSwatch[] => {
+    const swatch = gaugeSwatch(kept);
+    if (!swatch) return [];
+    const weightCategory = categories.get(kept.yarnId ?? '') ?? null;
+    return [{ id: kept.id, name: kept.name, swatch, weightCategory }];
   });
 }

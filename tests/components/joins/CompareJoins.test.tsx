@@ -17,7 +17,7 @@ const names = () =>
 
 describe('CompareJoins', () => {
   it('lists every join, thriftiest first, with its fit', () => {
-    render(<CompareJoins plan={EXAMPLE_PLAN} units="metric" />);
+    render(<CompareJoins plan={EXAMPLE_PLAN} units="metric" terms="us" />);
     expect(names()).toEqual(rows.map(({ join }) => join.name));
     screen.getAllByRole('rowheader').forEach((cell, i) => {
       expect(cell.textContent).toContain(rows[i]?.fits ? 'Fits' : 'Does not fit');
@@ -26,7 +26,7 @@ describe('CompareJoins', () => {
 
   it('offers each but the one in use', () => {
     const onUse = vi.fn();
-    render(<CompareJoins plan={EXAMPLE_PLAN} units="metric" onUse={onUse} />);
+    render(<CompareJoins plan={EXAMPLE_PLAN} units="metric" terms="us" onUse={onUse} />);
     expect(screen.getAllByText('in this plan')).toHaveLength(1);
     expect(screen.getAllByRole('button', { name: /^Use / })).toHaveLength(rows.length - 1);
     fireEvent.click(screen.getByRole('button', { name: 'Use whip stitch' }));
@@ -34,7 +34,7 @@ describe('CompareJoins', () => {
   });
 
   it('gives what it shows as CSV, in the order shown and to the last digit', () => {
-    render(<CompareJoins plan={EXAMPLE_PLAN} units="imperial" />);
+    render(<CompareJoins plan={EXAMPLE_PLAN} units="imperial" terms="us" />);
     fireEvent.click(screen.getByRole('button', { name: 'Export CSV' }));
     const [name, , text] = vi.mocked(download).mock.lastCall ?? [];
     expect(name).toBe('joins.csv');
@@ -50,7 +50,7 @@ describe('CompareJoins', () => {
 
   it('leaves the cost out where no price is known', () => {
     const plan = { ...EXAMPLE_PLAN, yarn: { ...EXAMPLE_PLAN.yarn, price: null } };
-    render(<CompareJoins plan={plan} units="metric" />);
+    render(<CompareJoins plan={plan} units="metric" terms="us" />);
     expect(screen.queryByRole('columnheader', { name: /Cost/ })).toBeNull();
   });
 });

@@ -4,6 +4,7 @@ import { printPattern } from '../../../lib/pattern/print/printPattern';
 import type { Reading, Terms } from '../../../lib/pattern/reading';
 import type { OwnStitch } from '../../../lib/stitches/ownStitch';
 import { Button } from '../../ui/Button';
+import { printSheet } from '../../ui/printSheet';
 import { SegmentedControl } from '../../ui/SegmentedControl';
 
 interface CleanPatternProps {
@@ -85,11 +86,3 @@ export const CleanPattern = memo(({ reading, name, about, ownStitches }: CleanPa
   );
 });
 CleanPattern.displayName = 'CleanPattern';
-
-/** Prints what is marked as a sheet, and nothing of the page around it. */
-function printSheet(): void {
-  const { dataset } = document.documentElement;
-  dataset.printing = 'sheet';
-  window.addEventListener('afterprint', () => delete dataset.printing, { once: true });
-  window.print();
-}
