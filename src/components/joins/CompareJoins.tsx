@@ -15,6 +15,7 @@ import { LoadedLater } from '../ui/LoadedLater';
 import { printSheet } from '../ui/printSheet';
 import { Select } from '../ui/Select';
 import { Skeleton } from '../ui/Skeleton';
+import { useIsHere } from '../ui/useIsHere';
 import { joinColumns } from './joinColumns';
 import { JoinChoice } from './JoinChoice';
 import { JoinPictures } from './JoinPictures';
@@ -48,6 +49,7 @@ export default function CompareJoins({
   const [keys, setKeys] = useState(() => READY_JOINS.map(({ key }) => key));
   const [tensions, setTensions] = useState<readonly Tension[]>([OWN_TENSION]);
   const [shownId, setShownId] = useState(OWN_TENSION.id);
+  const isHere = useIsHere();
   const joins = useMemo(() => READY_JOINS.filter(({ key }) => keys.includes(key)), [keys]);
   const compared = useMemo(
     () =>
@@ -79,7 +81,7 @@ export default function CompareJoins({
             what="The chart"
             fallback={<Skeleton label="The chart is loading" lines={6} />}
           >
-            <JoinsChart {...shared} />
+            {isHere && <JoinsChart {...shared} />}
           </LoadedLater>
           <div>
             <div className="not-printed mb-3 flex flex-wrap items-end gap-3">

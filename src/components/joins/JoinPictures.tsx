@@ -4,7 +4,7 @@ import type { Join } from '../../lib/joins/join';
 import type { Plan } from '../../lib/plan/plan';
 import { showFabric, showSize, type Units } from '../../lib/units/display';
 import { RuledFrame } from '../ui/RuledFrame';
-import { useInView } from '../ui/useInView';
+import { useIsHere } from '../ui/useIsHere';
 import { FourMotifs } from './FourMotifs';
 
 interface JoinPicturesProps {
@@ -15,7 +15,7 @@ interface JoinPicturesProps {
 
 /** Two by two motifs joined each way, all to one scale. */
 export function JoinPictures({ plan, joins, units }: JoinPicturesProps) {
-  const [ref, seen] = useInView<HTMLElement>();
+  const isHere = useIsHere();
   const pictures = useMemo(
     () =>
       joins.map((join) => {
@@ -29,10 +29,10 @@ export function JoinPictures({ plan, joins, units }: JoinPicturesProps) {
     heightMm: Math.max(...pictures.map(({ estimate }) => estimate.size.heightMm)),
   };
   return (
-    <section ref={ref} className="min-h-40">
+    <section>
       <h2>Four motifs joined each way</h2>
       <p className="mb-4 text-ink-2">All to one scale, each from its upper left corner.</p>
-      {seen && (
+      {isHere && (
         <ul className="grid grid-cols-2 gap-x-6 gap-y-8 lg:grid-cols-3">
           {pictures.map(({ join, plan: small, estimate }) => (
             <li key={join.key} className="break-inside-avoid">

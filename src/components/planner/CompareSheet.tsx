@@ -39,7 +39,7 @@ export default function CompareSheet(props: CompareSheetProps) {
 
 function Compared({ plan, units, terms, change, inAccount }: CompareSheetProps) {
   const { data } = useQuery({ ...swatchesQuery, enabled: inAccount });
-  const kept = data?.items.flatMap((each): GaugeSwatch[] => {
+  const kept = data?.flatMap((each): GaugeSwatch[] => {
     const swatch = gaugeSwatch(each);
     return swatch ? [{ id: each.id, name: each.name, swatch, weightCategory: null }] : [];
   });

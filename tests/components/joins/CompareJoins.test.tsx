@@ -53,4 +53,53 @@ describe('CompareJoins', () => {
     render(<CompareJoins plan={plan} units="metric" terms="us" />);
     expect(screen.queryByRole('columnheader', { name: /Cost/ })).toBeNull();
   });
+
+  it('says why the thriftiest is, and draws four motifs joined each way', () => {
+    render(<CompareJoins plan={EXAMPLE_PLAN} units="metric" terms="us" />);
+    screen.getByText(/^Joined in the last round takes 35\sm less than whip stitch: /);
+    expect(screen.getAllByRole('img', { name: /: four motifs, / })).toHaveLength(rows.length);
+  });
+
+  it('compares only what is chosen', () => {
+    render(<CompareJoins plan={EXAMPLE_PLAN} units="metric" terms="us" />);
+    fireEvent.click(screen.getByRole('button', { name: 'Clear all', hidden: true }));
+    screen.getByText('Choose at least one join.');
+    for (const name of ['Flat braid', 'Reed lace']) {
+      fireEvent.click(screen.getByRole('checkbox', { name, hidden: true }));
+    }
+    expect(names()).toEqual(['Flat braid', 'Reed lace']);
+    screen.getByText(/^Flat braid takes 114\sm less than reed lace: /);
+  });
+
+  it('sets another person beside the plan, typed in by stitches across a width', () => {
+    const swatch = {
+      id: 's1',
+      name: 'Wide hand',
+      swatch: EXAMPLE_PLAN.swatch!,
+      weightCategory: null,
+    };
+    render(<CompareJoins plan={EXAMPLE_PLAN} units="metric" terms="us" kept={[swatch]} />);
+    fireEvent.click(screen.getByRole('button', { name: 'Add', hidden: true }));
+    screen.getByText('Say whose tension it is');
+    const person = screen.getByLabelText('Another person');
+    fireEvent.change(person, { target: { value: 'Odile' } });
+    fireEvent.click(screen.getByRole('button', { name: 'Add', hidden: true }));
+    fireEvent.click(screen.getByRole('checkbox', { name: 'Wide hand', hidden: true }));
+    for (const name of ['This plan', 'Odile', 'Wide hand']) {
+      screen.getByRole('columnheader', { name: new RegExp(name) });
+    }
+    fireEvent.click(screen.getByRole('button', { name: 'Export CSV' }));
+    const [, , text] = vi.mocked(download).mock.lastCall ?? [];
+    const { data } = Papa.parse<Record<string, string>>(text ?? '', {
+      header: true,
+      skipEmptyLines: true,
+    });
+    expect(data).toHaveLength(3 * rows.length);
+    expect(new Set(data.map(({ tension }) => tension))).toEqual(
+      new Set(['This plan', 'Odile', 'Wide hand']),
+    );
+    // the same swatch without the motifs that were weighed: another yarn
+    const metres = (of: string) => Number(data.find(({ tension }) => tension === of)?.join_m);
+    expect(metres('Wide hand')).not.toBe(metres('This plan'));
+  });
 });
