@@ -32,8 +32,8 @@ const layers = [
   layer(
     ['src/lib/**'],
     [
-      packagesBut('mathjs', '@stdlib', 'papaparse'),
-      'The library is pure: mathjs, @stdlib and papaparse only.',
+      packagesBut('mathjs', '@stdlib', 'papaparse', 'pure-rand', 'culori'),
+      'The library is pure: mathjs, @stdlib, papaparse, pure-rand and culori only.',
     ],
     [
       folders('schemas', 'server', 'client', 'components', 'layouts', 'pages', 'run', 'db'),
@@ -120,6 +120,10 @@ export default tseslint.config(
   },
   { files: typescript, rules: { 'no-var': 'off' } },
   { files: scripts, rules: { 'no-undef': 'error' }, languageOptions: { globals: nodeGlobals() } },
+  {
+    files: ['public/*.js'],
+    languageOptions: { globals: { self: 'readonly', caches: 'readonly' } },
+  },
   ...layers,
 );
 

@@ -5,7 +5,7 @@ import type { Plan } from '../../lib/plan/plan';
 import { showFabric, showSize, type Units } from '../../lib/units/display';
 import { BlanketPicture } from '../blanket/BlanketPicture';
 import { AnswerBar } from '../ui/AnswerBar';
-import { Button } from '../ui/Button';
+import { Button, ButtonLink } from '../ui/Button';
 import { LoadedLater } from '../ui/LoadedLater';
 import { Notice } from '../ui/Notice';
 import { useTerms, useUnits } from '../ui/useUnits';
@@ -28,6 +28,7 @@ import { YarnSection } from './YarnSection';
 
 const LedgerSheet = lazy(() => import('./LedgerSheet'));
 const CompareSheet = lazy(() => import('./CompareSheet'));
+const SizesSheet = lazy(() => import('./SizesSheet'));
 const ShoppingSheet = lazy(() => import('./ShoppingSheet'));
 const PaintSheet = lazy(() => import('./paint/PaintSheet'));
 
@@ -47,13 +48,15 @@ interface PlannerProps {
   keeping?: ReactNode;
   /** Where the shopping list of a saved blanket is; without it the list opens here. */
   shoppingHref?: string;
+  /** Where a saved blanket is made motif by motif. */
+  makingHref?: string;
 }
 
-type OpenSheet = 'none' | 'colours' | 'paint' | 'ledger' | 'compare' | 'shopping';
+type OpenSheet = 'none' | 'colours' | 'paint' | 'ledger' | 'compare' | 'sizes' | 'shopping';
 
 /** The estimator: inputs left, the answer and the picture right; everything recomputed at each change. */
 export function Planner(props: PlannerProps) {
-  const { editing, preferences, motifChoices, heading, keeping, shoppingHref } = props;
+  const { editing, preferences, motifChoices, heading, keeping, shoppingHref, makingHref } = props;
   const { plan, change } = editing;
   const units = useUnits(preferences.units);
   const terms = useTerms(preferences.terms);
@@ -104,8 +107,10 @@ export function Planner(props: PlannerProps) {
               <FinishedSize {...shared} />
               <div className="flex flex-wrap gap-3" data-chrome>
                 <ShoppingButton href={shoppingHref} onOpen={() => setSheet('shopping')} />
+                {makingHref && <ButtonLink href={makingHref}>Make it</ButtonLink>}
                 <Button onClick={() => setSheet('paint')}>Paint it</Button>
                 <Button onClick={() => setSheet('compare')}>Compare joins</Button>
+                <Button onClick={() => setSheet('sizes')}>Several sizes</Button>
                 <Button onClick={() => openLedger('all')}>Open the ledger</Button>
               </div>
               <PlanNotices notices={estimate.notices} />
@@ -144,6 +149,7 @@ export function Planner(props: PlannerProps) {
             onClose={close}
           />
         )}
+        {sheet === 'sizes' && <SizesSheet {...shared} onClose={close} />}
         {sheet === 'shopping' && <ShoppingSheet {...shared} onClose={close} />}
       </LoadedLater>
     </>

@@ -43,6 +43,7 @@ function Saved({ blanket, motifChoices, preferences }: SavedPlannerProps) {
       preferences={preferences}
       motifChoices={motifChoices}
       shoppingHref={`/blankets/${blanket.id}/shopping-list`}
+      makingHref={`/blankets/${blanket.id}/making`}
       heading={
         <div className="grid gap-3">
           <h1 className="sr-only">{title}</h1>

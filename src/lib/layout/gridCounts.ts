@@ -8,16 +8,15 @@ import type { MapCorner, PlaneMap } from './planeMap';
 /** Largest number of rows or of columns. */
 export const MOST_ROWS = 400;
 
-const MAP_COUNTS = [
-  'joinedSides',
-  'outerSides',
-  'insideJunctions',
-  'edgeJunctions',
-  'outerCorners',
-  'gatheredLinks',
-  'crossedLinks',
-  'seamLines',
-] as const;
+type MapCount =
+  | 'joinedSides'
+  | 'outerSides'
+  | 'insideJunctions'
+  | 'edgeJunctions'
+  | 'outerCorners'
+  | 'gatheredLinks'
+  | 'crossedLinks'
+  | 'seamLines';
 
 /**
  * What there is of everything. Sides are counted in sides of the main motif, so that half a side
@@ -27,7 +26,7 @@ const MAP_COUNTS = [
  * gatheredLinks, crossedLinks: times that a corner links to another in the whole blanket.
  * seamLines: lines that seams can be worked in without cutting the yarn.
  */
-export type GridCounts = Readonly<Record<Slot | (typeof MAP_COUNTS)[number], number>>;
+export type GridCounts = Readonly<Record<Slot | MapCount, number>>;
 
 /** Counts read off a map, side by side and corner by corner. */
 export function countsOf(

@@ -9,7 +9,6 @@ import { gridCounts } from '../layout/gridCounts';
 import { gridFor, gridSize } from '../layout/gridSize';
 import { layoutFacts, layoutFor, type Arrangement } from '../layout/layouts';
 import { motifGeometry, type MotifGeometry } from '../motifs/geometry';
-import type { Motif } from '../motifs/motif';
 import { mainMotif, type Plan } from '../plan/plan';
 import type { FinishedSize } from './ledger';
 import { joinStitches, type PieceContext } from './pieces';

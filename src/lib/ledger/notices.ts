@@ -1,6 +1,5 @@
 import { expectedM, learnHand, handVarianceM2 } from '../hand/hand';
 import { joinFit } from '../joins/fit';
-import type { Motif } from '../motifs/motif';
 import { mainMotif, type Plan } from '../plan/plan';
 import { stitchWidthRangeMm, YARN_CATEGORIES } from '../yarnCategories';
 import type { Blanket } from './blanketOf';
