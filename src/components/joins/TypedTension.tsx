@@ -72,7 +72,7 @@ export function TypedTension({ units, taken, onAdd }: TypedTensionProps) {
         valueMm={overMm}
         onChange={setOverMm}
       />
-      <Button className="justify-self-start sm:mt-[1.625rem]" icon={Plus} onClick={add}>
+      <Button className="justify-self-start sm:mt-[1.375rem]" icon={Plus} onClick={add}>
         Add
       </Button>
     </div>

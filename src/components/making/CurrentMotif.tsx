@@ -25,7 +25,7 @@ export function CurrentMotif(props: CurrentMotifProps) {
   const { rounds, links, afterwards } = instructions;
   return (
     <section aria-labelledby="current-motif">
-      <h2 id="current-motif" className="text-3xl font-bold tracking-tight">
+      <h2 id="current-motif" className="text-answer font-bold">
         {capital(place)}
       </h2>
       <p className="text-ink-2">{motifName}</p>
@@ -39,17 +39,20 @@ export function CurrentMotif(props: CurrentMotifProps) {
           <h3 className="mt-5 text-lg font-bold">
             {afterwards ? 'Once all motifs are made, its seams' : 'Link as you go'}
           </h3>
-          <ul className="mt-1 grid gap-1 text-lg">
+          <ul className="mt-1 grid gap-1 text-xl">
             {links.map(({ where, what, why }) => (
               <li key={where} className="border-t border-line py-1.5">
                 <b>{capital(where)}</b>: {what}
-                <span className="block text-sm text-ink-2">{why}</span>
+                {why && <span className="block text-sm text-ink-2">{why}</span>}
               </li>
             ))}
           </ul>
         </>
       )}
-      <div className="mt-5 flex flex-wrap gap-3" data-chrome>
+      <div
+        className="sticky bottom-0 mt-4 -mb-3 flex flex-wrap items-center gap-3 bg-ground py-3 lg:static"
+        data-chrome
+      >
         {isMade ? (
           <Button icon={RotateCcw} onClick={onNotMade}>
             Not made yet
@@ -72,7 +75,7 @@ export function CurrentMotif(props: CurrentMotifProps) {
 
 function RoundLine({ plan, round, goesOn }: { plan: Plan; round: RoundToWork; goesOn: boolean }) {
   return (
-    <li className="flex items-center gap-3 text-lg">
+    <li className="flex items-center gap-3 text-xl">
       <WoundCard
         colour={hexOf(plan, round.colour)}
         weight={plan.yarn.weightCategory}

@@ -16,7 +16,8 @@ export interface LinkToMake {
   readonly where: string;
   /** What to do there: "link to row 1, motif 2", "leave open". */
   readonly what: string;
-  readonly why: string;
+  /** Why there and now; null where it goes without saying. */
+  readonly why: string | null;
 }
 
 /** Everything to do for one motif. */
@@ -61,10 +62,10 @@ export function motifInstructions(
     links: [
       ...step.sides.map((side): LinkToMake => ({
         where: `${side.side} side`,
-        what: to(side.to),
-        why: 'that motif is made',
+        what: asWorked ? to(side.to) : `seam with ${placeWords(motifs, side.to, step.face)}`,
+        why: null,
       })),
-      ...step.corners.map((corner): LinkToMake => ({
+      ...(asWorked ? step.corners : []).map((corner): LinkToMake => ({
         where: `${corner.corner} corner`,
         what: corner.to === null ? 'leave open' : to(corner.to),
         why: REASONS[corner.reason],

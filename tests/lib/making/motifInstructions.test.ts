@@ -27,9 +27,9 @@ describe('motifInstructions', () => {
     ]);
     expect(rounds.at(-1)?.colour).toBe('c1');
     expect(afterwards).toBe(false);
-    expect(links.map(({ where, what, why }) => `${where}: ${what} (${why})`)).toEqual([
-      'top side: link to row 1, motif 2 (that motif is made)',
-      'left side: link to row 2, motif 1 (that motif is made)',
+    expect(links.map(({ where, what, why }) => why === null ? `${where}: ${what}` : `${where}: ${what} (${why})`)).toEqual([
+      'top side: link to row 1, motif 2',
+      'left side: link to row 2, motif 1',
       'top left corner: link to row 1, motif 1 (inside: it crosses to the motif opposite)',
       'top right corner: link to row 1, motif 3 (inside: it crosses to the motif opposite)',
       'bottom right corner: leave open (inside: the motif opposite closes it later)',
@@ -47,5 +47,8 @@ describe('motifInstructions', () => {
     const seam = instructions(withJoin('whip-stitch'), 1);
     expect(seam.rounds.some(({ links }) => links)).toBe(false);
     expect(seam.afterwards).toBe(true);
+    expect(seam.links).toEqual([
+      { where: 'left side', what: 'seam with row 1, motif 1', why: null },
+    ]);
   });
 });

@@ -12,21 +12,19 @@ const sized = sizesOf(plan, frozen([...BLANKET_SIZES]));
 
 describe('BLANKET_SIZES', () => {
   it('are the published ones, in inches exactly', () => {
-    const inches = BLANKET_SIZES.map(({ key, ...size }) => [
-      key,
-      size.widthMm / 25.4,
-      size.heightMm / 25.4,
-    ]);
+    const millimetres = BLANKET_SIZES.map(({ key, ...size }) => [key, size.widthMm, size.heightMm]);
     // published: justastitchaway.blogspot.com, 6 Mar 2008 (stroller; adult afghan; twin, full, king
     // bed blanket); the lap crochetcabana.com (lapghan, the larger)
-    expect(inches).toEqual([
-      ['baby', 30, 36],
-      ['lap', 36, 48],
-      ['throw', 50, 70],
-      ['single', 66, 90],
-      ['double', 80, 90],
-      ['king', 108, 100],
-    ]);
+    expect(millimetres).toEqual(
+      [
+        ['baby', 30, 36],
+        ['lap', 36, 48],
+        ['throw', 50, 70],
+        ['single', 66, 90],
+        ['double', 80, 90],
+        ['king', 108, 100],
+      ].map(([key, width, height]) => [key, 25.4 * Number(width), 25.4 * Number(height)]),
+    );
   });
 });
 

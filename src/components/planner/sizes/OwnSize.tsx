@@ -58,7 +58,7 @@ export function OwnSize({ units, taken, onAdd }: OwnSizeProps) {
         valueMm={height}
         onChange={setHeight}
       />
-      <Button className="justify-self-start sm:mt-[1.625rem]" icon={Plus} onClick={add}>
+      <Button className="justify-self-start sm:mt-[1.375rem]" icon={Plus} onClick={add}>
         Add
       </Button>
     </div>

@@ -37,7 +37,7 @@ export function SizesTable({ plan, sized, units, onUse, onRemove }: SizesTablePr
           <tr className="align-bottom">
             <td />
             {sized.map(({ target }) => (
-              <th key={target.key} scope="col" className="px-3 pb-1 text-end">
+              <th key={target.key} scope="col" className="px-2 pb-1 text-end whitespace-nowrap">
                 {target.name}
                 <span className="block font-normal text-ink-2">
                   {showSize(target.widthMm, target.heightMm, units)}
@@ -57,7 +57,7 @@ export function SizesTable({ plan, sized, units, onUse, onRemove }: SizesTablePr
             ))}
           </tr>
         </thead>
-        <tbody className="figures">
+        <tbody className="figures text-sm">
           <Row head={unit === 'blocks' ? 'Blocks' : 'Motifs'} sized={sized}>
             {({ columns, rows }) => `${columns} × ${rows}`}
           </Row>
@@ -84,12 +84,10 @@ export function SizesTable({ plan, sized, units, onUse, onRemove }: SizesTablePr
             </Row>
           ))}
           <Row head="In all" sized={sized}>
-            {({ totals }) => (
-              <>
-                <b className="block">{skeinWord(totals.skeins)}</b>
-                <span className="text-ink-2">{showYarn(totals.meanM, units)} expected</span>
-              </>
-            )}
+            {({ totals }) => <b>{skeinWord(totals.skeins)}</b>}
+          </Row>
+          <Row head="Yarn expected" sized={sized}>
+            {({ totals }) => showYarn(totals.meanM, units)}
           </Row>
           {price && (
             <Row head="Cost" sized={sized}>
@@ -105,7 +103,12 @@ export function SizesTable({ plan, sized, units, onUse, onRemove }: SizesTablePr
             <td />
             {sized.map(({ target }) => (
               <td key={target.key} className="py-1 text-end">
-                <Button kind="quiet" small onClick={() => onUse(target)}>
+                <Button
+                  kind="quiet"
+                  small
+                  className="-me-3 font-sans"
+                  onClick={() => onUse(target)}
+                >
                   Use<span className="sr-only"> the size {target.name}</span>
                 </Button>
               </td>
@@ -126,11 +129,11 @@ interface RowProps {
 function Row({ head, sized, children }: RowProps) {
   return (
     <tr className="border-t border-line align-top">
-      <th scope="row" className="py-1.5 pe-3 text-start font-sans font-normal">
+      <th scope="row" className="py-1.5 pe-3 text-start font-sans text-base font-normal">
         {head}
       </th>
       {sized.map((each) => (
-        <td key={each.target.key} className="px-3 py-1.5 text-end whitespace-nowrap">
+        <td key={each.target.key} className="px-2 py-1.5 text-end whitespace-nowrap">
           {children(each)}
         </td>
       ))}
