@@ -28,7 +28,7 @@ const desktop: Project = {
  */
 const phone: Project = {
   name: 'phone',
-  testMatch: /(stranger|accessibility|accounts|stash|chart|patterns)\.spec\.ts$/,
+  testMatch: /(stranger|accessibility|accounts|stash|chart|patterns|making|painting)\.spec\.ts$/,
   grepInvert: /@desktop/,
   use: { viewport: { width: 390, height: 844 }, isMobile: true, hasTouch: true },
 };
