@@ -59,4 +59,5 @@ export const placementSchema = strict('Placement', {
     0,
     PLAN_LIMITS.paintedRuns,
   ),
+  byHand: list('Colourways placed by hand', colourway, 0, PLAN_LIMITS.colourways).default([]),
 }) satisfies z.ZodType<Placement>;

@@ -181,7 +181,9 @@ describe('planSchema', () => {
     expect(errorsOf({ ...plain(), placement: { rule, painted: [[0, 0, 0, 0]] } })).toEqual({
       'placement.painted.0.2': expect.stringContaining('Motifs painted'),
     });
-    expect(errorsOf({ ...plain(), placement: { rule: { by: 'wish' }, painted: [] } })).toEqual({
+    expect(
+      errorsOf({ ...plain(), placement: { rule: { by: 'wish' }, painted: [], byHand: [] } }),
+    ).toEqual({
       'placement.rule.by': 'Placement must be stripes, a repeat, a gradient or at random',
     });
   });

@@ -1,4 +1,5 @@
 import { Plus, Trash2 } from 'lucide-react';
+import { withTurns } from '../../lib/colour/paintEdits';
 import {
   withChangedColour,
   withColour,
@@ -10,6 +11,7 @@ import type { Plan } from '../../lib/plan/plan';
 import { withoutColourway } from '../../lib/plan/withoutMotif';
 import { PLAN_LIMITS } from '../../schemas/limits';
 import { Button } from '../ui/Button';
+import { Checkbox } from '../ui/Checkbox';
 import { Sheet } from '../ui/Dialog';
 import { Field } from '../ui/Field';
 import { Select } from '../ui/Select';
@@ -127,6 +129,13 @@ function Colourways({ plan, change }: PartProps) {
                 Remove
               </Button>
             </div>
+            {colourway.motifIndex !== plan.secondMotif && plan.colourways.length > 1 && (
+              <Checkbox
+                label="Takes its turn where nothing is painted"
+                checked={!plan.placement.byHand.includes(i)}
+                onChange={({ target }) => change((old) => withTurns(old, i, target.checked))}
+              />
+            )}
             <div className="grid grid-cols-2 gap-2 sm:grid-cols-4">
               {colourway.roundColours.map((colour, round) => (
                 <Select

@@ -5,7 +5,12 @@ import type { Arrangement } from '../layout/layouts';
 import type { PlaneMap } from '../layout/planeMap';
 import { STRIPES, type Placement } from './placement';
 import { stripeCounts } from './stripeCounts';
-import { placeColourways, type ColourwayGroups, type PlacedColourways } from './placeColourways';
+import {
+  placeColourways,
+  takingTurns,
+  type ColourwayGroups,
+  type PlacedColourways,
+} from './placeColourways';
 
 /** A blanket motif by motif: where each lies, and its colourway. */
 export interface ColouredLayout extends PlacedColourways {
@@ -62,10 +67,11 @@ export function slotCounts(
     places.motifs === rows * columns &&
     !hasParts(places)
   ) {
-    const motifs = stripeCounts(rule, rows, columns, groups.main.length);
+    const turns = takingTurns(groups.main, placement.byHand);
+    const motifs = stripeCounts(rule, rows, columns, turns.length);
     return Array.from({ length: count }, (_, i) => ({
       ...NO_MOTIFS,
-      motifs: motifs[groups.main.indexOf(i)] ?? 0,
+      motifs: motifs[turns.indexOf(i)] ?? 0,
     }));
   }
   const counts = Array.from({ length: count }, () => ({ ...NO_MOTIFS }) as Record<Slot, number>);

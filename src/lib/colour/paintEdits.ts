@@ -32,12 +32,29 @@ export function withPaintedRound(
       roundColours: old.roundColours.map((each, i) => (i === roundNumber ? colour : each)),
     };
     const known = painted.colourways.findIndex((each) => isSame(each, wanted));
-    if (known < 0) painted = { ...painted, colourways: [...painted.colourways, wanted] };
-    const colourway = known < 0 ? painted.colourways.length - 1 : known;
+    const colourway = known < 0 ? painted.colourways.length : known;
+    if (known < 0) painted = withColourwayByHand(painted, wanted);
     painted = withPainted(painted, [motif], colourway);
   }
   return painted;
 }
+
+/** A colourway that comes of painting takes no turns: the rest of the blanket stays as it is. */
+const withColourwayByHand = (plan: Plan, colourway: Colourway): Plan => ({
+  ...plan,
+  colourways: [...plan.colourways, colourway],
+  placement: {
+    ...plan.placement,
+    byHand: [...plan.placement.byHand, plan.colourways.length],
+  },
+});
+
+/** The plan with a colourway placed by the rule, or only where it is painted. */
+export const withTurns = (plan: Plan, colourway: number, takesTurns: boolean): Plan => {
+  const others = plan.placement.byHand.filter((each) => each !== colourway);
+  const byHand = takesTurns ? others : [...others, colourway].sort((left, right) => left - right);
+  return { ...plan, placement: { ...plan.placement, byHand } };
+};
 
 const isSame = (left: Colourway, right: Colourway): boolean =>
   left.motifIndex === right.motifIndex && left.roundColours.join() === right.roundColours.join();

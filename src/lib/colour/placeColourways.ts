@@ -27,7 +27,7 @@ const MIXED_OVER = 0.7;
  * Example: two colourways along the diagonals of two rows of three: 0 1 0, 1 0 1.
  */
 export function placeColourways(
-  { rule, painted }: Placement,
+  { rule, painted, byHand }: Placement,
   groups: ColourwayGroups,
   faces: readonly Face[],
   map: () => PlaneMap,
@@ -38,22 +38,43 @@ export function placeColourways(
     const group = second ? groups.second : groups.main;
     const members = faces.flatMap(({ slot }, i) => (SLOT_FACTS[slot].second === second ? [i] : []));
     if (group.length === 0 || members.length === 0) continue;
+    const turns = takingTurns(group, byHand);
     const locked = lockedPlaces(painted, group);
     const settled = members.map((i) => locked.get(addressOf(faces[i] as Face)) ?? null);
     if (rule.by === 'random') {
-      const placed = atRandom(rule, group, members, settled, map());
-      members.forEach((i, k) => (colourways[i] = placed.colourways[k] as number));
+      // A colourway that only lies where it is painted is like no neighbour's.
+      const open = members.flatMap((_, k) =>
+        settled[k] == null || turns.includes(settled[k]) ? [k] : [],
+      );
+      const placed = atRandom(
+        rule,
+        turns,
+        open.map((k) => members[k] as number),
+        open.map((k) => settled[k] ?? null),
+        map(),
+      );
+      members.forEach((i, k) => (colourways[i] = settled[k] ?? -1));
+      open.forEach((k, j) => (colourways[members[k] as number] = placed.colourways[j] as number));
       alike += placed.alike;
     } else {
       const follow = ruleOf(
         rule,
-        group,
+        turns,
         members.map((i) => faces[i] as Face),
       );
       members.forEach((i, k) => (colourways[i] = settled[k] ?? follow(faces[i] as Face)));
     }
   }
   return { colourways, alike };
+}
+
+/** Those of a group that the rule may place; all of them where none would be left. */
+export function takingTurns(
+  group: readonly number[],
+  byHand: readonly number[],
+): readonly number[] {
+  const turns = group.filter((colourway) => !byHand.includes(colourway));
+  return turns.length > 0 ? turns : group;
 }
 
 const ROW_STEP = 10_000;
@@ -87,7 +108,7 @@ function ruleOf(
     return (face) => {
       const tileRow = rule.tile[face.row % rule.tile.length];
       const colourway = tileRow?.[face.column % tileRow.length];
-      return colourway !== undefined && group.includes(colourway) ? colourway : diagonals(face);
+      return colourway ?? diagonals(face);
     };
   }
   if (rule.by === 'gradient') return gradient(rule, group, faces);

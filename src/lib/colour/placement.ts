@@ -28,7 +28,13 @@ export type PaintedRun = readonly [row: number, column: number, length: number, 
 export interface Placement {
   readonly rule: PlacementRule;
   readonly painted: readonly PaintedRun[];
+  /** Colourways that lie only where they are painted: the rule leaves them out. */
+  readonly byHand: readonly number[];
 }
 
 /** Colourways take turns along the diagonals. */
-export const DIAGONALS: Placement = { rule: { by: 'diagonals', width: 1 }, painted: [] };
+export const DIAGONALS: Placement = {
+  rule: { by: 'diagonals', width: 1 },
+  painted: [],
+  byHand: [],
+};

@@ -1,3 +1,4 @@
+import { borderRoundMm } from '../border/borderHeight';
 import { gaugeOf } from '../gauge/gauge';
 import type { Estimate } from '../ledger/ledger';
 import { fixed } from '../motifs/polygonPoints';
@@ -14,10 +15,10 @@ export interface BorderBand {
 export function borderBands(plan: Plan, { size }: Estimate): BorderBand[] {
   const gauge = gaugeOf(plan.swatch, plan.yarn.weightCategory);
   let inMm = 0;
-  return plan.border.toReversed().map(({ stitch, colour }) => {
+  return plan.border.toReversed().map((round) => {
     const reachMm = size.edgeMm + size.borderMm - size.seamMm / 2 - inMm;
-    inMm += gauge.heightMm(stitch);
-    return { reachMm: Math.max(0, reachMm), colour };
+    inMm += borderRoundMm(round, gauge);
+    return { reachMm: Math.max(0, reachMm), colour: round.colour };
   });
 }
 

@@ -4,7 +4,14 @@ import type { Motif } from '../motifs/motif';
 import { motifPieces } from '../ledger/pieces';
 import { layoutFacts } from '../layout/layouts';
 import { withLayout } from './layoutEdits';
-import { mainMotif, type Colourway, type Plan, type PlanColour, type PlanEvidence } from './plan';
+import {
+  mainMotif,
+  type BorderRound,
+  type Colourway,
+  type Plan,
+  type PlanColour,
+  type PlanEvidence,
+} from './plan';
 
 /**
  * The plan with its main motif replaced. Colours of rounds stay where there is such a round; new
@@ -109,13 +116,17 @@ export function withoutColour(plan: Plan, key: string): Plan {
   };
 }
 
-/** The plan with a border of so many rounds of one stitch; rounds keep their colours, new ones take the join's. */
+/**
+ * The plan with a border of so many rounds. While the stitch is that of its first round, rounds there
+ * are stay as they are; another stitch is for all of them, in their colours. New ones take the join's.
+ */
 export const withBorder = (plan: Plan, rounds: number, stitch: StitchCode): Plan => ({
   ...plan,
-  border: Array.from({ length: rounds }, (_, i) => ({
-    stitch,
-    colour: plan.border[i]?.colour ?? plan.join.colour,
-  })),
+  border: Array.from({ length: rounds }, (_, i): BorderRound => {
+    const old = plan.border[i];
+    if (old && stitch === plan.border[0]?.stitch) return old;
+    return { stitch, colour: old?.colour ?? plan.join.colour };
+  }),
 });
 
 /** The plan with one piece of evidence replaced, added (past the end) or, given null, taken out. */

@@ -1,3 +1,4 @@
+import type { Edging, FourSides } from '../border/edging';
 import type { Placement } from '../colour/placement';
 import type { Edge, Layout } from '../layout/layouts';
 import type { Motif } from '../motifs/motif';
@@ -71,8 +72,13 @@ export type PlanSize =
     };
 
 export interface BorderRound {
+  /** Worked in every stitch; of an edging the stitch that stands for its height. */
   readonly stitch: StitchCode;
   readonly colour: string;
+  /** Worked from a text of its own instead. */
+  readonly edging?: Edging;
+  /** More stitches, or fewer, along each side of the blanket than there are below. */
+  readonly adjust?: FourSides;
 }
 
 /** Chance of not running short, for each colour. */

@@ -48,9 +48,13 @@ function withColourways(
   };
 }
 
-function renumbered({ rule, painted }: Placement, to: (i: number) => number | null): Placement {
+function renumbered(
+  { rule, painted, byHand }: Placement,
+  to: (i: number) => number | null,
+): Placement {
   const all = (colourways: readonly number[]): number[] => colourways.flatMap((i) => to(i) ?? []);
   return {
+    byHand: all(byHand),
     painted: painted.flatMap(([row, column, length, colourway]) => {
       const now = to(colourway);
       return now === null ? [] : [[row, column, length, now] as const];

@@ -6,6 +6,7 @@ import {
   withoutPaint,
   withPainted,
   withPaintedRound,
+  withTurns,
 } from '../../../src/lib/colour/paintEdits';
 import { blanketFaces } from '../../../src/lib/plan/blanketFaces';
 import { withLayout } from '../../../src/lib/plan/layoutEdits';
@@ -57,6 +58,10 @@ describe('withPaintedRound', () => {
     expect(painted.colourways[3]?.roundColours).toEqual(['c2', 'c4', 'c4', 'c2']);
     expect(colourwaysOf(painted)[0]).toBe(3);
     expect(colourwaysOf(painted)[3]).toBe(3);
+    // every other motif stays as it was
+    expect(colourwaysOf(painted).map((each) => each % 3)).toEqual(colourwaysOf(EXAMPLE_PLAN));
+    expect(estimate(painted).colourwayMotifs).toEqual([25, 27, 26, 2]);
+    expect(colourwaysOf(withTurns(painted, 3, true))).not.toEqual(colourwaysOf(painted));
   });
 
   it('takes a colourway that is there already', () => {
@@ -81,7 +86,7 @@ describe('sameAround', () => {
   it('finds what hangs together by its sides, and nothing across a corner', () => {
     const rows: Plan = {
       ...EXAMPLE_PLAN,
-      placement: { rule: { by: 'rows', width: 2 }, painted: [] },
+      placement: { rule: { by: 'rows', width: 2 }, painted: [], byHand: [] },
     };
     expect(sameAround(laid(rows), 3)).toHaveLength(16);
     expect(sameAround(laid(EXAMPLE_PLAN), 3)).toHaveLength(1);

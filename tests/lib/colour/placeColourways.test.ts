@@ -13,12 +13,13 @@ function placed(
   columns: number,
   {
     painted = [] as Placement['painted'],
+    byHand = [] as Placement['byHand'],
     groups = MAIN as { main: readonly number[]; second: readonly number[] },
     arrangement = SQUARES as Arrangement,
   } = {},
 ) {
   const faces = layoutFaces(arrangement, rows, columns);
-  const result = placeColourways({ rule, painted }, groups, faces, () => mapOf(faces));
+  const result = placeColourways({ rule, painted, byHand }, groups, faces, () => mapOf(faces));
   return { ...result, faces };
 }
 const inRows = ({ colourways }: { colourways: readonly number[] }, columns: number): string[] =>
@@ -81,6 +82,21 @@ describe('placeColourways', () => {
       const rows = inRows(placed(rule, 3, 4, { painted }), 4);
       expect(rows[0]?.slice(1, 3)).toBe('22');
       expect(rows[1]?.[0]).toBe('1');
+    }
+  });
+
+  it('leaves a colourway that is only painted out of every rule', () => {
+    const painted = [[1, 1, 1, 2]] as const;
+    const rules: PlacementRule[] = [
+      { by: 'rows', width: 1 },
+      { by: 'gradient', towards: 'down', order: [0, 1, 2], seed: 1 },
+      { by: 'random', seed: 1, counts: null },
+    ];
+    for (const rule of rules) {
+      const { colourways, alike } = placed(rule, 3, 4, { painted, byHand: [2] });
+      expect(colourways.flatMap((each, i) => (each === 2 ? [i] : []))).toEqual([5]);
+      expect(colourways).not.toContain(-1);
+      if (rule.by === 'random') expect(alike).toBe(0);
     }
   });
 

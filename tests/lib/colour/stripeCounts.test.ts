@@ -25,7 +25,7 @@ describe('stripeCounts', () => {
           const rule = { by, width };
           const main = upTo(kinds).map((kind) => kind - 1);
           const { colourways } = placeColourways(
-            { rule, painted: [] },
+            { rule, painted: [], byHand: [] },
             { main, second: [] },
             faces,
             () => mapOf(faces),
