@@ -8,6 +8,8 @@ export const PLAN_LIMITS = {
   gridRows: 400,
   gridColumns: 400,
   borderRounds: 30,
+  edgingLength: 2_000,
+  borderAdjustment: 500,
   paintedRuns: 8_000,
   tileSide: 24,
   seed: 2_147_483_647,

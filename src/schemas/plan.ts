@@ -2,6 +2,7 @@ import * as z from './zod';
 import { EDGES, LAYOUTS } from '../lib/layout/layouts';
 import { CONFIDENCES } from '../lib/plan/plan';
 import { lengthM, massG, priceMinor, widthMm } from '../lib/units/quantities';
+import { borderRoundSchema } from './border';
 import { choice, counted, hex, list, measured, name, strict } from './fields';
 import { PLAN_LIMITS, POSSIBLE } from './limits';
 
@@ -144,15 +145,14 @@ export const planSchema = strict('Plan', {
   layout: choice('Layout', LAYOUTS).nullable().default(null),
   edge: choice('Edge', EDGES).default('toothed'),
   secondMotif: motifIndex.nullable().default(null),
-  placement: placementSchema.default({ rule: { by: 'diagonals', width: 1 }, painted: [] }),
+  placement: placementSchema.default({
+    rule: { by: 'diagonals', width: 1 },
+    painted: [],
+    byHand: [],
+  }),
   join: strict('Join', { key: name('Key of the join', PLAN_LIMITS.keyLength), colour: colourKey }),
   corners: choice('Corners', ['gathered', 'crossed']),
-  border: list(
-    'Border rounds',
-    strict('Border round', { stitch: knownStitch, colour: colourKey }),
-    0,
-    PLAN_LIMITS.borderRounds,
-  ),
+  border: list('Border rounds', borderRoundSchema, 0, PLAN_LIMITS.borderRounds),
   confidence: choice('Confidence', CONFIDENCES),
   secondsPerMove: measured('Time of a move', 's', PLAN_LIMITS.secondsPerMove).nullable(),
 }).superRefine(checkPlan);

@@ -11,6 +11,11 @@ const loopHeight = strict('Chain loop', {
   gapStitches: counted('Stitches spanned by a loop', 0, PLAN_LIMITS.gapStitches),
 });
 
+/** A stitch, or chain loops. */
+export const roundHeight = z.union([knownStitch, loopHeight], {
+  error: 'Height of a round must be a stitch such as dc, or chain loops',
+});
+
 const spaces = z
   .record(
     name('Kind of space', PLAN_LIMITS.keyLength),
@@ -29,9 +34,7 @@ const roundSchema = strict('Round', {
   spaces,
   cornerSpace: name('Space of a corner', PLAN_LIMITS.keyLength).nullable(),
   perSide: counted('Stitches of a side', 0, stitchesPerRound),
-  height: z.union([knownStitch, loopHeight], {
-    error: 'Height of a round must be a stitch such as dc, or chain loops',
-  }),
+  height: roundHeight,
 }).superRefine((round, context) => {
   for (const [code, count] of Object.entries(round.travel)) {
     const made = round.made[code] ?? 0;

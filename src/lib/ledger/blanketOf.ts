@@ -1,3 +1,4 @@
+import { borderRoundMm } from '../border/borderHeight';
 import { gaugeOf, type Gauge } from '../gauge/gauge';
 import { slotCounts } from '../colour/colourwayPlaces';
 import type { ColourwayGroups } from '../colour/placeColourways';
@@ -73,7 +74,7 @@ export function blanketOf(plan: Plan): Blanket {
     acrossMm: Math.max(...main.map(({ acrossMm }) => acrossMm)),
     seamMm: seamWidthMm(join, gauge),
     edgeMm: joinEdgeMm(join, gauge),
-    borderMm: plan.border.reduce((sum, { stitch }) => sum + gauge.heightMm(stitch), 0),
+    borderMm: plan.border.reduce((sum, round) => sum + borderRoundMm(round, gauge), 0),
   };
   const { rows, columns } = gridFor(arrangement, plan.size, measures);
   const counts = gridCounts(arrangement, rows, columns);

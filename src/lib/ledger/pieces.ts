@@ -1,11 +1,12 @@
 import { borderRounds } from '../border/borderRounds';
+import { edgeStitches } from '../border/edge';
 import type { Join } from '../joins/join';
 import { countsOnSide, outerSideStitches } from '../joins/joinCounts';
 import type { SlotCounts } from '../colour/colourwayPlaces';
 import { SLOT_FACTS, SLOTS, type Slot } from '../layout/face';
 import type { GridCounts } from '../layout/gridCounts';
 import type { Motif } from '../motifs/motif';
-import { mainMotif, type Colourway, type Plan } from '../plan/plan';
+import { mainMotif, type BorderRound, type Colourway, type Plan } from '../plan/plan';
 import { addCounts, scaleCounts, subtractCounts } from '../stitches/counts';
 import type { StitchCounts } from '../stitches/stitch';
 import type { Part } from './ledger';
@@ -183,11 +184,11 @@ export function joinStitches(motif: Motif): number {
 }
 
 function borderPieces({ plan, join, counts, sideStitches }: PieceContext): PieceGroup[] {
-  const codes = plan.border.map(({ stitch }) => stitch);
   const sides = counts.outerSides;
-  const n = outerSideStitches(join, openSideStitches(mainMotif(plan), sideStitches));
-  return borderRounds(codes, counts, n).map((made, i) => {
-    const colour = plan.border[i]?.colour as string;
+  // Shared out alike: only their sum is counted here.
+  const side = edgeStitches(counts, outerStitches(plan, join, sideStitches)) / 4;
+  return borderRounds(plan.border, [side, side, side, side]).map(({ made }, i) => {
+    const { colour, edging } = plan.border[i] as BorderRound;
     const attached = i === 0 || plan.border[i - 1]?.colour !== colour;
     return {
       colour,
@@ -195,7 +196,7 @@ function borderPieces({ plan, join, counts, sideStitches }: PieceContext): Piece
       lines: [
         worked(
           'border',
-          `Border round ${i + 1}`,
+          `Border round ${i + 1}${edging ? `: ${edging.name}` : ''}`,
           scaleCounts(made, 1 / sides),
           attached ? 2 / sides : 0,
         ),
@@ -203,3 +204,7 @@ function borderPieces({ plan, join, counts, sideStitches }: PieceContext): Piece
     };
   });
 }
+
+/** Stitches that a border finds on one outer side of the blanket's motifs. */
+export const outerStitches = (plan: Plan, join: Join, sideStitches: number): number =>
+  outerSideStitches(join, openSideStitches(mainMotif(plan), sideStitches));
