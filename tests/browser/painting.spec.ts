@@ -34,7 +34,7 @@ test('motifs are painted by a stroke, one step to undo, and kept with the blanke
   await sheet.getByRole('button', { name: 'Undo' }).click();
   await expect(sheet).toContainText(counts);
   await sheet.getByRole('button', { name: 'Redo' }).click();
-  await sheet.getByRole('button', { name: 'Close' }).click();
+  await sheet.getByRole('button', { name: 'Close', exact: true }).click();
   await expect(page.getByText('Saved', { exact: true })).toBeVisible();
   const { plan } = await send<{ plan: Plan }>(page, 'GET', `/api/blankets/${id}`);
   expect(plan.placement.painted).toEqual([[0, 0, 5, 1]]);

@@ -3,40 +3,35 @@ import type { BlanketMotif, LaidBlanket } from '../plan/blanketFaces';
 import type { Colourway, Plan } from '../plan/plan';
 import type { PaintedRun, Placement } from './placement';
 
-/** The plan with these motifs in one colourway; they keep it whatever the rule. */
-export function withPainted(plan: Plan, motifs: readonly BlanketMotif[], colourway: number): Plan {
+/**
+ * The plan with these motifs locked in the colourway that each of them names, whatever the rule:
+ * painted ones, or all as they lie.
+ */
+export function withPainted(plan: Plan, motifs: readonly BlanketMotif[]): Plan {
   const places = placesOf(plan);
-  for (const { face } of motifs) {
-    const second = SLOT_FACTS[face.slot].second;
-    places.set(key(second, face.row, face.column), colourway);
+  for (const { face, colourway } of motifs) {
+    places.set(key(SLOT_FACTS[face.slot].second, face.row, face.column), colourway);
   }
   return withPlaces(plan, places);
 }
 
-/**
- * The plan with one round of these motifs in another colour: in a colourway that has it so, or in
- * a new one. `roundNumber` counts from 0; motifs without such a round stay as they are.
- */
-export function withPaintedRound(
+/** The plan with a colourway like `colourway` but for one round, and its number; null without such a round. */
+export function withRecoloured(
   plan: Plan,
-  motifs: readonly BlanketMotif[],
-  roundNumber: number,
+  colourway: number,
+  round: number,
   colour: string,
-): Plan {
-  let painted = plan;
-  for (const motif of motifs) {
-    const old = painted.colourways[motif.colourway];
-    if (!old || roundNumber >= old.roundColours.length) continue;
-    const wanted: Colourway = {
-      ...old,
-      roundColours: old.roundColours.map((each, i) => (i === roundNumber ? colour : each)),
-    };
-    const known = painted.colourways.findIndex((each) => isSame(each, wanted));
-    const colourway = known < 0 ? painted.colourways.length : known;
-    if (known < 0) painted = withColourwayByHand(painted, wanted);
-    painted = withPainted(painted, [motif], colourway);
-  }
-  return painted;
+): { plan: Plan; colourway: number } | null {
+  const old = plan.colourways[colourway];
+  if (!old || round >= old.roundColours.length) return null;
+  const wanted: Colourway = {
+    ...old,
+    roundColours: old.roundColours.map((each, i) => (i === round ? colour : each)),
+  };
+  const known = plan.colourways.findIndex((each) => isSame(each, wanted));
+  return known < 0
+    ? { plan: withColourwayByHand(plan, wanted), colourway: plan.colourways.length }
+    : { plan, colourway: known };
 }
 
 /** A colourway that comes of painting takes no turns: the rest of the blanket stays as it is. */
@@ -58,15 +53,6 @@ export const withTurns = (plan: Plan, colourway: number, takesTurns: boolean): P
 
 const isSame = (left: Colourway, right: Colourway): boolean =>
   left.motifIndex === right.motifIndex && left.roundColours.join() === right.roundColours.join();
-
-/** The plan with every motif locked as it lies. */
-export function withAllLocked(plan: Plan, { motifs }: LaidBlanket): Plan {
-  const places = new Map<number, number>();
-  for (const { face, colourway } of motifs) {
-    places.set(key(SLOT_FACTS[face.slot].second, face.row, face.column), colourway);
-  }
-  return withPlaces(plan, places);
-}
 
 /** The plan with nothing painted or locked: the rule has its way everywhere. */
 export const withoutPaint = (plan: Plan): Plan => ({

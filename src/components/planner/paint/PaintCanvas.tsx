@@ -1,7 +1,7 @@
 import { useEffect, useRef, useState, type KeyboardEvent, type PointerEvent } from 'react';
-import { sameAround, withPainted, withPaintedRound } from '../../../lib/colour/paintEdits';
+import { sameAround, withPainted, withRecoloured } from '../../../lib/colour/paintEdits';
 import type { Estimate } from '../../../lib/ledger/ledger';
-import { blanketFaces } from '../../../lib/plan/blanketFaces';
+import { blanketFaces, type BlanketMotif } from '../../../lib/plan/blanketFaces';
 import { motifAt, motifTowards } from '../../../lib/plan/motifAt';
 import type { Plan } from '../../../lib/plan/plan';
 import { classNames } from '../../ui/classNames';
@@ -28,6 +28,13 @@ interface PaintCanvasProps {
   grey: boolean;
 }
 
+/** A stroke under way: its motifs are on the canvas, and go into the plan when it ends. */
+interface Stroke {
+  plan: Plan;
+  last: readonly [number, number];
+  readonly painted: Map<number, number>;
+}
+
 const ARROWS: Readonly<Record<string, readonly [number, number]>> = {
   ArrowLeft: [-1, 0],
   ArrowRight: [1, 0],
@@ -43,7 +50,7 @@ export function PaintCanvas(props: PaintCanvasProps) {
   const { ref, show } = usePaintCanvas(plan, estimate, widthPx);
   const [at, setAt] = useState(0);
   const [byKeys, setByKeys] = useState(false);
-  const stroke = useRef<{ plan: Plan; last: readonly [number, number] } | null>(null);
+  const stroke = useRef<Stroke | null>(null);
   const { widthMm, heightMm } = estimate.size;
   const laid = blanketFaces(plan, estimate);
   const here = laid.motifs[Math.min(at, laid.motifs.length - 1)];
@@ -53,25 +60,27 @@ export function PaintCanvas(props: PaintCanvasProps) {
     stroke.current = null;
   }, [plan]);
 
-  function brushed(on: Plan, motifs: readonly number[]): Plan {
-    const all = blanketFaces(on, estimate).motifs;
-    const faces = motifs.flatMap((i) => all[i] ?? []);
-    return brush.of === 'round'
-      ? withPaintedRound(on, faces, brush.round, brush.colour)
-      : withPainted(
-          on,
-          faces.filter(({ colourway }) => suits(on, colourway, brush.colourway)),
-          brush.colourway,
-        );
+  /** The plan and the colourway that the brush gives a motif; null where it does not suit it. */
+  function brushed(on: Plan, { colourway }: BlanketMotif) {
+    if (brush.of === 'round') return withRecoloured(on, colourway, brush.round, brush.colour);
+    return suits(on, colourway, brush.colourway) ? { plan: on, colourway: brush.colourway } : null;
+  }
+
+  function withBrushed(on: Plan, motifs: readonly BlanketMotif[]): Plan {
+    return motifs.reduce((painted, motif) => {
+      const next = brushed(painted, motif);
+      return next ? withPainted(next.plan, [{ ...motif, colourway: next.colourway }]) : painted;
+    }, on);
   }
 
   function use(motif: number): void {
     setAt(motif);
     if (tool === 'pick') onPick(motif);
     else if (tool === 'fill') {
-      const same = sameAround(laid, motif).map((each) => laid.motifs.indexOf(each));
-      change((old) => brushed(old, same));
-    } else if (tool === 'paint') change((old) => brushed(old, [motif]));
+      change((old) => withBrushed(old, sameAround(laid, motif)));
+    } else if (tool === 'paint') {
+      change((old) => withBrushed(old, laid.motifs.slice(motif, motif + 1)));
+    }
   }
 
   const pointOf = (event: PointerEvent<HTMLCanvasElement>): readonly [number, number] => {
@@ -91,14 +100,23 @@ export function PaintCanvas(props: PaintCanvasProps) {
       return;
     }
     event.currentTarget.setPointerCapture(event.pointerId);
-    stroke.current = { plan, last: point };
+    stroke.current = { plan, last: point, painted: new Map() };
     dab(motif === null ? [] : [motif]);
   }
 
   function dab(motifs: readonly number[]): void {
-    if (!stroke.current || motifs.length === 0) return;
-    stroke.current.plan = brushed(stroke.current.plan, motifs);
-    show(stroke.current.plan, motifs);
+    const now = stroke.current;
+    if (!now) return;
+    const shown: BlanketMotif[] = [];
+    for (const i of motifs) {
+      const motif = laid.motifs[i];
+      const next = motif && !now.painted.has(i) ? brushed(now.plan, motif) : null;
+      if (!motif || !next) continue;
+      now.plan = next.plan;
+      now.painted.set(i, next.colourway);
+      shown.push({ ...motif, colourway: next.colourway });
+    }
+    if (shown.length > 0) show(now.plan, shown);
   }
 
   function onPointerMove(event: PointerEvent<HTMLCanvasElement>) {
@@ -126,9 +144,13 @@ export function PaintCanvas(props: PaintCanvasProps) {
   }
 
   function endStroke(): void {
-    const done = stroke.current?.plan;
+    const done = stroke.current;
     stroke.current = null;
-    if (done && done !== plan) change(() => done);
+    if (!done || done.painted.size === 0) return;
+    const painted = [...done.painted].flatMap(([i, colourway]) =>
+      laid.motifs[i] ? [{ ...laid.motifs[i], colourway }] : [],
+    );
+    change(() => withPainted(done.plan, painted));
   }
 
   function onKeyDown(event: KeyboardEvent) {

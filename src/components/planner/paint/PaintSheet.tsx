@@ -1,6 +1,6 @@
 import { Lock, LockOpen, Minus, Plus, Redo2, Undo2 } from 'lucide-react';
 import { useState } from 'react';
-import { withAllLocked, withoutPaint } from '../../../lib/colour/paintEdits';
+import { withoutPaint, withPainted } from '../../../lib/colour/paintEdits';
 import type { Estimate } from '../../../lib/ledger/ledger';
 import { blanketFaces } from '../../../lib/plan/blanketFaces';
 import type { Plan } from '../../../lib/plan/plan';
@@ -122,7 +122,7 @@ export default function PaintSheet({ plan, estimate, units, editing, onClose }: 
             <Button
               small
               icon={Lock}
-              onClick={() => change((old) => withAllLocked(old, blanketFaces(old, estimate)))}
+              onClick={() => change((old) => withPainted(old, laid.motifs))}
             >
               Lock all as they lie
             </Button>

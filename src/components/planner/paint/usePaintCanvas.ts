@@ -3,7 +3,7 @@ import { layStamps, stampsOf, type Stamp } from '../../blanket/paintBlanket';
 import { hexOf } from '../../blanket/hexOf';
 import type { Estimate } from '../../../lib/ledger/ledger';
 import { borderBands, outerOutlines } from '../../../lib/plan/borderBands';
-import { blanketFaces } from '../../../lib/plan/blanketFaces';
+import { blanketFaces, type BlanketMotif } from '../../../lib/plan/blanketFaces';
 import type { Plan } from '../../../lib/plan/plan';
 
 /** Most pixels a canvas is given: phones refuse more. */
@@ -11,8 +11,8 @@ const MOST_PIXELS = 12_000_000;
 
 interface PaintCanvas {
   readonly ref: React.RefObject<HTMLCanvasElement | null>;
-  /** Shows these motifs as `plan` has them, at once and without a render. */
-  readonly show: (plan: Plan, motifs: readonly number[]) => void;
+  /** Shows these motifs in colourways of `plan`, at once and without a render. */
+  readonly show: (plan: Plan, motifs: readonly BlanketMotif[]) => void;
 }
 
 /** A canvas with the blanket on it, `widthPx` wide: painted anew when the plan changes, and motif by motif in between. */
@@ -47,18 +47,11 @@ export function usePaintCanvas(plan: Plan, estimate: Estimate, widthPx: number):
   }, [plan, estimate, scale, stamped, widthMm, heightMm]);
 
   const show = useCallback(
-    (shown: Plan, motifs: readonly number[]) => {
+    (shown: Plan, motifs: readonly BlanketMotif[]) => {
       const context = ref.current?.getContext('2d');
-      if (!context) return;
-      const all = blanketFaces(shown, estimate).motifs;
-      layStamps(
-        context,
-        motifs.flatMap((i) => all[i] ?? []),
-        stamped(shown),
-        scale,
-      );
+      if (context) layStamps(context, motifs, stamped(shown), scale);
     },
-    [estimate, scale, stamped],
+    [scale, stamped],
   );
   return { ref, show };
 }
