@@ -1,6 +1,8 @@
 import { benchCalibration } from './calibration.ts';
 import { benchCompareTime } from './compareTime.ts';
 import { benchEstimateTime } from './estimateTime.ts';
+import { benchLayoutTime } from './layoutTime.ts';
+import { benchPainting } from './painting.ts';
 import { benchPatternTime } from './patternTime.ts';
 import { benchPages } from './pages.ts';
 import { heading } from './report.ts';
@@ -11,8 +13,10 @@ import { benchTyping } from './typing.ts';
 const parts = {
   time: benchEstimateTime,
   compare: benchCompareTime,
+  layout: benchLayoutTime,
   pattern: benchPatternTime,
   typing: withSite(benchTyping),
+  painting: withSite(benchPainting),
   calibration: benchCalibration,
   requests: withSite(benchRequests),
   pages: withSite(benchPages),
