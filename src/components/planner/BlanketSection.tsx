@@ -5,6 +5,7 @@ import type { Estimate } from '../../lib/ledger/ledger';
 import { withBorder } from '../../lib/plan/edits';
 import { mainMotif, type Plan } from '../../lib/plan/plan';
 import type { Units } from '../../lib/units/display';
+import { Button } from '../ui/Button';
 import { Select } from '../ui/Select';
 import { LayoutFields } from './LayoutFields';
 import { Section } from './Section';
@@ -19,6 +20,7 @@ interface BlanketSectionProps {
   terms: Terms;
   change: ChangePlan;
   choices: readonly MotifChoice[];
+  onBorder: () => void;
 }
 
 const BORDER_STITCHES = ['sc', 'hdc', 'dc'] as const;
@@ -26,7 +28,7 @@ const MOST_BORDER_ROUNDS = 12;
 
 /** How many motifs, how they are joined, and what goes round them. */
 export function BlanketSection(props: BlanketSectionProps) {
-  const { plan, estimate, units, terms, change, choices } = props;
+  const { plan, estimate, units, terms, change, choices, onBorder } = props;
   const stitch = plan.border[0]?.stitch ?? 'sc';
   const rounds = Math.max(plan.border.length, MOST_BORDER_ROUNDS);
   return (
@@ -96,6 +98,9 @@ export function BlanketSection(props: BlanketSectionProps) {
           }))}
         />
       </div>
+      <Button kind="quiet" small className="col-span-6 -ms-3 justify-self-start" onClick={onBorder}>
+        Border round by round
+      </Button>
     </Section>
   );
 }

@@ -28,6 +28,7 @@ import { YarnSection } from './YarnSection';
 
 const LedgerSheet = lazy(() => import('./LedgerSheet'));
 const CompareSheet = lazy(() => import('./CompareSheet'));
+const BorderSheet = lazy(() => import('./BorderSheet'));
 const SizesSheet = lazy(() => import('./SizesSheet'));
 const ShoppingSheet = lazy(() => import('./ShoppingSheet'));
 const PaintSheet = lazy(() => import('./paint/PaintSheet'));
@@ -52,7 +53,8 @@ interface PlannerProps {
   makingHref?: string;
 }
 
-type OpenSheet = 'none' | 'colours' | 'paint' | 'ledger' | 'compare' | 'sizes' | 'shopping';
+type OpenSheet =
+  'none' | 'colours' | 'paint' | 'ledger' | 'compare' | 'sizes' | 'border' | 'shopping';
 
 /** The estimator: inputs left, the answer and the picture right; everything recomputed at each change. */
 export function Planner(props: PlannerProps) {
@@ -91,7 +93,12 @@ export function Planner(props: PlannerProps) {
             choices={motifChoices}
             onColours={() => setSheet('colours')}
           />
-          <BlanketSection {...shared} terms={terms} choices={motifChoices} />
+          <BlanketSection
+            {...shared}
+            terms={terms}
+            choices={motifChoices}
+            onBorder={() => setSheet('border')}
+          />
         </form>
         <div className="grid content-start gap-8 px-4 pt-6 pb-10 lg:px-9" data-answer>
           {impossible && (
@@ -149,6 +156,7 @@ export function Planner(props: PlannerProps) {
             onClose={close}
           />
         )}
+        {sheet === 'border' && <BorderSheet {...shared} terms={terms} onClose={close} />}
         {sheet === 'sizes' && <SizesSheet {...shared} onClose={close} />}
         {sheet === 'shopping' && <ShoppingSheet {...shared} onClose={close} />}
       </LoadedLater>
