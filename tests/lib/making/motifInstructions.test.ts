@@ -27,7 +27,11 @@ describe('motifInstructions', () => {
     ]);
     expect(rounds.at(-1)?.colour).toBe('c1');
     expect(afterwards).toBe(false);
-    expect(links.map(({ where, what, why }) => why === null ? `${where}: ${what}` : `${where}: ${what} (${why})`)).toEqual([
+    expect(
+      links.map(({ where, what, why }) =>
+        why === null ? `${where}: ${what}` : `${where}: ${what} (${why})`,
+      ),
+    ).toEqual([
       'top side: link to row 1, motif 2',
       'left side: link to row 2, motif 1',
       'top left corner: link to row 1, motif 1 (inside: it crosses to the motif opposite)',
