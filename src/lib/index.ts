@@ -40,6 +40,14 @@ export { joiningOrder } from './joining/joiningOrder';
 export { compareJoins, compareTensions, type JoinComparison } from './joins/compareJoins';
 export { whyCheapest, type Why } from './joins/whyCheapest';
 export { whyInWords } from './joins/whyInWords';
+// Border
+export type { Edging, FourSides } from './border/edging';
+export { readEdging } from './border/readEdging';
+export { READY_EDGINGS, readyEdging } from './border/readyEdgings';
+export { borderChecks, type BorderCheck, type BorderFix } from './border/borderFit';
+// Sizes
+export { BLANKET_SIZES, type BlanketSize } from './sizes/blanketSizes';
+export { sizesOf, type SizedPlan } from './sizes/sizesOf';
 // Plan, estimate and shopping
 export * from './plan/plan';
 export { EXAMPLE_PLAN } from './plan/examplePlan';

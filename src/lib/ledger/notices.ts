@@ -1,3 +1,4 @@
+import { borderNotices } from '../border/borderNotices';
 import { expectedM, learnHand, handVarianceM2 } from '../hand/hand';
 import { joinFit } from '../joins/fit';
 import { mainMotif, type Plan } from '../plan/plan';
@@ -23,6 +24,7 @@ export function noticesOf(blanket: Blanket): Notice[] {
     ...readingNotices(blanket),
     ...fitNotices(blanket),
     ...flatnessNotices(blanket),
+    ...borderNotices(blanket),
     ...secondMotifNotices(blanket),
     ...partNotices(blanket),
     ...cautions(blanket),
