@@ -52,10 +52,17 @@ async function openPaint(page: Page, baseUrl: string): Promise<void> {
 }
 
 /** How long the main thread is busy with each move of one stroke. */
-const stroked = (page: Page): Promise<number[]> =>
-  page.locator('canvas').evaluate((canvas, moves) => {
+async function stroked(page: Page): Promise<number[]> {
+  const events = [
+    ['pointerdown', 0] as const,
+    ...Array.from({ length: MOVES }, (_, i) => ['pointermove', i / MOVES] as const),
+    ['pointerup', 1] as const,
+  ];
+  const taken = await page.locator('canvas').evaluate((canvas, all) => {
     const box = canvas.getBoundingClientRect();
-    const send = (type: string, share: number): number => {
+    // A made-up pointer cannot be captured.
+    (canvas as HTMLCanvasElement).setPointerCapture = () => undefined;
+    return all.map(([type, share]) => {
       const event = new PointerEvent(type, {
         bubbles: true,
         pointerId: 1,
@@ -66,11 +73,7 @@ const stroked = (page: Page): Promise<number[]> =>
       const startMs = performance.now();
       canvas.dispatchEvent(event);
       return performance.now() - startMs;
-    };
-    // A made-up pointer cannot be captured.
-    (canvas as HTMLCanvasElement).setPointerCapture = () => undefined;
-    send('pointerdown', 0);
-    const taken = Array.from({ length: moves }, (_, i) => send('pointermove', i / moves));
-    send('pointerup', 1);
-    return taken;
-  }, MOVES);
+    });
+  }, events);
+  return taken.slice(1, -1);
+}

@@ -19,6 +19,7 @@ test('motifs are painted by a stroke, one step to undo, and kept with the blanke
   await expect(sheet).toContainText(counts);
   await sheet.getByRole('radio', { name: /^Colourway 2:/ }).click();
   const canvas = sheet.locator('canvas');
+  await canvas.scrollIntoViewIfNeeded();
   const box = (await canvas.boundingBox())!;
   const at = (column: number, row: number) =>
     [

@@ -1,4 +1,4 @@
-import { useId } from 'react';
+import { lazy, Suspense, useId } from 'react';
 import { gaugeOf } from '../../lib/gauge/gauge';
 import { fixed } from '../../lib/motifs/polygonPoints';
 import type { Estimate } from '../../lib/ledger/ledger';
@@ -8,9 +8,11 @@ import { blanketFaces, type BlanketMotif } from '../../lib/plan/blanketFaces';
 import { mainMotif, type Plan } from '../../lib/plan/plan';
 import { showSize, type Units } from '../../lib/units/display';
 import { RuledFrame } from '../ui/RuledFrame';
+import { useIsHere } from '../ui/useIsHere';
 import { BorderRounds } from './BorderRounds';
 import { ColourwayDrawing } from './ColourwayDrawing';
-import { PaintedImage } from './PaintedImage';
+
+const PaintedImage = lazy(() => import('./PaintedImage'));
 
 interface BlanketPictureProps {
   plan: Plan;
@@ -25,6 +27,7 @@ const MOST_OBJECTS = 600;
 /** The blanket to scale under the rule, from its real rounds and colours. */
 export function BlanketPicture({ plan, estimate, units, maxHeightPx }: BlanketPictureProps) {
   const { size, rows, columns, layout } = estimate;
+  const isHere = useIsHere();
   const motifWord = mainMotif(plan).name.toLowerCase();
   const { motifs } = blanketFaces(plan, estimate);
   const unit = layoutFacts(layout).unit === 'blocks' ? 'blocks of ' : 'of ';
@@ -38,7 +41,11 @@ export function BlanketPicture({ plan, estimate, units, maxHeightPx }: BlanketPi
     >
       <BorderRounds {...{ plan, estimate, motifs }} />
       {motifs.length > MOST_OBJECTS ? (
-        <PaintedImage {...{ plan, estimate, motifs }} />
+        isHere && (
+          <Suspense>
+            <PaintedImage {...{ plan, estimate, motifs }} />
+          </Suspense>
+        )
       ) : (
         <MotifObjects {...{ plan, estimate, motifs }} />
       )}

@@ -14,7 +14,7 @@ interface PaintedImageProps {
 const LONGEST_PX = 1400;
 
 /** A large blanket as one image, painted once the browser has it. For use inside an svg in mm. */
-export function PaintedImage({ plan, estimate, motifs }: PaintedImageProps) {
+export default function PaintedImage({ plan, estimate, motifs }: PaintedImageProps) {
   const [href, setHref] = useState<string | null>(null);
   const { widthMm, heightMm } = estimate.size;
   useEffect(() => {

@@ -19,21 +19,20 @@ import { WoundCard } from '../ui/WoundCard';
 import type { ChangePlan } from './usePlan';
 
 interface ColourSheetProps {
-  open: boolean;
-  onOpenChange: (open: boolean) => void;
   plan: Plan;
   change: ChangePlan;
+  onClose: () => void;
 }
 
 /** Colourways that can be edited by hand here; more arrive only from a file or a program. */
 const MOST_BY_HAND = 12;
 
 /** The colours of a plan, the colour of every round, and of the border. */
-export function ColourSheet({ open, onOpenChange, plan, change }: ColourSheetProps) {
+export default function ColourSheet({ plan, change, onClose }: ColourSheetProps) {
   return (
     <Sheet
-      open={open}
-      onOpenChange={onOpenChange}
+      open
+      onOpenChange={(open) => !open && onClose()}
       title="Colours"
       description="The yarns, and the colour of every round. Paint it says which colourway lies where."
     >

@@ -13,7 +13,6 @@ import { Answer, skeinWord, sureWord } from './Answer';
 import { BlanketSection } from './BlanketSection';
 import { ChancePanel } from './ChancePanel';
 import { ColourRows } from './ColourRows';
-import { ColourSheet } from './ColourSheet';
 import { DoubtPanel } from './DoubtPanel';
 import { MotifSection } from './MotifSection';
 import { NextPanel } from './NextPanel';
@@ -26,6 +25,7 @@ import type { PlanEditing } from './usePlan';
 import { WeighedSection } from './WeighedSection';
 import { YarnSection } from './YarnSection';
 
+const ColourSheet = lazy(() => import('./ColourSheet'));
 const LedgerSheet = lazy(() => import('./LedgerSheet'));
 const CompareSheet = lazy(() => import('./CompareSheet'));
 const BorderSheet = lazy(() => import('./BorderSheet'));
@@ -136,8 +136,8 @@ export function Planner(props: PlannerProps) {
         detail={`${sureWord(plan.confidence)} sure · ${showSize(estimate.size.widthMm, estimate.size.heightMm, units)}`}
         action={<ShoppingButton href={shoppingHref} onOpen={() => setSheet('shopping')} />}
       />
-      <ColourSheet open={sheet === 'colours'} onOpenChange={close} {...{ plan, change }} />
       <LoadedLater what="This part">
+        {sheet === 'colours' && <ColourSheet {...shared} onClose={close} />}
         {sheet === 'ledger' && (
           <LedgerSheet
             {...shared}

@@ -99,7 +99,7 @@ function Choices({
       aria-label={label}
       value={value}
       onValueChange={onChange}
-      className="flex max-h-64 flex-wrap gap-2 overflow-y-auto p-1"
+      className="flex max-h-24 flex-wrap gap-2 overflow-y-auto p-1 lg:max-h-64"
     >
       {choices.map(({ value: each, words, picture, caption }) => (
         <RadioGroup.Item

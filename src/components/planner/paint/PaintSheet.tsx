@@ -56,8 +56,8 @@ export default function PaintSheet({ plan, estimate, units, editing, onClose }: 
       title="Which colours lie where"
       description="Paint motifs or single rounds, or let a rule place them. What you paint stays, whatever the rule."
     >
-      <div className="grid grid-cols-[minmax(0,1fr)] gap-5 pb-5 lg:grid-cols-[minmax(0,1fr)_19rem]">
-        <div className="grid min-w-0 content-start gap-3">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-5 pb-5 lg:grid-cols-[minmax(0,1fr)_19rem] lg:grid-rows-[auto_1fr]">
+        <div className="grid min-w-0 content-start gap-3 max-lg:order-2 lg:row-span-2">
           <div className="flex flex-wrap items-center gap-x-3 gap-y-2">
             <SegmentedControl
               label="Tool"
@@ -115,8 +115,10 @@ export default function PaintSheet({ plan, estimate, units, editing, onClose }: 
           <Counts plan={plan} estimate={estimate} />
           <ContrastList plan={plan} laid={laid} />
         </div>
-        <div className="grid content-start gap-6">
+        <div className="max-lg:order-1">
           <BrushFields {...{ plan, estimate, brush }} onBrush={setBrush} />
+        </div>
+        <div className="grid content-start gap-6 max-lg:order-3">
           <PlacementFields {...{ plan, estimate, units, change }} />
           <div className="flex flex-wrap gap-2">
             <Button
