@@ -5,7 +5,8 @@ import type { Estimate } from '../../lib/ledger/ledger';
 import type { Motif } from '../../lib/motifs/motif';
 import { motifStrokes } from '../../lib/motifs/motifStrokes';
 import { polygonPoints } from '../../lib/motifs/polygonPoints';
-import type { BlanketMotif } from '../../lib/plan/blanketFaces';
+import { blanketFaces, type BlanketMotif } from '../../lib/plan/blanketFaces';
+import { borderBands, outerOutlines } from '../../lib/plan/borderBands';
 import type { Plan } from '../../lib/plan/plan';
 import { hexOf } from './hexOf';
 import { shadeOf } from './shadeOf';
@@ -97,4 +98,24 @@ export function layStamps(
     context.drawImage(stamp, -stamp.width / 2, -stamp.height / 2);
     context.restore();
   }
+}
+
+/** The border, beneath the motifs: each round over the one outside it. */
+export function drawBorder(
+  context: CanvasRenderingContext2D,
+  plan: Plan,
+  estimate: Estimate,
+  scale: number,
+): void {
+  const path = new Path2D(outerOutlines(blanketFaces(plan, estimate).motifs));
+  context.save();
+  context.scale(scale, scale);
+  context.lineJoin = 'miter';
+  for (const { reachMm, colour } of borderBands(plan, estimate)) {
+    context.fillStyle = context.strokeStyle = hexOf(plan, colour);
+    context.lineWidth = Math.max(0.01, 2 * reachMm);
+    context.stroke(path);
+    context.fill(path);
+  }
+  context.restore();
 }

@@ -1,4 +1,4 @@
-import { Redo2, Undo2 } from 'lucide-react';
+import { Download, Redo2, Undo2 } from 'lucide-react';
 import { lazy, useState, type ReactNode } from 'react';
 import type { MotifChoice } from '../../lib/motifs/motifChoices';
 import type { Plan } from '../../lib/plan/plan';
@@ -218,6 +218,23 @@ function FinishedSize({ plan, estimate, units }: Parameters<typeof BlanketPictur
         {showFabric(1.96 * size.widthSdMm, units)} by {showFabric(1.96 * size.heightSdMm, units)}
         {plan.motifSideMm === null && ': measure a finished motif to narrow that'}.
       </p>
+      <div className="-ms-3 flex flex-wrap" data-chrome>
+        {(['png', 'svg'] as const).map((as) => (
+          <Button
+            key={as}
+            kind="quiet"
+            small
+            icon={Download}
+            onClick={() => {
+              void import('../blanket/downloadPicture').then(({ downloadPicture }) =>
+                downloadPicture(plan, estimate, as),
+              );
+            }}
+          >
+            Picture as {as.toUpperCase()}
+          </Button>
+        ))}
+      </div>
     </div>
   );
 }

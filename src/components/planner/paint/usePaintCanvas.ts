@@ -1,8 +1,6 @@
 import { useCallback, useEffect, useMemo, useRef } from 'react';
-import { layStamps, stampsOf, type Stamp } from '../../blanket/paintBlanket';
-import { hexOf } from '../../blanket/hexOf';
+import { drawBorder, layStamps, stampsOf, type Stamp } from '../../blanket/paintBlanket';
 import type { Estimate } from '../../../lib/ledger/ledger';
-import { borderBands, outerOutlines } from '../../../lib/plan/borderBands';
 import { blanketFaces, type BlanketMotif } from '../../../lib/plan/blanketFaces';
 import type { Plan } from '../../../lib/plan/plan';
 
@@ -54,23 +52,4 @@ export function usePaintCanvas(plan: Plan, estimate: Estimate, widthPx: number):
     [scale, stamped],
   );
   return { ref, show };
-}
-
-function drawBorder(
-  context: CanvasRenderingContext2D,
-  plan: Plan,
-  estimate: Estimate,
-  scale: number,
-): void {
-  const path = new Path2D(outerOutlines(blanketFaces(plan, estimate).motifs));
-  context.save();
-  context.scale(scale, scale);
-  context.lineJoin = 'miter';
-  for (const { reachMm, colour } of borderBands(plan, estimate)) {
-    context.fillStyle = context.strokeStyle = hexOf(plan, colour);
-    context.lineWidth = Math.max(0.01, 2 * reachMm);
-    context.stroke(path);
-    context.fill(path);
-  }
-  context.restore();
 }
