@@ -28,7 +28,7 @@ export function SizesTable({ plan, sized, units, onUse, onRemove }: SizesTablePr
   const { price, putUp, weightCategory } = plan.yarn;
   const { unit } = layoutFacts(arrangementOf(plan).layout);
   return (
-    <div role="region" aria-label="Several sizes" tabIndex={0} className="overflow-x-auto">
+    <div role="region" aria-label="Several sizes" tabIndex={0} className="relative overflow-x-auto">
       <table className="w-full border-collapse">
         <caption className="pb-2 text-start">
           <b>{mainMotif(plan).name}</b>, skeins of {showYarn(putUp.lengthM, units)}
