@@ -5,6 +5,7 @@ import { borderChecks } from '../../../src/lib/border/borderFit';
 import { edgeSides } from '../../../src/lib/border/edge';
 import { sumSides, type Edging, type FourSides } from '../../../src/lib/border/edging';
 import { addInWords, fixInWords } from '../../../src/lib/border/fixInWords';
+import { readEdging } from '../../../src/lib/border/readEdging';
 import { READY_EDGINGS, readyEdging } from '../../../src/lib/border/readyEdgings';
 import { gridCounts } from '../../../src/lib/layout/gridCounts';
 import type { BorderRound } from '../../../src/lib/plan/plan';
@@ -14,6 +15,15 @@ import { buildPlan, FIXED_SEED, frozen } from '../../support/plans';
 const sc: BorderRound = { stitch: 'sc', colour: 'c1' };
 const round = (edging: Edging): BorderRound => ({ stitch: 'dc', colour: 'c1', edging });
 const shells = readyEdging('shell')!;
+/** Needs two stitches once, on its first side, and then threes. */
+const withBeginning: Edging = {
+  name: 'Begins with two',
+  ...readEdging(
+    'Ch 1, sc in next 2 sts, *3 dc in next st, sk next st, sc in next st; rep from * around; join with sl st in first sc.',
+    { terms: 'us' },
+  ).edging!,
+};
+const EDGINGS = [...READY_EDGINGS.map(({ key }) => readyEdging(key)!), withBeginning];
 
 /**
  * Whether a hand that works repeat after repeat from the first corner stitch on begins one at every
@@ -41,7 +51,7 @@ const anyBorder = fc.record({
   columns: fc.integer({ min: 1, max: 5 }),
   n: fc.integer({ min: 3, max: 24 }),
   before: fc.integer({ min: 0, max: 3 }),
-  key: fc.constantFrom(...READY_EDGINGS.map(({ key }) => key)),
+  edging: fc.constantFrom(...EDGINGS),
 });
 
 describe('borderChecks', () => {
@@ -62,10 +72,9 @@ describe('borderChecks', () => {
   it('says even of just those edges round which a walk, stitch by stitch, comes out', () => {
     const size = { widthMm: 1, heightMm: 1 };
     fc.assert(
-      fc.property(anyBorder, ({ rows, columns, n, before, key }) => {
+      fc.property(anyBorder, ({ rows, columns, n, before, edging }) => {
         const counts = gridCounts(SQUARES, rows, columns);
         const edge = edgeSides({ layout: 'square', rows, columns, counts, size }, n);
-        const edging = readyEdging(key)!;
         const rounds = frozen([...Array<BorderRound>(before).fill(sc), round(edging)]);
         const check = borderChecks(rounds, edge).at(-1)!;
         expect(check.even).toBe(walkComesOutEven(edging, check.over));
@@ -79,9 +88,8 @@ describe('borderChecks', () => {
       fc.property(
         fc.tuple(...Array.from({ length: 4 }, () => fc.integer({ min: 1, max: 90 }))),
         fc.integer({ min: 0, max: 2 }),
-        fc.constantFrom(...READY_EDGINGS.map(({ key }) => key)),
-        (edge, before, key) => {
-          const edging = readyEdging(key)!;
+        fc.constantFrom(...EDGINGS),
+        (edge, before, edging) => {
           const border = [...Array<BorderRound>(before).fill(sc), round(edging)];
           const sides = edge as unknown as FourSides;
           const check = borderChecks(border, sides).at(-1)!;
