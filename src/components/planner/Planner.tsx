@@ -120,7 +120,7 @@ export function Planner(props: PlannerProps) {
                 <Button onClick={() => setSheet('sizes')}>Several sizes</Button>
                 <Button onClick={() => openLedger('all')}>Open the ledger</Button>
               </div>
-              <PlanNotices notices={estimate.notices} />
+              <PlanNotices notices={estimate.notices} {...{ plan, change }} />
             </div>
             <div className="grid content-start gap-7">
               <ChancePanel {...shared} chosen={chosen} />
