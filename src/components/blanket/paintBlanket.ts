@@ -2,6 +2,7 @@ import { gaugeOf } from '../../lib/gauge/gauge';
 import { readyJoin } from '../../lib/joins/readyJoins';
 import { SLOT_FACTS } from '../../lib/layout/face';
 import type { Estimate } from '../../lib/ledger/ledger';
+import { apothemsAcross } from '../../lib/motifs/geometry';
 import type { Motif } from '../../lib/motifs/motif';
 import { motifStrokes } from '../../lib/motifs/motifStrokes';
 import { polygonPoints } from '../../lib/motifs/polygonPoints';
@@ -44,7 +45,7 @@ export function stampsOf(
     return stamp;
 
     function drawStamp(): Stamp {
-      const cellMm = acrossMm / (motif.sides === 3 ? 3 : 2) + estimate.size.seamMm / 2;
+      const cellMm = acrossMm / apothemsAcross(motif.sides) + estimate.size.seamMm / 2;
       const corners = motif.sides === 0 ? 4 : motif.sides;
       const reachMm = cellMm / Math.cos(Math.PI / corners);
       const canvas = document.createElement('canvas');
