@@ -2,7 +2,7 @@ import { useId } from 'react';
 import type { Estimate } from '../../lib/ledger/ledger';
 import { fixed } from '../../lib/motifs/polygonPoints';
 import type { BlanketMotif } from '../../lib/plan/blanketFaces';
-import { borderBands, outerOutlines } from '../../lib/plan/borderBands';
+import { borderBands, MITRE_LIMIT, outerOutlines } from '../../lib/plan/borderBands';
 import type { Plan } from '../../lib/plan/plan';
 import { hexOf } from './hexOf';
 
@@ -18,7 +18,7 @@ export function BorderRounds({ plan, estimate, motifs }: BorderRoundsProps) {
   const bands = borderBands(plan, estimate);
   if (bands.length === 0) return null;
   return (
-    <g className="keeps-colour" strokeLinejoin="miter">
+    <g className="keeps-colour" strokeLinejoin="miter" strokeMiterlimit={MITRE_LIMIT}>
       <defs>
         <path id={id} d={outerOutlines(motifs)} />
       </defs>

@@ -7,7 +7,7 @@ import type { Motif } from '../../lib/motifs/motif';
 import { motifStrokes } from '../../lib/motifs/motifStrokes';
 import { polygonPoints } from '../../lib/motifs/polygonPoints';
 import { blanketFaces, type BlanketMotif } from '../../lib/plan/blanketFaces';
-import { borderBands, outerOutlines } from '../../lib/plan/borderBands';
+import { borderBands, MITRE_LIMIT, outerOutlines } from '../../lib/plan/borderBands';
 import type { Plan } from '../../lib/plan/plan';
 import { hexOf } from './hexOf';
 import { shadeOf } from './shadeOf';
@@ -112,6 +112,7 @@ export function drawBorder(
   context.save();
   context.scale(scale, scale);
   context.lineJoin = 'miter';
+  context.miterLimit = MITRE_LIMIT;
   for (const { reachMm, colour } of borderBands(plan, estimate)) {
     context.fillStyle = context.strokeStyle = hexOf(plan, colour);
     context.lineWidth = Math.max(0.01, 2 * reachMm);

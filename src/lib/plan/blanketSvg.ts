@@ -8,7 +8,7 @@ import type { Motif } from '../motifs/motif';
 import { motifStrokes } from '../motifs/motifStrokes';
 import { fixed, polygonPoints } from '../motifs/polygonPoints';
 import { blanketFaces, type BlanketMotif } from './blanketFaces';
-import { borderBands, outerOutlines } from './borderBands';
+import { borderBands, MITRE_LIMIT, outerOutlines } from './borderBands';
 import type { Plan } from './plan';
 
 /** What shows between the strands of a yarn. */
@@ -55,7 +55,7 @@ function borderOf(plan: Plan, estimate: Estimate, motifs: readonly BlanketMotif[
   const path = outerOutlines(motifs);
   const rounds = borderBands(plan, estimate).map(({ reachMm, colour }) => {
     const hex = hexOf(plan, colour);
-    return `<path d="${path}" fill="${hex}" stroke="${hex}" stroke-width="${fixed(2 * reachMm)}"/>`;
+    return `<path d="${path}" fill="${hex}" stroke="${hex}" stroke-width="${fixed(2 * reachMm)}" stroke-miterlimit="${MITRE_LIMIT}"/>`;
   });
   return rounds.join('');
 }

@@ -11,6 +11,9 @@ export interface BorderBand {
   readonly colour: string;
 }
 
+/** How sharp a corner a border follows: to 60°; half a triangle is sharper, but no corner of the blanket. */
+export const MITRE_LIMIT = 2.1;
+
 /** The rounds of a border from the outside in, each to be drawn over the one before. */
 export function borderBands(plan: Plan, { size }: Estimate): BorderBand[] {
   const gauge = gaugeOf(plan.swatch, plan.yarn.weightCategory);
