@@ -9,9 +9,13 @@ import { getAll } from '../getAll';
 const PATH = '/api/stash';
 const lotList = listOf(lotSchema);
 
+/** Every lot of the stash. */
+export const listStash = (signal?: AbortSignal): Promise<PresentedLot[]> =>
+  getAll(PATH, lotList, signal);
+
 export const stashQuery = queryOptions({
   queryKey: ['stash'],
-  queryFn: ({ signal }) => getAll(PATH, lotList, signal),
+  queryFn: ({ signal }) => listStash(signal),
 });
 
 export const createLot = (colourwayId: string, lot: LotContent): Promise<PresentedLot> =>

@@ -16,6 +16,7 @@ import { Sheet } from '../ui/Dialog';
 import { Field } from '../ui/Field';
 import { Select } from '../ui/Select';
 import { WoundCard } from '../ui/WoundCard';
+import { StashColours } from './StashColours';
 import type { ChangePlan } from './usePlan';
 
 interface ColourSheetProps {
@@ -103,6 +104,7 @@ function Colours({ plan, change }: PartProps) {
           Add a colour
         </Button>
       )}
+      <StashColours {...{ plan, change }} />
     </section>
   );
 }
