@@ -42,6 +42,9 @@ for (const path of STRANGERS) {
 
 const SHEETS = {
   colours: 'Change colours',
+  painting: 'Paint it',
+  sizes: 'Several sizes',
+  border: 'Border round by round',
   ledger: 'Open the ledger',
   joins: 'Compare joins',
   shopping: 'Shopping list',

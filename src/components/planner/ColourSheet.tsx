@@ -55,10 +55,12 @@ function Colours({ plan, change }: PartProps) {
       <h3 className="pb-2">Yarn colours</h3>
       <ul className="grid gap-3">
         {plan.colours.map(({ key, name, hex }) => (
-          <li key={key} className="flex items-end gap-3">
+          <li
+            key={key}
+            className="grid grid-cols-[auto_minmax(0,1fr)_4rem_auto] items-end gap-3 max-sm:gap-2"
+          >
             <WoundCard colour={hex} weight={plan.yarn.weightCategory} size="md" />
             <Field
-              className="flex-1"
               label="Name"
               value={name}
               maxLength={PLAN_LIMITS.nameLength}
@@ -69,7 +71,6 @@ function Colours({ plan, change }: PartProps) {
               error={name.trim() === '' ? 'A colour needs a name' : undefined}
             />
             <Field
-              className="w-16"
               label="Shade"
               type="color"
               value={hex}
