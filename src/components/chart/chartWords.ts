@@ -32,6 +32,7 @@ const INTO = {
   ring: ' in the ring',
   'round-start': ' in the first stitch',
   'own-chain': ' in its own chain',
+  facing: ' in the motif beside it',
   none: '',
 } as const;
 
@@ -41,6 +42,7 @@ const ROLE: Readonly<Record<WorkedStitch['role'], string>> = {
   turning: ', to reach the height',
   space: ', of a space',
   picot: ', of a picot',
+  link: ', a link',
   travel: ', on the way',
   join: ', closes the round',
 };

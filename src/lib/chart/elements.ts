@@ -71,7 +71,7 @@ export function elementsOf(
     if (first.role === 'travel' || (first.role === 'join' && first.into.kind !== 'round-start'))
       travel.push(...members);
     else if (first.role === 'join' && slips) join = at;
-    else if (first.role === 'picot') {
+    else if (first.role === 'picot' || first.role === 'link') {
       const after = elements.at(-1)?.members.length ?? 0;
       picots.push({ members, on: elements.length - 1, after });
     } else if (first.role === 'space' || first.role === 'join') {

@@ -11,7 +11,7 @@ export interface StitchRun {
   /** US code of what they are worked into or, in a gap, after, "ch-2" for a space; or what else they hang on. */
   readonly into:
     | { readonly kind: 'place' | 'gap'; readonly code: string; readonly inOne: boolean }
-    | { readonly kind: 'ring' | 'round-start' | 'own-chain' | 'none' };
+    | { readonly kind: 'ring' | 'round-start' | 'own-chain' | 'facing' | 'none' };
   readonly side: number;
   readonly corner: number | null;
 }

@@ -21,22 +21,24 @@ export interface ReadOptions {
  * What a stitch is worked into. `place`: a place of the round below, by its index there, or, with `gap`,
  * between that place and the one that comes after it as this round meets them;
  * `round-start`: the first stitch of its own round, which a joining stitch closes to;
- * `own-chain`: chains just made, as of a picot; `none`: chains, which hang on nothing.
+ * `own-chain`: chains just made, as of a picot; `facing`: the motif beside this one, which is finished; `none`: chains, which hang on nothing.
  */
 export type Into =
   | { readonly kind: 'place'; readonly index: number; readonly gap?: true }
   | { readonly kind: 'ring' }
   | { readonly kind: 'round-start' }
   | { readonly kind: 'own-chain' }
+  | { readonly kind: 'facing' }
   | { readonly kind: 'none' };
 
 /**
  * stitch: counts as one; standing: a chain of the beginning that counts as part of a stitch;
  * turning: a chain of the beginning that does not; space: a chain of a chain space;
  * picot: a chain closed to a picot; travel: a slip stitch that walks to where the round begins;
- * join: closes the round.
+ * join: closes the round; link: takes hold of the motif beside this one.
  */
-export type Role = 'stitch' | 'standing' | 'turning' | 'space' | 'picot' | 'travel' | 'join';
+export type Role =
+  'stitch' | 'standing' | 'turning' | 'space' | 'picot' | 'travel' | 'join' | 'link';
 
 /** One stitch that the hook makes, in the order of making; its index is its address in the round. */
 export interface WorkedStitch {

@@ -20,12 +20,12 @@ export interface PlaceFilter {
   readonly chains: number | null;
 }
 
-/** How far "each …" or a repeat goes. `left`: to the last so many stitches. */
+/** How far "each …" or a repeat goes. `left`: to the last so many stitches of the round, or of this side. */
 export type Until =
   | { readonly to: 'end'; readonly word: 'around' | 'across' | 'to end' }
   | { readonly to: 'corner' }
   | { readonly to: 'space'; readonly filter: PlaceFilter }
-  | { readonly to: 'left'; readonly amount: Amount };
+  | { readonly to: 'left'; readonly amount: Amount; readonly before: 'end' | 'corner' };
 
 /** Where stitches are worked. */
 export type Where =
@@ -38,6 +38,8 @@ export type Where =
   | { readonly kind: 'any'; readonly filter: PlaceFilter }
   | { readonly kind: 'ring'; readonly magic: boolean }
   | { readonly kind: 'turning-chain' }
+  /** A place of the motif beside this one, across from where the hook is. */
+  | { readonly kind: 'facing'; readonly filter: PlaceFilter }
   | { readonly kind: 'chain-from-hook'; readonly nth: number };
 
 /** What a beginning chain stands for: a stitch and the chains of a space, or no stitch at all. */

@@ -24,6 +24,7 @@ export function placeNamed(state: ParseState, preposition: boolean): Where | nul
   if (state.means('top')) return readTop(state);
   if (state.peek().kind === 'ordinal') return readOrdinal(state);
   if (state.means('middle')) return readMiddle(state);
+  if (state.isWord('facing')) return readFacing(state);
   if (ringLength(state) > 0) return readRing(state);
   if (state.means('between')) return readBetween(state);
   if (!preposition) return null;
@@ -39,6 +40,13 @@ function readNext(state: ParseState): Where | null {
   correctWord(state);
   const filter = readFilter(state) ?? (amount ? ANY_STITCH : null);
   return filter && { kind: 'next', amount: amount ?? amountOf(1), filter };
+}
+
+/** "facing ch-5 sp", "facing st": of whichever motif lies beside this one. */
+function readFacing(state: ParseState): Where {
+  state.at += 1;
+  const filter = readFilter(state) ?? ANY_STITCH;
+  return { kind: 'facing', filter };
 }
 
 function readSame(state: ParseState): Where {

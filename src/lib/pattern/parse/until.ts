@@ -53,7 +53,23 @@ function readTo(state: ParseState): Until | null {
 /** "to last 2 sts", "to last st". */
 function readLeft(state: ParseState, start: number): Until | null {
   const amount = isAmount(state) ? readAmount(state) : amountOf(1);
-  if (amount && readFilter(state)) return { to: 'left', amount };
+  if (amount && readFilter(state)) {
+    return { to: 'left', amount, before: takeBeforeCorner(state) ? 'corner' : 'end' };
+  }
   state.at = start;
   return null;
+}
+
+/** "before corner", "before next corner sp". */
+function takeBeforeCorner(state: ParseState): boolean {
+  const start = state.at;
+  if (state.isWord('before')) {
+    state.at += 1;
+    state.skipFillers();
+    state.take('next');
+    const filter = readFilter(state);
+    if (filter?.of === 'corner' || filter?.of === 'corner-space') return true;
+  }
+  state.at = start;
+  return false;
 }

@@ -43,7 +43,8 @@ export function printUntil(until: Until, words: Vocabulary): string {
   if (until.to === 'end') return until.word;
   if (until.to === 'corner') return 'to corner';
   if (until.to === 'space') return `to next ${printFilter(until.filter, words)}`;
-  return `to last ${printAmount(until.amount)} ${words.word('sts')}`;
+  const corner = until.before === 'corner' ? ' before corner' : '';
+  return `to last ${printAmount(until.amount)} ${words.word('sts')}${corner}`;
 }
 
 /** "in next 2 sts and in next ch-2 sp". */
@@ -67,6 +68,8 @@ function printWhere(where: Where, words: Vocabulary): string {
       return `in ${where.kind} ${printFilter(where.filter, words)}`;
     case 'ring':
       return where.magic ? 'in magic ring' : 'in ring';
+    case 'facing':
+      return `in facing ${printFilter(where.filter, words)}`;
     case 'turning-chain':
       return `in top of ${words.word('beg')} ${words.chain()}`;
     case 'chain-from-hook':

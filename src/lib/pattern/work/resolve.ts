@@ -30,6 +30,8 @@ export function positionsOf(
       return anyOne(hand, where.filter, span);
     case 'turning-chain':
       return turningChain(hand, span);
+    case 'facing':
+      return onlyLinks(hand, span);
     case 'chain-from-hook':
       return nextOnes(hand, { of: 'stitch', code: null, chains: null }, 1, span);
   }
@@ -132,16 +134,20 @@ export function limitOf(hand: Hand, until: Until, span: Span): number {
   if (until.to === 'end') return hand.size;
   if (until.to === 'left') {
     let left = until.amount.value;
-    let position = hand.size;
+    let position = until.before === 'corner' ? cornerAfter(hand, span) : hand.size;
     while (position > hand.next && left > 0 && hand.budget.step(span)) {
       position -= 1;
       if (hand.placeAt(position)?.kind === 'stitch') left -= 1;
     }
     return position;
   }
-  const filter: PlaceFilter =
-    until.to === 'corner' ? { of: 'corner', code: null, chains: null } : until.filter;
-  const position = hand.find(filter, hand.at, span, hand.size);
+  if (until.to === 'corner') return cornerAfter(hand, span);
+  const position = hand.find(until.filter, hand.at, span, hand.size);
+  return position < 0 ? hand.size : position;
+}
+
+function cornerAfter(hand: Hand, span: Span): number {
+  const position = hand.find({ of: 'corner', code: null, chains: null }, hand.at, span, hand.size);
   return position < 0 ? hand.size : position;
 }
 
@@ -165,6 +171,14 @@ function anyOne(hand: Hand, filter: PlaceFilter, span: Span): Position[] | null 
   }
   hand.beginAt(position);
   return [hand.home];
+}
+
+/** A group or a new yarn has no place in the motif beside this one: single stitches link to it. */
+function onlyLinks(hand: Hand, span: Span): Position[] {
+  const message = 'Only single stitches are worked into the motif beside this one.';
+  // Also while a repeat tries: another time round it is no better.
+  hand.budget.report.say('error', 'no-such-place', span, message);
+  return [hand.here];
 }
 
 /** Top of the turning chain: the last place of a row, the first of a round. */

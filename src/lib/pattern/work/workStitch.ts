@@ -40,6 +40,7 @@ function bare(hand: Hand, step: StitchStep): boolean {
 }
 
 function workWhere(hand: Hand, step: StitchStep, where: Where): boolean {
+  if (where.kind === 'facing') return link(hand, step);
   if (where.kind === 'ring' && hand.below.kind === 'nothing') {
     tell(
       hand,
@@ -120,6 +121,15 @@ function picots(hand: Hand, step: StitchStep): boolean {
   hand.begun = true;
   for (let i = 0; i < step.amount.value && !hand.budget.spent; i += 1) {
     hand.make(step.code, 'picot', { kind: 'own-chain' }, step, false);
+  }
+  return true;
+}
+
+/** Takes hold of the motif beside this one: chains before and after it stay one loop, and nothing is worked into it. */
+function link(hand: Hand, step: StitchStep): boolean {
+  hand.begun = true;
+  for (let i = 0; i < step.amount.value && !hand.budget.spent; i += 1) {
+    hand.make(step.code, 'link', { kind: 'facing' }, step, false);
   }
   return true;
 }
