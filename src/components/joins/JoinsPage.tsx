@@ -1,3 +1,4 @@
+import type { JoinText } from '../../lib/joins/joinTexts';
 import { READY_JOINS } from '../../lib/joins/readyJoins';
 import type { Terms } from '../../lib/pattern/reading';
 import type { Plan } from '../../lib/plan/plan';
@@ -6,6 +7,7 @@ import type { Units } from '../../lib/units/display';
 import { Select } from '../ui/Select';
 import { useTerms, useUnits } from '../ui/useUnits';
 import CompareJoins from './CompareJoins';
+import { JoinPattern } from './JoinPattern';
 
 interface JoinsPageProps {
   plan: Plan;
@@ -16,11 +18,13 @@ interface JoinsPageProps {
   /** Id of the blanket compared on; null is the example. */
   chosen: string | null;
   blankets: readonly { id: string; title: string }[];
+  /** Joins written out, by their keys; sewn ones are not. */
+  written: Readonly<Record<string, Readonly<Record<Terms, JoinText>>>>;
 }
 
 /** The joins side by side on one blanket, then each in words. */
 export default function JoinsPage(props: JoinsPageProps) {
-  const { plan, kept, chosen, blankets } = props;
+  const { plan, kept, chosen, blankets, written } = props;
   const units = useUnits(props.units);
   const terms = useTerms(props.terms);
   return (
@@ -55,6 +59,11 @@ export default function JoinsPage(props: JoinsPageProps) {
               <dt className="font-bold">{join.name}</dt>
               <dd className="mt-1">{join.description}</dd>
               <dd className="mt-1 text-sm text-ink-2">{needsInWords(join.fit)}</dd>
+              {written[join.key] && (
+                <dd className="mt-1">
+                  <JoinPattern pattern={written[join.key]![terms]} />
+                </dd>
+              )}
               {join.cautions.map((caution) => (
                 <dd key={caution} className="mt-1 text-sm text-ink-2">
                   {caution}

@@ -68,7 +68,7 @@ describe('CompareJoins', () => {
       fireEvent.click(screen.getByRole('checkbox', { name, hidden: true }));
     }
     expect(names()).toEqual(['Flat braid', 'Reed lace']);
-    screen.getByText(/^Flat braid takes 114\sm less than reed lace: /);
+    screen.getByText(/^Flat braid takes 69\sm less than reed lace: /);
   });
 
   it('sets another person beside the plan, typed in by stitches across a width', () => {
