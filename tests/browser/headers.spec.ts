@@ -32,6 +32,16 @@ test('a script that is not ours does not run', async ({ page, expectProblem }) =
   expect(ran).toBe(false);
 });
 
+const SHEETS = [
+  'Change colours',
+  'Paint it',
+  'Open the ledger',
+  'Compare joins',
+  'Several sizes',
+  'Border round by round',
+  'Shopping list',
+] as const;
+
 test('everything the front page opens keeps to the policy', async ({ page }) => {
   await page.addInitScript(() => {
     document.addEventListener('securitypolicyviolation', ({ violatedDirective, blockedURI }) => {
@@ -39,7 +49,7 @@ test('everything the front page opens keeps to the policy', async ({ page }) => 
     });
   });
   await open(page, '/');
-  for (const name of ['Change colours', 'Open the ledger', 'Compare joins', 'Shopping list']) {
+  for (const name of SHEETS) {
     await page.getByRole('button', { name, exact: true }).first().click();
     await expect(page.getByRole('dialog')).toBeVisible();
     await page.keyboard.press('Escape');
