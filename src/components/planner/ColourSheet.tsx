@@ -7,8 +7,9 @@ import {
   withoutColour,
   withRoundColour,
 } from '../../lib/plan/edits';
-import type { Plan } from '../../lib/plan/plan';
-import { withoutColourway } from '../../lib/plan/withoutMotif';
+import type { MotifChoice } from '../../lib/motifs/motifChoices';
+import { mainMotif, type Plan } from '../../lib/plan/plan';
+import { withFurtherMotif, withoutColourwayAndItsMotif } from '../../lib/plan/furtherMotif';
 import { PLAN_LIMITS } from '../../schemas/limits';
 import { Button } from '../ui/Button';
 import { Checkbox } from '../ui/Checkbox';
@@ -17,11 +18,13 @@ import { Field } from '../ui/Field';
 import { Select } from '../ui/Select';
 import { WoundCard } from '../ui/WoundCard';
 import { StashColours } from './StashColours';
+import { useMotifChoice } from './useMotifChoice';
 import type { ChangePlan } from './usePlan';
 
 interface ColourSheetProps {
   plan: Plan;
   change: ChangePlan;
+  choices: readonly MotifChoice[];
   onClose: () => void;
 }
 
@@ -29,7 +32,7 @@ interface ColourSheetProps {
 const MOST_BY_HAND = 12;
 
 /** The colours of a plan, the colour of every round, and of the border. */
-export default function ColourSheet({ plan, change, onClose }: ColourSheetProps) {
+export default function ColourSheet({ plan, change, choices, onClose }: ColourSheetProps) {
   return (
     <Sheet
       open
@@ -38,7 +41,7 @@ export default function ColourSheet({ plan, change, onClose }: ColourSheetProps)
       description="The yarns, and the colour of every round. Paint it says which colourway lies where."
     >
       <Colours {...{ plan, change }} />
-      <Colourways {...{ plan, change }} />
+      <Colourways {...{ plan, change, choices }} />
       <BorderColours {...{ plan, change }} />
     </Sheet>
   );
@@ -94,7 +97,7 @@ function Colours({ plan, change }: PartProps) {
       </ul>
       {plan.colours.length < PLAN_LIMITS.colours && (
         <Button
-          className="mt-3"
+          className="mt-3 align-top"
           icon={Plus}
           onClick={() =>
             change((old) =>
@@ -110,7 +113,9 @@ function Colours({ plan, change }: PartProps) {
   );
 }
 
-function Colourways({ plan, change }: PartProps) {
+function Colourways({ plan, change, choices }: PartProps & { choices: readonly MotifChoice[] }) {
+  const { choose, failed } = useMotifChoice(change, withFurtherMotif);
+  const main = mainMotif(plan);
   const options = plan.colours.map(({ key, name }) => ({ value: key, word: name }));
   return (
     <section className="border-t border-line py-5">
@@ -119,13 +124,18 @@ function Colourways({ plan, change }: PartProps) {
         {plan.colourways.slice(0, MOST_BY_HAND).map((colourway, i) => (
           <li key={i}>
             <div className="flex items-center justify-between">
-              <h4 className="font-bold">Colourway {i + 1}</h4>
+              <h4 className="font-bold">
+                Colourway {i + 1}
+                {plan.motifs.length > 1 && (
+                  <span className="font-normal"> of {plan.motifs[colourway.motifIndex]?.name}</span>
+                )}
+              </h4>
               <Button
                 kind="quiet"
                 small
                 icon={Trash2}
                 disabled={plan.colourways.length === 1}
-                onClick={() => change((old) => withoutColourway(old, i))}
+                onClick={() => change((old) => withoutColourwayAndItsMotif(old, i))}
                 aria-label={`Remove colourway ${i + 1}`}
               >
                 Remove
@@ -159,6 +169,25 @@ function Colourways({ plan, change }: PartProps) {
         <Button className="mt-3" icon={Plus} onClick={() => change(withColourway)}>
           Add a colourway
         </Button>
+      )}
+      {plan.motifs.length < PLAN_LIMITS.motifs && (
+        <Select
+          className="mt-3"
+          label="Add another motif"
+          hint="It takes its turn among the others."
+          value=""
+          error={failed ? 'This pattern could not be loaded. Try again.' : undefined}
+          onChange={({ target }) => {
+            const chosen = choices.find(({ key }) => key === target.value);
+            if (chosen) choose(chosen, main.rounds.length);
+          }}
+          options={[
+            { value: '', word: 'choose a motif of the same shape' },
+            ...choices
+              .filter(({ sides, key }) => sides === main.sides && key !== main.key)
+              .map(({ key, name }) => ({ value: key, word: name })),
+          ]}
+        />
       )}
     </section>
   );

@@ -137,7 +137,7 @@ export function Planner(props: PlannerProps) {
         action={<ShoppingButton href={shoppingHref} onOpen={() => setSheet('shopping')} />}
       />
       <LoadedLater what="This part">
-        {sheet === 'colours' && <ColourSheet {...shared} onClose={close} />}
+        {sheet === 'colours' && <ColourSheet {...shared} choices={motifChoices} onClose={close} />}
         {sheet === 'ledger' && (
           <LedgerSheet
             {...shared}

@@ -47,7 +47,11 @@ export function StashColours({ plan, change }: { plan: Plan; change: ChangePlan 
   if (!found || 'problem' in found) {
     return (
       <>
-        <Button className="ms-2 mt-3" busy={asking && 'Looking…'} onClick={() => void ask()}>
+        <Button
+          className="ms-2 mt-3 align-top"
+          busy={asking && 'Looking…'}
+          onClick={() => void ask()}
+        >
           From my stash
         </Button>
         {found && (
