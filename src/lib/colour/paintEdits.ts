@@ -1,7 +1,7 @@
 import { SLOT_FACTS } from '../layout/face';
 import type { BlanketMotif, LaidBlanket } from '../plan/blanketFaces';
 import type { Colourway, Plan } from '../plan/plan';
-import type { PaintedRun, Placement } from './placement';
+import type { PaintedRun, Placement, PlacementRule } from './placement';
 
 /**
  * The plan with these motifs locked in the colourway that each of them names, whatever the rule:
@@ -53,6 +53,12 @@ export const withTurns = (plan: Plan, colourway: number, takesTurns: boolean): P
 
 const isSame = (left: Colourway, right: Colourway): boolean =>
   left.motifIndex === right.motifIndex && left.roundColours.join() === right.roundColours.join();
+
+/** The plan with another rule for what is not painted. */
+export const withRule = (plan: Plan, rule: PlacementRule): Plan => ({
+  ...plan,
+  placement: { ...plan.placement, rule },
+});
 
 /** The plan with nothing painted or locked: the rule has its way everywhere. */
 export const withoutPaint = (plan: Plan): Plan => ({

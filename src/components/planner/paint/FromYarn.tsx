@@ -1,12 +1,13 @@
 import { useState } from 'react';
 import { motifsFromYarn } from '../../../lib/colour/fromYarn';
+import { withRule } from '../../../lib/colour/paintEdits';
 import type { PlacementRule } from '../../../lib/colour/placement';
 import { colourwayYarn } from '../../../lib/ledger/colourwayYarn';
 import { YARN_UNIT } from '../../../lib/units/display';
 import { Button } from '../../ui/Button';
 import { Disclosure } from '../../ui/Disclosure';
 import { NumberField } from '../../ui/NumberField';
-import { withRule, type PlacementProps } from './PlacementFields';
+import type { PlacementProps } from './placementProps';
 
 /** As many of each colourway as the yarn in hand makes. */
 export function FromYarn({

@@ -1,4 +1,5 @@
 import { Dices } from 'lucide-react';
+import { withRule } from '../../../lib/colour/paintEdits';
 import { gradientOrder } from '../../../lib/colour/gradientOrder';
 import {
   GRADIENT_WAYS,
@@ -8,23 +9,14 @@ import {
   type Stripes,
 } from '../../../lib/colour/placement';
 import { colourwayGroups } from '../../../lib/ledger/blanketOf';
-import type { Estimate } from '../../../lib/ledger/ledger';
 import { blanketFaces } from '../../../lib/plan/blanketFaces';
-import type { Plan } from '../../../lib/plan/plan';
-import type { Units } from '../../../lib/units/display';
 import { Button } from '../../ui/Button';
 import { NumberField } from '../../ui/NumberField';
 import { Select } from '../../ui/Select';
 import type { ChangePlan } from '../usePlan';
 import { FromYarn } from './FromYarn';
+import type { PlacementProps } from './placementProps';
 import { RepeatFields } from './RepeatFields';
-
-export interface PlacementProps {
-  plan: Plan;
-  estimate: Estimate;
-  units: Units;
-  change: ChangePlan;
-}
 
 const RULES: readonly { value: PlacementRule['by']; word: string }[] = [
   { value: 'diagonals', word: 'Along diagonals' },
@@ -42,11 +34,6 @@ const WAYS: Readonly<Record<GradientWay, string>> = {
   'to the corner': 'to the corner',
   outwards: 'from the middle outwards',
 };
-
-export const withRule = (plan: Plan, rule: PlacementRule): Plan => ({
-  ...plan,
-  placement: { ...plan.placement, rule },
-});
 
 const isStripes = (by: string): by is Stripes => STRIPES.some((each) => each === by);
 

@@ -1,12 +1,12 @@
 import { useState } from 'react';
-import { withoutPaint } from '../../../lib/colour/paintEdits';
+import { withoutPaint, withRule } from '../../../lib/colour/paintEdits';
 import { SLOT_FACTS } from '../../../lib/layout/face';
 import { blanketFaces } from '../../../lib/plan/blanketFaces';
 import type { Plan } from '../../../lib/plan/plan';
 import { PLAN_LIMITS } from '../../../schemas/limits';
 import { Button } from '../../ui/Button';
 import { NumberField } from '../../ui/NumberField';
-import { withRule, type PlacementProps } from './PlacementFields';
+import type { PlacementProps } from './placementProps';
 
 /** A repeat is painted, not typed: the top left corner of what is shown is taken for it. */
 export function RepeatFields({ plan, estimate, change }: Omit<PlacementProps, 'units'>) {
