@@ -4,7 +4,7 @@ import { fixed } from '../../lib/motifs/polygonPoints';
 import type { BlanketMotif } from '../../lib/plan/blanketFaces';
 import { borderBands, MITRE_LIMIT, outerOutlines } from '../../lib/plan/borderBands';
 import type { Plan } from '../../lib/plan/plan';
-import { hexOf } from './hexOf';
+import { hexOf } from '../../lib/plan/hexOf';
 
 interface BorderRoundsProps {
   plan: Plan;

@@ -4,7 +4,7 @@ import type { Estimate } from '../../lib/ledger/ledger';
 import { joinStitches } from '../../lib/ledger/pieces';
 import type { Motif } from '../../lib/motifs/motif';
 import type { Plan } from '../../lib/plan/plan';
-import { hexOf } from './hexOf';
+import { hexOf } from '../../lib/plan/hexOf';
 import { JoinLoops } from './JoinLoops';
 import { MotifDrawing } from './MotifDrawing';
 

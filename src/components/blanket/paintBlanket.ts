@@ -9,7 +9,7 @@ import { polygonPoints } from '../../lib/motifs/polygonPoints';
 import { blanketFaces, type BlanketMotif } from '../../lib/plan/blanketFaces';
 import { borderBands, MITRE_LIMIT, outerOutlines } from '../../lib/plan/borderBands';
 import type { Plan } from '../../lib/plan/plan';
-import { hexOf } from './hexOf';
+import { hexOf } from '../../lib/plan/hexOf';
 import { shadeOf } from './shadeOf';
 
 /** A colourway drawn once, to be laid wherever it lies. */

@@ -3,7 +3,7 @@ import { Bar, BarChart, LabelList, ResponsiveContainer, XAxis, YAxis } from 'rec
 import type { JoinComparison } from '../../lib/joins/compareJoins';
 import type { Plan } from '../../lib/plan/plan';
 import { showYarn, YARN_UNIT, type Units } from '../../lib/units/display';
-import { hexOf } from '../blanket/hexOf';
+import { hexOf } from '../../lib/plan/hexOf';
 import { StrandPattern } from '../ui/StrandPattern';
 import type { Tension } from './tension';
 

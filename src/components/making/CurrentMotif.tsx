@@ -1,5 +1,5 @@
 import { ArrowLeft, ArrowRight, Check, RotateCcw } from 'lucide-react';
-import { hexOf } from '../blanket/hexOf';
+import { hexOf } from '../../lib/plan/hexOf';
 import { Button } from '../ui/Button';
 import { WoundCard } from '../ui/WoundCard';
 import type { MotifInstructions, RoundToWork } from '../../lib/making/motifInstructions';

@@ -1,4 +1,4 @@
-import { hexOf } from '../blanket/hexOf';
+import { hexOf } from '../../lib/plan/hexOf';
 import type { Estimate } from '../../lib/ledger/ledger';
 import { motifKeyOf } from '../../lib/making/madeMotifs';
 import type { BlanketMotif } from '../../lib/plan/blanketFaces';

@@ -1,5 +1,5 @@
 import { Scale } from 'lucide-react';
-import { hexOf } from '../blanket/hexOf';
+import { hexOf } from '../../lib/plan/hexOf';
 import { WARN_FROM, type ColourProgress } from '../../lib/making/makingYarn';
 import type { Plan } from '../../lib/plan/plan';
 import { yarnFigure, YARN_UNIT, type Units } from '../../lib/units/display';

@@ -1,4 +1,5 @@
 import { SLOT_FACTS } from '../layout/face';
+import { neighboursOf } from '../layout/planeMap';
 import type { BlanketMotif, LaidBlanket } from '../plan/blanketFaces';
 import type { Colourway, Plan } from '../plan/plan';
 import type { PaintedRun, Placement, PlacementRule } from './placement';
@@ -68,17 +69,11 @@ export const withoutPaint = (plan: Plan): Plan => ({
 
 /** The motif at `start` and all of its colourway that hang together with it by their sides. */
 export function sameAround({ motifs, map }: LaidBlanket, start: number): BlanketMotif[] {
-  const neighbours = new Map<number, number[]>();
-  for (const { motifs: pair } of map().sides) {
-    const [one, other] = pair;
-    if (one === undefined || other === undefined) continue;
-    neighbours.set(one, [...(neighbours.get(one) ?? []), other]);
-    neighbours.set(other, [...(neighbours.get(other) ?? []), one]);
-  }
+  const neighbours = neighboursOf(map());
   const colourway = motifs[start]?.colourway;
   const found = new Set([start]);
   for (const motif of found) {
-    for (const near of neighbours.get(motif) ?? []) {
+    for (const near of neighbours[motif] ?? []) {
       if (motifs[near]?.colourway === colourway) found.add(near);
     }
   }

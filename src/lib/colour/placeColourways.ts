@@ -1,5 +1,5 @@
 import { SLOT_FACTS, type Face } from '../layout/face';
-import type { PlaneMap } from '../layout/planeMap';
+import { neighboursOf, type PlaneMap } from '../layout/planeMap';
 import { evenQuotas, scatter } from './scatter';
 import { seeded } from './seeded';
 import type { Placement, PlacementRule, Stripes } from './placement';
@@ -165,13 +165,10 @@ function atRandom(
 ): PlacedColourways {
   const random = seeded(seed);
   const memberOf = new Map(members.map((face, member) => [face, member]));
-  const neighbours: number[][] = members.map(() => []);
-  for (const { motifs } of map.sides) {
-    const [one, other] = motifs.map((face) => memberOf.get(face));
-    if (one === undefined || other === undefined) continue;
-    neighbours[one]?.push(other);
-    neighbours[other]?.push(one);
-  }
+  const all = neighboursOf(map);
+  const neighbours = members.map((face) =>
+    (all[face] ?? []).flatMap((near) => memberOf.get(near) ?? []),
+  );
   const asked = counts && group.map((colourway) => counts[colourway] ?? 0);
   const { kinds, alike } = scatter({
     neighbours,

@@ -1,7 +1,7 @@
 import type { Face } from '../layout/face';
 import { placed } from '../layout/lattice';
 import type { Layout } from '../layout/layouts';
-import type { PlaneMap } from '../layout/planeMap';
+import { neighboursOf, type PlaneMap } from '../layout/planeMap';
 
 /**
  * In which order motifs are made and joined. continuous: rows there and back, so that the yarn
@@ -56,13 +56,7 @@ function outwards(map: PlaneMap, x: (i: number) => number, y: (i: number) => num
   const [middleX, middleY] = [mean(x), mean(y)];
   const far = (i: number): number => Math.hypot(x(i) - middleX, y(i) - middleY);
   const [first] = sorted(all, (i) => tidy(far(i)), y, x);
-  const neighbours: number[][] = all.map(() => []);
-  for (const { motifs } of map.sides) {
-    const [one, other] = motifs;
-    if (one === undefined || other === undefined) continue;
-    neighbours[one]?.push(other);
-    neighbours[other]?.push(one);
-  }
+  const neighbours = neighboursOf(map);
   const ring = new Map<number, number>(first === undefined ? [] : [[first, 0]]);
   for (const [face, number] of ring) {
     for (const near of neighbours[face] ?? []) if (!ring.has(near)) ring.set(near, number + 1);

@@ -53,3 +53,15 @@ export function planeMap(outlines: readonly Outline[]): PlaneMap {
     })),
   };
 }
+
+/** The motifs that share a side with each motif: of two squares side by side `[[1], [0]]`. */
+export function neighboursOf({ outlines, sides }: PlaneMap): number[][] {
+  const neighbours: number[][] = outlines.map(() => []);
+  for (const { motifs } of sides) {
+    const [one, other] = motifs;
+    if (one === undefined || other === undefined) continue;
+    neighbours[one]?.push(other);
+    neighbours[other]?.push(one);
+  }
+  return neighbours;
+}

@@ -1,5 +1,6 @@
 import { readyJoin } from '../joins/readyJoins';
 import type { CornerReason, JoiningStep } from '../joining/joiningSteps';
+import { SLOT_FACTS } from '../layout/face';
 import type { BlanketMotif } from '../plan/blanketFaces';
 import type { Plan } from '../plan/plan';
 
@@ -79,8 +80,10 @@ export function motifInstructions(
 export function placeWords(motifs: readonly BlanketMotif[], face: number, from?: number): string {
   const place = motifs[face]?.face;
   if (!place) return '';
-  const isSecond = (i: number | undefined): boolean =>
-    /filler/i.test(i === undefined ? '' : (motifs[i]?.face.slot ?? ''));
+  const isSecond = (i: number | undefined): boolean => {
+    const slot = motifs[i ?? -1]?.face.slot;
+    return slot !== undefined && SLOT_FACTS[slot].second;
+  };
   const word = isSecond(face) ? (isSecond(from) ? 'motif' : 'small motif') : 'motif';
   return `row ${place.row + 1}, ${word} ${place.column + 1}`;
 }

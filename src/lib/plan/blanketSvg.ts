@@ -9,6 +9,7 @@ import { motifStrokes } from '../motifs/motifStrokes';
 import { fixed, polygonPoints } from '../motifs/polygonPoints';
 import { blanketFaces, type BlanketMotif } from './blanketFaces';
 import { borderBands, MITRE_LIMIT, outerOutlines } from './borderBands';
+import { hexOf } from './hexOf';
 import type { Plan } from './plan';
 
 /** What shows between the strands of a yarn. */
@@ -35,9 +36,6 @@ export function blanketSvg(plan: Plan, estimate: Estimate): string {
     '</svg>',
   ].join('\n');
 }
-
-const hexOf = ({ colours }: Plan, key: string): string =>
-  colours.find((colour) => colour.key === key)?.hex ?? '#888888';
 
 const isPart = ({ face }: BlanketMotif): boolean => SLOT_FACTS[face.slot].share < 1;
 

@@ -1,7 +1,7 @@
 import { RadioGroup } from 'radix-ui';
 import type { ReactNode } from 'react';
 import { MotifDrawing } from '../../blanket/MotifDrawing';
-import { hexOf } from '../../blanket/hexOf';
+import { hexOf } from '../../../lib/plan/hexOf';
 import { gaugeOf } from '../../../lib/gauge/gauge';
 import type { Estimate } from '../../../lib/ledger/ledger';
 import type { Motif } from '../../../lib/motifs/motif';

@@ -1,4 +1,4 @@
-import type { Plan } from '../../lib/plan/plan';
+import type { Plan } from './plan';
 
 /** sRGB of a colour of the plan; grey for a key that it does not have. */
 export const hexOf = ({ colours }: Pick<Plan, 'colours'>, key: string): string =>
